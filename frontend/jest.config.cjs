@@ -1,0 +1,26 @@
+const esmOnly = ['@tanstack/react-table', '@tanstack/table-core', '@tanstack/store', '@tanstack/react-store', 'd3-[a-z-]+', 'internmap'];
+
+module.exports = {
+  rootDir: '.',
+  roots: ['<rootDir>/src'],
+  testRegex: '\\.test\\.tsx?$',
+  testEnvironment: '<rootDir>/jest/environment.cjs',
+  testEnvironmentOptions: { customExportConditions: ['resistry-source', 'browser', 'require'] },
+  setupFilesAfterEnv: ['<rootDir>/jest/setup.ts'],
+  moduleNameMapper: { '\\.css$': '<rootDir>/jest/style-sheet.cjs' },
+  transform: {
+    '^.+\\.[jt]sx?$': [
+      '@swc/jest',
+      {
+        jsc: {
+          parser: { syntax: 'typescript', tsx: true },
+          transform: { react: { runtime: 'automatic' } },
+          target: 'es2022',
+        },
+        module: { type: 'commonjs' },
+      },
+    ],
+  },
+  transformIgnorePatterns: [`/node_modules/(?!(${esmOnly.join('|')})/)`],
+  testTimeout: 30000,
+};

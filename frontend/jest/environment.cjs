@@ -1,0 +1,40 @@
+const { TestEnvironment } = require('jest-environment-jsdom');
+
+/** jsdom with what browsers have had for years and jsdom leaves out. */
+module.exports = class BrowserEnvironment extends TestEnvironment {
+  async setup() {
+    await super.setup();
+    const browser = this.global;
+    Object.assign(browser, {
+      TextEncoder,
+      TextDecoder,
+      structuredClone,
+      fetch,
+      Request,
+      Response,
+      Headers,
+      ReadableStream,
+      WritableStream,
+      TransformStream,
+    });
+    browser.matchMedia = (query) => ({
+      matches: false,
+      media: query,
+      onchange: null,
+      addEventListener: () => undefined,
+      removeEventListener: () => undefined,
+      addListener: () => undefined,
+      removeListener: () => undefined,
+      dispatchEvent: () => false,
+    });
+    browser.ResizeObserver = class {
+      observe() {}
+      unobserve() {}
+      disconnect() {}
+    };
+    browser.PointerEvent ??= class PointerEvent extends browser.MouseEvent {};
+    browser.Element.prototype.scrollTo = () => undefined;
+    browser.Element.prototype.scrollIntoView = () => undefined;
+    browser.scrollTo = () => undefined;
+  }
+};

@@ -1,0 +1,15 @@
+// Sets light or dark before the first paint. A file of its own, because the content policy allows no inline script.
+(function () {
+  var chosen = null;
+  try {
+    chosen = localStorage.getItem('resistry-theme');
+  } catch {
+    // Storage can be closed to us (private windows); the system's preference then decides.
+  }
+  var dark =
+    chosen === 'dark' ||
+    (chosen !== 'light' && window.matchMedia('(prefers-color-scheme: dark)').matches);
+  var theme = dark ? 'dark' : 'light';
+  document.documentElement.classList.add(theme);
+  document.documentElement.style.colorScheme = theme;
+})();
