@@ -1,0 +1,127 @@
+import { allowedFraction } from '../derating/policy-line';
+import { altitudeFactor } from '../derating/altitude-factor';
+import { entryFor, type Policy, type PolicyEntry } from '../derating/policy-entry';
+import type { Requirement } from '../duty/requirement';
+import type { SteadyLoad } from '../duty/steady-load';
+import { standardReferenceTemperature, type Drift, type Ratings } from '../ratings/ratings';
+import { thermalResistanceOf, type ThermalResistance } from '../thermal/thermal-resistance';
+import { axisTemperature, type AxisTemperature } from './axis-temperature';
+
+/** A quantity that is known, or the data that are missing for it. */
+export type Known = { known: true; value: number } | { known: false; missing: readonly string[] };
+
+/**
+ * Everything in an assessment that does not depend on the resistance: one set of ratings under one requirement and one
+ * policy, flattened so that a search can hold it against many resistances. SI; temperatures in °C.
+ */
+export interface Conditions {
+  ratings: Ratings;
+  requirement: Requirement;
+  /** Policy entry in force; undefined with `policyUnmatched` false = manufacturer's ratings as they are. */
+  entry?: PolicyEntry;
+  policyUnmatched: boolean;
+  axis: AxisTemperature;
+  thermal?: ThermalResistance;
+  /** Fraction of the rated dissipation at the axis temperature with the policy's line, without the altitude. */
+  fraction: Known;
+  altitude: Known;
+  allowedDissipation: Known;
+  allowedVoltage: Known;
+  load?: SteadyLoad;
+  rootSumSquare: boolean;
+  /** Known deviations that never change with the load: their sum, and the sum of their squares. */
+  fixedSum: number;
+  fixedSquares: number;
+  /** 1/K; 0 where missing or where no ambient is stated (the budget then says so). */
+  tcr: number;
+  referenceTemperature: number;
+  /** Reference temperature less the coldest, unloaded one, K. */
+  coldSpan: number;
+  /** 1/V; 0 where missing. */
+  voltageCoefficient: number;
+  drift?: Drift;
+  hours: number;
+}
+
+/** Flattens one set of ratings under a requirement and a policy. */
+export function conditionsOf(ratings: Ratings, requirement: Requirement, policy: Policy): Conditions {
+  const duty = requirement.duty;
+  const entry = policy === 'none' ? undefined : entryFor(policy.entries, ratings);
+  const policyUnmatched = policy !== 'none' && entry === undefined;
+  const axis = axisTemperature(duty, ratings.derating?.axis ?? 'ambient');
+  const referenceTemperature = ratings.referenceTemperature ?? standardReferenceTemperature;
+  const pulseShift = hasPulses(requirement) ? ratings.pulses?.shift : undefined;
+  const fixed = [ratings.tolerance, ratings.solderShift, ratings.humidityShift, pulseShift].filter(
+    (part) => part !== undefined,
+  );
+  const fraction = fractionOf(ratings, entry, policyUnmatched, axis);
+  const altitude = altitudeOf(entry, duty.ambient?.altitude);
+  return {
+    ratings,
+    requirement,
+    entry,
+    policyUnmatched,
+    axis,
+    thermal: thermalResistanceOf(ratings),
+    fraction,
+    altitude,
+    allowedDissipation: allowedDissipationOf(ratings, fraction, altitude),
+    allowedVoltage: allowedVoltageOf(ratings, entry, policyUnmatched),
+    load: requirement.load,
+    rootSumSquare: duty.deviation === 'root-sum-square',
+    fixedSum: fixed.reduce((sum, part) => sum + part, 0),
+    fixedSquares: fixed.reduce((sum, part) => sum + part * part, 0),
+    tcr: duty.ambient === undefined ? 0 : (ratings.tcr ?? 0),
+    referenceTemperature,
+    coldSpan: duty.ambient === undefined ? 0 : referenceTemperature - duty.ambient.min,
+    voltageCoefficient: ratings.voltageCoefficient ?? 0,
+    drift: duty.life === undefined ? undefined : ratings.drift,
+    hours: duty.life?.hours ?? 0,
+  };
+}
+
+/** Whether the duty states pulses, whose heat and shift then belong to every check of heat and deviation. */
+export function hasPulses(requirement: Requirement): boolean {
+  return (requirement.duty.pulses?.length ?? 0) > 0;
+}
+
+const unmatched = 'an entry of the derating policy for this part';
+
+function fractionOf(
+  ratings: Ratings,
+  entry: PolicyEntry | undefined,
+  policyUnmatched: boolean,
+  axis: AxisTemperature,
+): Known {
+  const missing: string[] = [];
+  if (policyUnmatched) missing.push(unmatched);
+  if (!axis.known) missing.push(axis.missing);
+  if (ratings.derating === undefined) missing.push('derating');
+  if (missing.length > 0 || !axis.known || ratings.derating === undefined) return { known: false, missing };
+  return { known: true, value: allowedFraction(ratings.derating, entry, axis.celsius) };
+}
+
+function altitudeOf(entry: PolicyEntry | undefined, metre: number | undefined): Known {
+  const factor = altitudeFactor(entry, metre);
+  return factor.known ? { known: true, value: factor.factor } : { known: false, missing: [factor.missing] };
+}
+
+function allowedDissipationOf(ratings: Ratings, fraction: Known, altitude: Known): Known {
+  const missing = [
+    ...(ratings.ratedDissipation === undefined ? ['ratedDissipation'] : []),
+    ...(fraction.known ? [] : fraction.missing),
+    ...(altitude.known ? [] : altitude.missing),
+  ];
+  if (ratings.ratedDissipation === undefined || !fraction.known || !altitude.known)
+    return { known: false, missing };
+  return { known: true, value: ratings.ratedDissipation * fraction.value * altitude.value };
+}
+
+function allowedVoltageOf(ratings: Ratings, entry: PolicyEntry | undefined, policyUnmatched: boolean): Known {
+  const missing = [
+    ...(ratings.limitingElementVoltage === undefined ? ['limitingElementVoltage'] : []),
+    ...(policyUnmatched ? [unmatched] : []),
+  ];
+  if (ratings.limitingElementVoltage === undefined || policyUnmatched) return { known: false, missing };
+  return { known: true, value: ratings.limitingElementVoltage * (entry?.voltageRatio ?? 1) };
+}
