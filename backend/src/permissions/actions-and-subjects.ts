@@ -1,0 +1,38 @@
+/** What the rules speak of; a new deed or kind of thing gets its word here first. `manage` means every deed. */
+export const ACTIONS = [
+  'read',
+  'compute',
+  'create',
+  'update',
+  'submit',
+  'approve',
+  'promote',
+  'restrict',
+  'withdraw',
+  'set-supply-status',
+  'set-last-order-date',
+  'invite',
+  'change-roles',
+  'deactivate',
+  'reactivate',
+  'manage',
+] as const;
+export type Action = (typeof ACTIONS)[number];
+
+export const SUBJECTS = [
+  'Account',
+  'Search',
+  'Part',
+  'Family',
+  'Manufacturer',
+  'CompanyPartNumber',
+  'Offer',
+  'Policy',
+  'User',
+  'Permission',
+  'AuditEntry',
+  'Mail',
+  'OutboxMessage',
+  'Backup',
+] as const;
+export type Subject = (typeof SUBJECTS)[number];

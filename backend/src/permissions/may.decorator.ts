@@ -1,0 +1,25 @@
+import { applyDecorators, SetMetadata } from '@nestjs/common';
+import { ApiBearerAuth, ApiForbiddenResponse, ApiUnauthorizedResponse } from '@nestjs/swagger';
+import { ProblemDocument } from '../common/problems/problem-document';
+import type { Action, Subject } from './actions-and-subjects';
+
+export const ACCESS = 'resistry:access';
+
+export interface Access {
+  action: Action;
+  subject: Subject;
+}
+
+/**
+ * What a person must be allowed to do to call this route. Where a rule has conditions, the route is open to whoever
+ * might fulfil them, and the service asks again with the thing itself: `Permissions.demand`.
+ */
+export function May(action: Action, subject: Subject): MethodDecorator {
+  const access: Access = { action, subject };
+  return applyDecorators(
+    SetMetadata(ACCESS, access),
+    ApiBearerAuth(),
+    ApiUnauthorizedResponse({ type: ProblemDocument }),
+    ApiForbiddenResponse({ type: ProblemDocument }),
+  );
+}
