@@ -1,0 +1,39 @@
+import { type DynamicModule, Module } from '@nestjs/common';
+import { APP_FILTER, APP_PIPE } from '@nestjs/core';
+import { AuditModule } from './audit/audit.module';
+import { AuthModule } from './auth/auth.module';
+import { LoggingModule } from './common/logging/logging.module';
+import { ProblemFilter } from './common/problems/problem.filter';
+import { StrictValidationPipe } from './common/validation/strict-validation.pipe';
+import type { ApplicationOptions } from './config/application-options';
+import { ConfigModule } from './config/config.module';
+import type { Environment } from './config/environment';
+import { DatabaseModule } from './database/database.module';
+import { HealthModule } from './health/health.module';
+import { OutboxModule } from './outbox/outbox.module';
+import { PermissionsModule } from './permissions/permissions.module';
+import { UsersModule } from './users/users.module';
+
+@Module({})
+export class AppModule {
+  static with(environment: Environment, options: ApplicationOptions): DynamicModule {
+    return {
+      module: AppModule,
+      imports: [
+        ConfigModule.with(environment, options),
+        LoggingModule.at(options.logLevel),
+        DatabaseModule,
+        AuthModule,
+        PermissionsModule,
+        AuditModule,
+        OutboxModule,
+        UsersModule,
+        HealthModule,
+      ],
+      providers: [
+        { provide: APP_FILTER, useClass: ProblemFilter },
+        { provide: APP_PIPE, useClass: StrictValidationPipe },
+      ],
+    };
+  }
+}
