@@ -1,4 +1,4 @@
-const esmOnly = ['@tanstack/react-table', '@tanstack/table-core', '@tanstack/store', '@tanstack/react-store', 'd3-[a-z-]+', 'internmap'];
+const esmOnly = ['@tanstack/react-table', '@tanstack/table-core', '@tanstack/store', '@tanstack/react-store'];
 
 module.exports = {
   rootDir: '.',
@@ -7,7 +7,11 @@ module.exports = {
   testEnvironment: '<rootDir>/jest/environment.cjs',
   testEnvironmentOptions: { customExportConditions: ['resistry-source', 'browser', 'require'] },
   setupFilesAfterEnv: ['<rootDir>/jest/setup.ts'],
-  moduleNameMapper: { '\\.css$': '<rootDir>/jest/style-sheet.cjs' },
+  moduleNameMapper: {
+    '\\.css$': '<rootDir>/jest/style-sheet.cjs',
+    // Their main entries are ES modules, which jest cannot require; each ships a plain script as well.
+    '^(d3-[a-z-]+|internmap)$': '<rootDir>/../node_modules/$1/dist/$1.js',
+  },
   transform: {
     '^.+\\.[jt]sx?$': [
       '@swc/jest',

@@ -6,16 +6,16 @@ module.exports = class BrowserEnvironment extends TestEnvironment {
     await super.setup();
     const browser = this.global;
     Object.assign(browser, {
-      TextEncoder,
-      TextDecoder,
-      structuredClone,
-      fetch,
-      Request,
-      Response,
-      Headers,
-      ReadableStream,
-      WritableStream,
-      TransformStream,
+      TextEncoder: globalThis.TextEncoder,
+      TextDecoder: globalThis.TextDecoder,
+      structuredClone: globalThis.structuredClone,
+      fetch: globalThis.fetch,
+      Request: globalThis.Request,
+      Response: globalThis.Response,
+      Headers: globalThis.Headers,
+      ReadableStream: globalThis.ReadableStream,
+      WritableStream: globalThis.WritableStream,
+      TransformStream: globalThis.TransformStream,
     });
     browser.matchMedia = (query) => ({
       matches: false,

@@ -2,14 +2,15 @@
 (function () {
   var chosen = null;
   try {
-    chosen = localStorage.getItem('resistry-theme');
+    chosen = globalThis.localStorage.getItem('resistry-theme');
   } catch {
     // Storage can be closed to us (private windows); the system's preference then decides.
   }
   var dark =
     chosen === 'dark' ||
-    (chosen !== 'light' && window.matchMedia('(prefers-color-scheme: dark)').matches);
+    (chosen !== 'light' && globalThis.matchMedia('(prefers-color-scheme: dark)').matches);
   var theme = dark ? 'dark' : 'light';
-  document.documentElement.classList.add(theme);
-  document.documentElement.style.colorScheme = theme;
+  var page = globalThis.document.documentElement;
+  page.classList.add(theme);
+  page.style.colorScheme = theme;
 })();

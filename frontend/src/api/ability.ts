@@ -1,4 +1,5 @@
-import { type MongoAbility, createMongoAbility } from '@casl/ability';
+import { type MongoAbility, type RawRuleOf, createMongoAbility } from '@casl/ability';
+import { unpackRules } from '@casl/ability/extra';
 import { useMemo } from 'react';
 import { type SignedInUser, useSession } from './session';
 
@@ -6,7 +7,7 @@ import { type SignedInUser, useSession } from './session';
 export function useAbility(): MongoAbility {
   const state = useSession();
   const rules = 'session' in state ? state.session.rules : undefined;
-  return useMemo(() => createMongoAbility(rules ?? []), [rules]);
+  return useMemo(() => createMongoAbility(unpackRules<RawRuleOf<MongoAbility>>(rules ?? [])), [rules]);
 }
 
 export function useUser(): SignedInUser | undefined {

@@ -1,11 +1,16 @@
-import axios, { AxiosError, type AxiosAdapter, type AxiosResponse, type InternalAxiosRequestConfig } from 'axios';
+import axios, {
+  AxiosError,
+  type AxiosAdapter,
+  type AxiosResponse,
+  type InternalAxiosRequestConfig,
+} from 'axios';
 import { client } from './client';
 import { Problem } from './problem';
 import { endSession, sessionState, startSession } from './session';
 
 const session = (accessToken: string) => ({
   accessToken,
-  user: { id: '1', name: 'I. Tamsin', email: 'designer@brackwater.example.com', roles: ['designer'] },
+  user: { id: 1, name: 'I. Tamsin', email: 'designer@brackwater.example.com', roles: ['designer'] },
   rules: [],
 });
 
@@ -52,7 +57,9 @@ describe('the client', () => {
   it('waits for the person to sign in again when the cookie has lapsed too, and loses nothing', async () => {
     startSession(session('old'));
     serve((request) =>
-      token(request) === 'Bearer again' ? { status: 200, data: request.data as unknown } : { status: 401, data: {} },
+      token(request) === 'Bearer again'
+        ? { status: 200, data: request.data as unknown }
+        : { status: 401, data: {} },
     );
     const pending = client.post('/parts/1/approval', { reason: 'entered with care' });
     await new Promise((resolve) => setTimeout(resolve));

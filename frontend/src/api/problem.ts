@@ -16,7 +16,8 @@ interface ProblemDocument {
   errors?: unknown;
 }
 
-const text = (value: unknown): string | undefined => (typeof value === 'string' && value !== '' ? value : undefined);
+const text = (value: unknown): string | undefined =>
+  typeof value === 'string' && value !== '' ? value : undefined;
 
 function fieldProblems(errors: unknown): FieldProblem[] {
   if (!Array.isArray(errors)) return [];

@@ -7,6 +7,9 @@ const retry = (failures: number, error: Error): boolean =>
 
 export function createQueryClient(): QueryClient {
   return new QueryClient({
-    defaultOptions: { queries: { retry, staleTime: 30_000, refetchOnWindowFocus: false }, mutations: { retry: false } },
+    defaultOptions: {
+      queries: { retry, staleTime: 30_000, refetchOnWindowFocus: false },
+      mutations: { retry: false },
+    },
   });
 }

@@ -1,8 +1,9 @@
 import { useSyncExternalStore } from 'react';
-import type { RawRuleOf, MongoAbility } from '@casl/ability';
+import type { MongoAbility, RawRuleOf } from '@casl/ability';
+import type { PackRule } from '@casl/ability/extra';
 
 export interface SignedInUser {
-  id: string;
+  id: number;
   name: string;
   email: string;
   roles: string[];
@@ -12,7 +13,8 @@ export interface SignedInUser {
 export interface Session {
   accessToken: string;
   user: SignedInUser;
-  rules: RawRuleOf<MongoAbility>[];
+  /** Packed by @casl/ability; see useAbility. */
+  rules: PackRule<RawRuleOf<MongoAbility>>[];
 }
 
 /**
@@ -40,7 +42,8 @@ function subscribe(listener: () => void): () => void {
 export const sessionState = (): SessionState => state;
 
 /** The token to send, or undefined where nobody is signed in. */
-export const accessToken = (): string | undefined => ('session' in state ? state.session.accessToken : undefined);
+export const accessToken = (): string | undefined =>
+  'session' in state ? state.session.accessToken : undefined;
 
 export function startSession(session: Session): void {
   change({ status: 'signed-in', session });

@@ -16,6 +16,8 @@ function relativeLuminance(colour: string): number {
  * @returns 1 (the same) to 21 (black on white)
  */
 export function contrastRatio(first: string, second: string): number {
-  const [darker = 0, lighter = 0] = [relativeLuminance(first), relativeLuminance(second)].sort((a, b) => a - b);
+  const [darker = 0, lighter = 0] = [relativeLuminance(first), relativeLuminance(second)].sort(
+    (a, b) => a - b,
+  );
   return (lighter + 0.05) / (darker + 0.05);
 }

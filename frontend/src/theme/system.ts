@@ -1,8 +1,6 @@
 import { createSystem, defaultBaseConfig, defineConfig } from '@chakra-ui/react';
 import { globalStyles } from './global-styles';
-import { buttonRecipe } from './recipes/button';
 import { dialogRecipe } from './recipes/dialog';
-import { inputRecipe, textareaRecipe } from './recipes/input';
 import { menuRecipe, popoverRecipe } from './recipes/menu';
 import { semanticTokens } from './semantic-tokens';
 import { tokens } from './tokens';
@@ -24,7 +22,6 @@ export const system = createSystem(
       },
       tokens,
       semanticTokens,
-      recipes: { button: buttonRecipe, input: inputRecipe, textarea: textareaRecipe },
       slotRecipes: { dialog: dialogRecipe, menu: menuRecipe, popover: popoverRecipe },
     },
   }),

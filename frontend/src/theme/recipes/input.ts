@@ -10,7 +10,12 @@ const field = {
   borderRadius: 'sm',
   fontSize: 'sm',
   _invalid: { borderColor: 'unmet' },
-  _focusVisible: { outline: '2px solid', outlineColor: 'accent.focusRing', outlineOffset: '-1px', borderColor: 'accent' },
+  _focusVisible: {
+    outline: '2px solid',
+    outlineColor: 'accent.focusRing',
+    outlineOffset: '-1px',
+    borderColor: 'accent',
+  },
   _disabled: { opacity: 0.6, cursor: 'not-allowed' },
 } as const;
 

@@ -1,0 +1,16 @@
+import { useMutation } from '@tanstack/react-query';
+import { client } from '../../../api/client';
+
+export interface NewPassword {
+  /** From the link in the mail. */
+  token: string;
+  password: string;
+}
+
+export async function resetPassword({ token, password }: NewPassword): Promise<void> {
+  await client.post('/auth/password-resets/complete', { token, password });
+}
+
+export function useResetPassword() {
+  return useMutation({ mutationFn: resetPassword });
+}

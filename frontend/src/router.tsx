@@ -1,0 +1,26 @@
+import { Navigate, type RouteObject, createBrowserRouter } from 'react-router-dom';
+import { ErrorPage } from './shell/error-page';
+import { NotFoundPage } from './shell/not-found-page';
+import { Shell } from './shell/shell';
+
+/** Every page is a file of its own that loads when it is first opened. */
+export const routes: RouteObject[] = [
+  {
+    errorElement: <ErrorPage />,
+    children: [
+      { path: '/sign-in', lazy: () => import('./features/auth/sign-in-page') },
+      { path: '/forgotten-password', lazy: () => import('./features/auth/forgotten-password-page') },
+      { path: '/reset-password', lazy: () => import('./features/auth/reset-password-page') },
+      { path: '/accept-invitation', lazy: () => import('./features/auth/accept-invitation-page') },
+      {
+        element: <Shell />,
+        children: [
+          { index: true, element: <Navigate to="/find" replace /> },
+          { path: '*', element: <NotFoundPage /> },
+        ],
+      },
+    ],
+  },
+];
+
+export const createRouter = () => createBrowserRouter(routes);
