@@ -1,6 +1,9 @@
 import type { Migration } from './migration';
 import { people } from './migrations/0001-people';
 import { auditAndOutbox } from './migrations/0002-audit-and-outbox';
+import { catalogue } from './migrations/0010-catalogue';
+import { parts } from './migrations/0011-parts';
+import { deratingPolicies } from './migrations/0012-derating-policies';
 
 /** Every migration, in order; a new one goes at the end. */
-export const migrations: readonly Migration[] = [people, auditAndOutbox];
+export const migrations: readonly Migration[] = [people, auditAndOutbox, catalogue, parts, deratingPolicies];
