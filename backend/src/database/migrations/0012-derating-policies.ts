@@ -1,6 +1,9 @@
 import type { Migration } from '../migration';
 
-/** Derating policies by version; a published version never changes, an agency's table is a read-only starting point. */
+/**
+ * Derating policies by version; a published version never changes, an agency's table is a read-only starting point that
+ * nobody entered: it comes with the program.
+ */
 export const deratingPolicies: Migration = {
   name: '0012-derating-policies',
   statements: [
@@ -17,7 +20,7 @@ export const deratingPolicies: Migration = {
       state TEXT NOT NULL DEFAULT 'draft' CHECK (state IN ('draft', 'published')),
       entries TEXT NOT NULL CHECK (json_type(entries) = 'array'),
       note TEXT NOT NULL,
-      entered_by INTEGER NOT NULL REFERENCES users (id),
+      entered_by INTEGER REFERENCES users (id),
       entered_at TEXT NOT NULL,
       published_by INTEGER REFERENCES users (id),
       published_at TEXT,
