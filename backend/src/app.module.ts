@@ -1,5 +1,6 @@
 import { type DynamicModule, Module } from '@nestjs/common';
 import { APP_FILTER, APP_PIPE } from '@nestjs/core';
+import { AccountModule } from './account/account.module';
 import { AuditModule } from './audit/audit.module';
 import { AuthModule } from './auth/auth.module';
 import { LoggingModule } from './common/logging/logging.module';
@@ -10,6 +11,7 @@ import { ConfigModule } from './config/config.module';
 import type { Environment } from './config/environment';
 import { DatabaseModule } from './database/database.module';
 import { HealthModule } from './health/health.module';
+import { MailModule } from './mail/mail.module';
 import { OutboxModule } from './outbox/outbox.module';
 import { PermissionsModule } from './permissions/permissions.module';
 import { UsersModule } from './users/users.module';
@@ -27,7 +29,9 @@ export class AppModule {
         PermissionsModule,
         AuditModule,
         OutboxModule,
+        MailModule,
         UsersModule,
+        AccountModule,
         HealthModule,
       ],
       providers: [

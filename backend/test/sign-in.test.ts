@@ -1,6 +1,5 @@
 import request from 'supertest';
 import { startApplication, type StartedApplication } from './support/application';
-import { bodyOf } from './support/body';
 import { PASSWORD } from './support/people-builder';
 
 interface SignedInBody {
@@ -22,7 +21,7 @@ describe('signing in', () => {
       .post('/api/auth/sign-in')
       .send({ email: person.email.toUpperCase(), password: PASSWORD })
       .expect(200);
-    const { accessToken, user, rules } = bodyOf<SignedInBody>(answer);
+    const { accessToken, user, rules } = answer.body as SignedInBody;
     expect(user).toEqual({ ...person, roles: ['librarian', 'designer'] });
     const me = await request(application.server)
       .get('/api/auth/me')

@@ -2,7 +2,10 @@ import { Module } from '@nestjs/common';
 import { APP_GUARD } from '@nestjs/core';
 import { JwtModule } from '@nestjs/jwt';
 import { PassportModule } from '@nestjs/passport';
+import { SequelizeModule } from '@nestjs/sequelize';
 import { Secrets } from '../config/secrets';
+import { MailModule } from '../mail/mail.module';
+import { UsersModule } from '../users/users.module';
 import { AccessTokenStrategy } from './access-token.strategy';
 import {
   ACCESS_TOKEN_SECONDS,
@@ -13,6 +16,11 @@ import {
 } from './access-tokens';
 import { AuthController } from './auth.controller';
 import { AuthenticationGuard } from './authentication.guard';
+import { PasswordResetModel } from './models/password-reset.model';
+import { PasswordResetRequestModel } from './models/password-reset-request.model';
+import { PasswordResetDelivery } from './password-reset-delivery';
+import { PasswordResets } from './password-resets';
+import { PasswordResetsController } from './password-resets.controller';
 import { People } from './people';
 import { SessionsModule } from './sessions.module';
 import { SignInService } from './sign-in.service';
@@ -20,7 +28,10 @@ import { SignInService } from './sign-in.service';
 @Module({
   imports: [
     SessionsModule,
+    UsersModule,
+    MailModule,
     PassportModule,
+    SequelizeModule.forFeature([PasswordResetModel, PasswordResetRequestModel]),
     JwtModule.registerAsync({
       inject: [Secrets],
       useFactory: (secrets: Secrets) => ({
@@ -34,12 +45,14 @@ import { SignInService } from './sign-in.service';
       }),
     }),
   ],
-  controllers: [AuthController],
+  controllers: [AuthController, PasswordResetsController],
   providers: [
     AccessTokens,
     AccessTokenStrategy,
     People,
     SignInService,
+    PasswordResets,
+    PasswordResetDelivery,
     { provide: APP_GUARD, useClass: AuthenticationGuard },
   ],
 })

@@ -2,7 +2,7 @@ import { Injectable } from '@nestjs/common';
 import { Clock } from '../common/clock';
 import { Readers } from '../database/readers';
 import { Person } from '../permissions/person';
-import { ROLES } from '../permissions/roles';
+import { readRoles } from '../permissions/read-roles';
 
 interface PersonRow {
   id: number;
@@ -30,8 +30,6 @@ export class People {
       { sessionId, now: this.clock.timestamp() },
     );
     if (!row) return undefined;
-    const held: unknown = JSON.parse(row.roles);
-    const roles = Array.isArray(held) ? ROLES.filter((role) => held.includes(role)) : [];
-    return new Person(row.id, row.name, row.email, roles, sessionId);
+    return new Person(row.id, row.name, row.email, readRoles(row.roles), sessionId);
   }
 }

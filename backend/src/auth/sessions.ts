@@ -1,6 +1,6 @@
 import { randomBytes, randomUUID } from 'node:crypto';
 import { Injectable } from '@nestjs/common';
-import type { Transaction } from 'sequelize';
+import { Op, type Transaction } from 'sequelize';
 import { Clock } from '../common/clock';
 import { RefreshTokenModel } from './models/refresh-token.model';
 import { type SessionEnd, SessionModel } from './models/session.model';
@@ -100,6 +100,19 @@ export class Sessions {
       { where: { ...which, endedAt: null }, transaction },
     );
     return ended;
+  }
+
+  /** Ends all sessions of a person but the one that he or she is using. */
+  async endOthers(
+    transaction: Transaction,
+    userId: number,
+    ownId: string,
+    reason: SessionEnd,
+  ): Promise<void> {
+    await SessionModel.update(
+      { endedAt: this.clock.timestamp(), endedReason: reason },
+      { where: { userId, id: { [Op.ne]: ownId }, endedAt: null }, transaction },
+    );
   }
 
   private async issue(transaction: Transaction, sessionId: string): Promise<string> {
