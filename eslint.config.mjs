@@ -78,6 +78,8 @@ export default tseslint.config(
     rules: {
       ...reactHooks.configs.recommended.rules,
       ...jsxA11y.flatConfigs.recommended.rules,
+      // Speaks of a compiler that this build does not use.
+      'react-hooks/incompatible-library': 'off',
       ...onlyDownwards([
         {
           group: ['**/backend/src/**', '@nestjs/*', 'sequelize*'],

@@ -33,6 +33,11 @@ module.exports = class BrowserEnvironment extends TestEnvironment {
       disconnect() {}
     };
     browser.PointerEvent ??= class PointerEvent extends browser.MouseEvent {};
+    // jsdom lays nothing out; a table that draws what is in sight needs something to be in sight.
+    Object.defineProperties(browser.HTMLElement.prototype, {
+      offsetHeight: { configurable: true, value: 600 },
+      offsetWidth: { configurable: true, value: 800 },
+    });
     browser.Element.prototype.scrollTo = () => undefined;
     browser.Element.prototype.scrollIntoView = () => undefined;
     browser.scrollTo = () => undefined;

@@ -22,7 +22,14 @@ export interface Frame {
 }
 
 /** Length of each lead that is drawn, as a share of the body's length. */
-const leadShare: Record<BodyStyle, number> = { chip: 0, melf: 0, strip: 0, housed: 0.16, cemented: 0.2, axial: 0.42 };
+const leadShare: Record<BodyStyle, number> = {
+  chip: 0,
+  melf: 0,
+  strip: 0,
+  housed: 0.16,
+  cemented: 0.2,
+  axial: 0.42,
+};
 
 /**
  * The largest frame of the body's own proportion that fits a box together with its leads.

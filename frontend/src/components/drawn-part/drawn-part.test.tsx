@@ -9,7 +9,13 @@ const chip: DrawnBody = {
   style: 'chip',
   length: 3.2e-3,
   width: 1.6e-3,
-  marking: bodyMarking({ resistance: 4700, tolerance: 0.01, style: 'chip', size: '1206/3216M', isLink: false }),
+  marking: bodyMarking({
+    resistance: 4700,
+    tolerance: 0.01,
+    style: 'chip',
+    size: '1206/3216M',
+    isLink: false,
+  }),
 };
 
 const axial: DrawnBody = {
@@ -39,7 +45,9 @@ describe('a drawn part', () => {
   it('bears the bands of IEC 60062 in order: 4.7 kΩ ±5 % is yellow, violet, red, gold', () => {
     const { container } = renderInTheme(<DrawnPart body={axial} labelled />);
     expect(screen.getByRole('img', { name: 'banded yellow, violet, red, gold' })).toBeInTheDocument();
-    const bands = [...container.querySelectorAll('rect')].sort((a, b) => Number(a.getAttribute('x')) - Number(b.getAttribute('x')));
+    const bands = [...container.querySelectorAll('rect')].sort(
+      (a, b) => Number(a.getAttribute('x')) - Number(b.getAttribute('x')),
+    );
     expect(bands.map((band) => band.getAttribute('fill'))).toEqual(
       (['yellow', 'violet', 'red', 'gold'] as const).map((colour) => colourSrgb[colour]),
     );

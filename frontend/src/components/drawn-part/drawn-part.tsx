@@ -4,7 +4,11 @@ import { type BodyStyle, type DrawnBody, type Frame, bodyFrame, markingWords } f
 import { CementedBody, ChipBody, HousedBody, StripBody } from './flat-bodies';
 import { AxialBody, MelfBody } from './round-bodies';
 
-const boxes = { row: { width: 62, height: 26 }, sheet: { width: 84, height: 42 }, page: { width: 168, height: 72 } };
+const boxes = {
+  row: { width: 62, height: 26 },
+  sheet: { width: 84, height: 42 },
+  page: { width: 168, height: 72 },
+};
 
 const bodies: Record<BodyStyle, (props: { frame: Frame; marking: BodyMarking }) => React.ReactNode> = {
   chip: ChipBody,
@@ -27,9 +31,16 @@ export interface DrawnPartProps {
 export function DrawnPart({ body, size = 'row', labelled = false }: DrawnPartProps) {
   const box = boxes[size];
   const Body = bodies[body.style];
-  const label = labelled ? { role: 'img', 'aria-label': markingWords(body.marking) } : { 'aria-hidden': true };
+  const label = labelled
+    ? { role: 'img', 'aria-label': markingWords(body.marking) }
+    : { 'aria-hidden': true };
   return (
-    <chakra.svg viewBox={`0 0 ${box.width} ${box.height}`} width={`${box.width}px`} height={`${box.height}px`} {...label}>
+    <chakra.svg
+      viewBox={`0 0 ${box.width} ${box.height}`}
+      width={`${box.width}px`}
+      height={`${box.height}px`}
+      {...label}
+    >
       <Body frame={bodyFrame(body, box)} marking={body.marking} />
     </chakra.svg>
   );

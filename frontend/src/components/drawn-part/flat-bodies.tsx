@@ -14,7 +14,9 @@ const inset = (frame: Frame, share: number): Frame => ({
 });
 
 function Printed({ marking, frame, colour }: BodyProps & { colour: string }) {
-  return marking.kind === 'characters' ? <Characters text={marking.text} frame={frame} colour={colour} /> : null;
+  return marking.kind === 'characters' ? (
+    <Characters text={marking.text} frame={frame} colour={colour} />
+  ) : null;
 }
 
 /** A rectangular chip: dark protective glaze between tinned end caps. */
