@@ -1,8 +1,10 @@
 import { type DynamicModule, Module } from '@nestjs/common';
 import { APP_FILTER, APP_PIPE } from '@nestjs/core';
+import { ScheduleModule } from '@nestjs/schedule';
 import { AccountModule } from './account/account.module';
 import { AuditModule } from './audit/audit.module';
 import { AuthModule } from './auth/auth.module';
+import { BackupsModule } from './backups/backups.module';
 import { LoggingModule } from './common/logging/logging.module';
 import { ProblemFilter } from './common/problems/problem.filter';
 import { StrictValidationPipe } from './common/validation/strict-validation.pipe';
@@ -25,6 +27,7 @@ export class AppModule {
         ConfigModule.with(environment, options),
         LoggingModule.at(options.logLevel),
         DatabaseModule,
+        ScheduleModule.forRoot(),
         AuthModule,
         PermissionsModule,
         AuditModule,
@@ -32,6 +35,7 @@ export class AppModule {
         MailModule,
         UsersModule,
         AccountModule,
+        BackupsModule,
         HealthModule,
       ],
       providers: [

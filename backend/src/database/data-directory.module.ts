@@ -1,5 +1,6 @@
 import { Module } from '@nestjs/common';
 import { Environment } from '../config/environment';
+import { refuseInterruptedRestore } from './interrupted-restore';
 import { DataDirectoryLock } from './data-directory-lock';
 
 /** Takes the data directory for this process before anything in it is opened. */
@@ -8,7 +9,11 @@ import { DataDirectoryLock } from './data-directory-lock';
     {
       provide: DataDirectoryLock,
       inject: [Environment],
-      useFactory: (environment: Environment) => DataDirectoryLock.take(environment.dataDirectory),
+      useFactory: async (environment: Environment) => {
+        const lock = await DataDirectoryLock.take(environment.dataDirectory);
+        refuseInterruptedRestore(environment);
+        return lock;
+      },
     },
   ],
   exports: [DataDirectoryLock],
