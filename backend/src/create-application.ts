@@ -4,6 +4,7 @@ import cookieParser from 'cookie-parser';
 import { Logger } from 'nestjs-pino';
 import { AppModule } from './app.module';
 import { apiHeaders } from './common/http/api-headers';
+import { giveRequestId } from './common/http/request-id';
 import { securityHeaders } from './common/http/security-headers';
 import { servePages } from './common/http/serve-pages';
 import { ApplicationOptions } from './config/application-options';
@@ -32,6 +33,7 @@ export async function createApplication(
   // Only where a proxy speaks TLS for us is there one whose word on the client's address counts.
   application.set('trust proxy', environment.servedOverTls ? 1 : false);
   application.setGlobalPrefix('api');
+  application.use(giveRequestId);
   application.use(securityHeaders(options.pagesDirectory, environment.servedOverTls));
   application.use('/api', apiHeaders);
   servePages(application, options.pagesDirectory);

@@ -9,6 +9,8 @@ process.env['UV_THREADPOOL_SIZE'] ??= '16';
 const DRAIN_SECONDS = 15;
 
 async function main(): Promise<void> {
+  // What this process writes is for its owner only.
+  process.umask(0o077);
   const environment = readEnvironment(process.env, process.env['INIT_CWD'] ?? process.cwd());
   const application = await createApplication(environment);
   const stop = (): void => {

@@ -4,6 +4,8 @@ import { restoreBackup, RestoreRefused } from './restore-backup';
 
 /** `npm run restore -w backend -- <name>`, with the server stopped. */
 async function main(): Promise<void> {
+  // What this process writes is for its owner only.
+  process.umask(0o077);
   const [name] = process.argv.slice(2);
   if (name === undefined) throw new RestoreRefused('Say which backup: npm run restore -w backend -- <name>');
   const environment = readEnvironment(process.env, process.env['INIT_CWD'] ?? process.cwd());

@@ -48,7 +48,24 @@ export class Writer {
   }
 
   /**
-   * Executes one INSERT, UPDATE or DELETE. Values by `$name` only. (What RETURNING gives comes by `select`.)
+   * Executes one INSERT of one row. Values by `$name` only.
+   *
+   * @returns the id (rowid) of the new row
+   */
+  async insert(transaction: Transaction, sql: string, bind: BindValues = {}): Promise<number> {
+    checkBindValues(bind);
+    const [id] = await this.sequelize.query(sql, {
+      type: QueryTypes.INSERT,
+      raw: true,
+      transaction,
+      bind: { ...bind },
+    });
+    return id;
+  }
+
+  /**
+   * Executes one INSERT, UPDATE or DELETE. Values by `$name` only. (What `UPDATE … RETURNING` gives comes by
+   * `select`.)
    *
    * @returns how many rows it changed
    */

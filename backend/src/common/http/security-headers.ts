@@ -11,6 +11,7 @@ export function securityHeaders(pagesDirectory: string, overTls: boolean): Reque
     },
     // Over plain HTTP the header is ignored; behind TLS the name is ours for a year.
     strictTransportSecurity: overTls ? { maxAge: 365 * 24 * 3600 } : false,
+    frameguard: { action: 'deny' },
     crossOriginResourcePolicy: { policy: 'same-origin' },
     referrerPolicy: { policy: 'same-origin' },
   });

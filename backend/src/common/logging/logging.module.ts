@@ -2,7 +2,7 @@ import { type DynamicModule, Module } from '@nestjs/common';
 import type { Request } from 'express';
 import { LoggerModule } from 'nestjs-pino';
 import type { LevelWithSilent } from 'pino';
-import { giveRequestId } from '../http/request-id';
+import { requestIdOf } from '../http/request-id';
 
 const SECRET_PATHS = [
   'req.headers.authorization',
@@ -25,7 +25,7 @@ export class LoggingModule {
         LoggerModule.forRoot({
           pinoHttp: {
             level,
-            genReqId: giveRequestId,
+            genReqId: requestIdOf,
             redact: { paths: SECRET_PATHS, censor: '[redacted]' },
             autoLogging: { ignore: (request) => !(request.url ?? '').startsWith('/api/') },
             customLogLevel: (_request, response, error) =>
