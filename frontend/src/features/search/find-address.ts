@@ -1,0 +1,72 @@
+import type { Sort } from '../../components/data-table/data-column';
+import { readDutyAddress, writeDuty } from './duty/duty-address';
+import type { DutyText } from './duty/duty-text';
+import type { Show } from './requests/search-request';
+
+/** Filters as they stand in an address: lists by commas, limits as typed. */
+export const filterNames = ['manufacturer', 'family', 'technology', 'size', 'series', 'certificate'] as const;
+export type FilterName = (typeof filterNames)[number];
+
+/** Everything Find shows, as its address holds it. */
+export interface FindState {
+  duty: DutyText;
+  /** Part number, family or manufacturer. */
+  text: string;
+  filters: Record<FilterName, string[]>;
+  /** As typed: 1 %, 50 ppm/K. */
+  tolerance: string;
+  tcr: string;
+  show: Show;
+  grouped: boolean;
+  sort?: Sort;
+  /** The part whose side sheet is open. */
+  part?: number;
+}
+
+const split = (text: string | null): string[] => (text === null || text === '' ? [] : text.split(','));
+
+function readSort(text: string | null): Sort | undefined {
+  if (text === null || text === '') return undefined;
+  return text.startsWith('-')
+    ? { column: text.slice(1), descending: true }
+    : { column: text, descending: false };
+}
+
+export function readFind(address: URLSearchParams): FindState {
+  const part = Number(address.get('part'));
+  return {
+    duty: readDutyAddress(address),
+    text: address.get('text') ?? '',
+    filters: {
+      manufacturer: split(address.get('manufacturer')),
+      family: split(address.get('family')),
+      technology: split(address.get('technology')),
+      size: split(address.get('size')),
+      series: split(address.get('series')),
+      certificate: split(address.get('certificate')),
+    },
+    tolerance: address.get('tolerance') ?? '',
+    tcr: address.get('tcr') ?? '',
+    show: address.get('show') === 'met-and-unrated' ? 'met-and-unrated' : 'met',
+    grouped: address.get('group') === 'company',
+    sort: readSort(address.get('sort')),
+    part: Number.isInteger(part) && part > 0 ? part : undefined,
+  };
+}
+
+export function writeFind(state: FindState): URLSearchParams {
+  const address = new URLSearchParams();
+  writeDuty(state.duty, address);
+  if (state.text !== '') address.set('text', state.text);
+  for (const name of filterNames) {
+    if (state.filters[name].length > 0) address.set(name, state.filters[name].join(','));
+  }
+  if (state.tolerance.trim() !== '') address.set('tolerance', state.tolerance.trim());
+  if (state.tcr.trim() !== '') address.set('tcr', state.tcr.trim());
+  if (state.show !== 'met') address.set('show', state.show);
+  if (state.grouped) address.set('group', 'company');
+  if (state.sort !== undefined)
+    address.set('sort', `${state.sort.descending ? '-' : ''}${state.sort.column}`);
+  if (state.part !== undefined) address.set('part', String(state.part));
+  return address;
+}

@@ -1,0 +1,3 @@
+import type { DutyText } from '../duty/duty-text';
+
+export type ChangeDuty = (change: (duty: DutyText) => DutyText) => void;

@@ -1,0 +1,129 @@
+import { chakra } from '@chakra-ui/react';
+import { deviationRules } from '@resistry/engineering/duty/duty';
+import { formatQuantity } from '@resistry/engineering/notation/format-quantity';
+import { SelectField } from '../../../components/select-field';
+import type { PolicySummary } from '../../policies/requests/list-policies';
+import type { EntryName } from '../duty/duty-entry';
+import { DutyEntryField } from './duty-entry-field';
+import {
+  BodyGroup,
+  type DutyGroupProps,
+  FeaturesGroup,
+  NoiseAndFrequencyGroup,
+  PulsesGroup,
+  SafetyGroup,
+  StandingGroup,
+} from './folded-groups';
+import { FoldedGroup, OpenGroup } from './panel-group';
+import { panelPlaces } from './panel-places';
+
+export interface DutyPanelProps extends DutyGroupProps {
+  policies: readonly PolicySummary[];
+}
+
+const deviationOptions = deviationRules.map((value) => ({
+  value,
+  words: value === 'worst-case' ? 'worst case' : 'root sum of squares',
+}));
+
+/** Versions by name, the published one first and chosen where nothing is. */
+function policyOptions(policies: readonly PolicySummary[]): { value: string; words: string }[] {
+  const published = policies.find((policy) => policy.published);
+  const words = (policy: PolicySummary): string => `${policy.name} ${policy.version}`;
+  return [
+    { value: '', words: published === undefined ? 'the company’s' : words(published) },
+    ...policies
+      .filter((policy) => policy !== published)
+      .map((policy) => ({ value: policy.id, words: words(policy) })),
+    { value: 'none', words: 'none, as rated' },
+  ];
+}
+
+/** The dissipation that a voltage leaves at the lowest resistance, as a hint in the empty power field. */
+function impliedPower({ read }: DutyGroupProps): string | undefined {
+  const volt = read.duty?.load?.voltage;
+  const ohm = read.duty?.window?.lower;
+  if (volt === undefined || ohm === undefined || ohm === 0) return undefined;
+  const highest = Math.max(Math.abs(volt.min), Math.abs(volt.max));
+  return formatQuantity(highest ** 2 / ohm, 'power', { significantDigits: 3 });
+}
+
+/** What a position demands, grouped as an engineer thinks: a few fields first, the rest folded. */
+export function DutyPanel(props: DutyPanelProps) {
+  const { duty, read, onChange, policies } = props;
+  const field = (name: EntryName, placeholder?: string) => (
+    <DutyEntryField
+      name={name}
+      duty={duty}
+      errors={read.errors}
+      onChange={onChange}
+      placeholder={placeholder}
+    />
+  );
+  return (
+    <chakra.form aria-label="Duty" onSubmit={(event) => event.preventDefault()}>
+      <OpenGroup title="Value over life" note="Ω">
+        {field('lower')}
+        {field('nominal')}
+        {field('upper')}
+      </OpenGroup>
+      <OpenGroup title="Load" note="steady, r.m.s.">
+        {field('voltage')}
+        {field('current')}
+        {field('power', impliedPower(props))}
+      </OpenGroup>
+      <OpenGroup title="Surroundings">
+        {field('ambient')}
+        <SelectField
+          id={panelPlaces.policy}
+          label="Policy"
+          value={duty.policy ?? ''}
+          options={policyOptions(policies)}
+          onValue={(value) => onChange((before) => ({ ...before, policy: value === '' ? undefined : value }))}
+        />
+      </OpenGroup>
+      <OpenGroup title="Life and accuracy">
+        {field('life')}
+        <SelectField
+          id={panelPlaces.deviation}
+          label="Deviations add as"
+          value={duty.deviation}
+          options={deviationOptions}
+          onValue={(value) =>
+            onChange((before) => ({
+              ...before,
+              deviation: deviationRules.find((rule) => rule === value) ?? 'worst-case',
+            }))
+          }
+        />
+      </OpenGroup>
+      <PulsesGroup {...props} />
+      <FoldedGroup
+        title="Value from voltage and current"
+        summary={duty.entries.limitVoltage || duty.entries.limitCurrent ? 'in use' : 'no'}
+        wrong={read.errors.limitVoltage !== undefined || read.errors.limitCurrent !== undefined}
+      >
+        {field('limitVoltage')}
+        {field('limitCurrent')}
+      </FoldedGroup>
+      <FoldedGroup
+        title="Enclosure, terminals, altitude"
+        summary={
+          (['rise', 'terminal', 'case', 'altitude'] as const).some((name) => duty.entries[name])
+            ? 'stated'
+            : 'none'
+        }
+      >
+        {field('rise')}
+        {field('terminal')}
+        {field('case')}
+        {field('altitude')}
+      </FoldedGroup>
+      <NoiseAndFrequencyGroup {...props} />
+      <BodyGroup {...props} />
+      <FeaturesGroup {...props} />
+      <SafetyGroup {...props} />
+      <StandingGroup {...props} />
+    </chakra.form>
+  );
+}

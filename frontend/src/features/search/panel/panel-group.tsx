@@ -1,0 +1,67 @@
+import { chakra } from '@chakra-ui/react';
+import type { ReactNode } from 'react';
+
+const Heading = chakra('h2', { base: { fontSize: '2xs', fontWeight: 'semibold', color: 'fg.muted' } });
+
+/** A group of the duty that is always open: what most positions need. */
+export function OpenGroup({ title, note, children }: { title: string; note?: string; children: ReactNode }) {
+  return (
+    <chakra.section display="grid" gap={1.5} mb={6} aria-label={title}>
+      <chakra.div display="flex" justifyContent="space-between" alignItems="baseline" mb={0.5}>
+        <Heading>{title}</Heading>
+        {note !== undefined && (
+          <chakra.span fontSize="2xs" color="fg.muted">
+            {note}
+          </chakra.span>
+        )}
+      </chakra.div>
+      {children}
+    </chakra.section>
+  );
+}
+
+const Folded = chakra('details', {
+  base: {
+    borderTop: '1px solid',
+    borderColor: 'border',
+    '& > summary': {
+      display: 'flex',
+      justifyContent: 'space-between',
+      alignItems: 'baseline',
+      gap: 3,
+      py: 1.5,
+      minHeight: 8,
+      cursor: 'pointer',
+      fontSize: 'sm',
+      listStyle: 'none',
+    },
+    '& > summary::-webkit-details-marker': { display: 'none' },
+    '& > summary:hover': { color: 'accent' },
+    '&[open] > summary > span': { visibility: 'hidden' },
+    '& > div': { display: 'grid', gap: 1.5, pb: 4 },
+  },
+});
+
+export interface FoldedGroupProps {
+  title: string;
+  /** What it holds while it is folded. */
+  summary: string;
+  /** Something in it cannot be read: it opens by itself. */
+  wrong?: boolean;
+  children: ReactNode;
+}
+
+/** A group of the duty that is rarely needed: folded to its title and what it holds. */
+export function FoldedGroup({ title, summary, wrong = false, children }: FoldedGroupProps) {
+  return (
+    <Folded open={wrong || undefined}>
+      <summary>
+        <chakra.b fontWeight="semibold">{title}</chakra.b>
+        <chakra.span color="fg.muted" textAlign="end">
+          {summary}
+        </chakra.span>
+      </summary>
+      <div>{children}</div>
+    </Folded>
+  );
+}

@@ -1,0 +1,38 @@
+import type { Duty } from '@resistry/engineering/duty/duty';
+import { parseQuantity } from '@resistry/engineering/notation/parse-quantity';
+import type { FindState } from './find-address';
+import { type Filters, type SearchRequest, sortOf } from './requests/search-request';
+
+const some = (values: string[]): string[] | undefined => (values.length > 0 ? values : undefined);
+
+/** The filters as the server takes them, or undefined while a limit cannot be read. */
+export function filtersOf(state: FindState): Filters | undefined {
+  const tolerance = state.tolerance.trim() === '' ? undefined : parseQuantity(state.tolerance, 'tolerance');
+  const tcr = state.tcr.trim() === '' ? undefined : parseQuantity(state.tcr, 'temperature-coefficient');
+  if (tolerance?.ok === false || tcr?.ok === false) return undefined;
+  return {
+    text: state.text === '' ? undefined : state.text,
+    manufacturers: some(state.filters.manufacturer),
+    families: some(state.filters.family),
+    technologies: some(state.filters.technology),
+    sizes: some(state.filters.size),
+    series: some(state.filters.series),
+    certificates: some(state.filters.certificate),
+    tolerance: tolerance?.value,
+    tcr: tcr?.value,
+  };
+}
+
+/** The question that Find asks; undefined while something typed cannot be read. */
+export function requestOf(state: FindState, duty: Duty | undefined): SearchRequest | undefined {
+  const filters = filtersOf(state);
+  if (duty === undefined || filters === undefined) return undefined;
+  return {
+    duty,
+    policy: state.duty.policy,
+    filters,
+    show: state.show,
+    group: state.grouped ? 'company' : undefined,
+    sort: sortOf(state.sort),
+  };
+}

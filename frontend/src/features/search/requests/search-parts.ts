@@ -1,0 +1,63 @@
+import type { Assessment } from '@resistry/engineering/assessment/assess';
+import type { CheckName } from '@resistry/engineering/checks/check';
+import { keepPreviousData, queryOptions } from '@tanstack/react-query';
+import { client } from '../../../api/client';
+import type { SearchPart } from '../search-part';
+import type { SearchRequest } from './search-request';
+
+export interface SearchItem {
+  part: SearchPart;
+  assessment: Assessment;
+  /** With `group: 'company'`: the approved sources under the number, each with its own assessment. */
+  sources?: { part: SearchPart; assessment: Assessment }[];
+}
+
+export interface Knockout {
+  check: CheckName;
+  removes: number;
+  removesAlone: number;
+}
+
+/** The smallest change of one demand that brings parts back, and how many. */
+export interface Relaxation {
+  /** JSON pointer into the duty. */
+  field: string;
+  to: unknown;
+  gains: number;
+}
+
+export interface SearchAnswer {
+  total: number;
+  unrated: number;
+  items: SearchItem[];
+  knockouts: Knockout[];
+  relaxations: Relaxation[];
+}
+
+export const pageSize = 50;
+
+export async function searchParts(
+  request: SearchRequest,
+  page: number,
+  signal?: AbortSignal,
+): Promise<SearchAnswer> {
+  const { data } = await client.post<SearchAnswer>(
+    '/parts/search',
+    { ...request, page, pageSize },
+    { signal },
+  );
+  return data;
+}
+
+/** One page of an answer. Pages count from 1. */
+export const searchPage = (request: SearchRequest | undefined, page: number) =>
+  queryOptions({
+    queryKey: ['parts', 'search', request, page],
+    queryFn: ({ signal }) => {
+      if (request === undefined) throw new Error('A search that is not enabled was run.');
+      return searchParts(request, page, signal);
+    },
+    enabled: request !== undefined,
+    placeholderData: keepPreviousData,
+    staleTime: 20_000,
+  });
