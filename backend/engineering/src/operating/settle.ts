@@ -25,7 +25,7 @@ export interface OperatingState {
   settled: boolean;
 }
 
-const largestStepCount = 200;
+const largestStepCount = 10_000;
 const closeEnough = 1e-13;
 
 /**

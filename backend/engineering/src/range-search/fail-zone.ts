@@ -1,0 +1,154 @@
+import type { SteadyLoad } from '../duty/steady-load';
+import type { Conditions } from '../operating/conditions';
+import { deviationAt, settle } from '../operating/settle';
+
+/**
+ * Resistances (Ω, nominal) at which one check fails: certainly inside the inner open interval, possibly inside the outer
+ * one, certainly not outside it. What lies between inner and outer is to be assessed part by part.
+ */
+export interface FailZone {
+  certainFrom: number;
+  certainTo: number;
+  possibleFrom: number;
+  possibleTo: number;
+}
+
+/** Keeps rounding on the safe side of both intervals; a thousand times the slack of a comparison. */
+const guard = 1e-6;
+
+/** Deviation (fraction) from which a part counts as running away. */
+const runaway = 1e5;
+
+export const nowhere: FailZone = {
+  certainFrom: Infinity,
+  certainTo: 0,
+  possibleFrom: Infinity,
+  possibleTo: 0,
+};
+export const everywhere: FailZone = {
+  certainFrom: 0,
+  certainTo: Infinity,
+  possibleFrom: 0,
+  possibleTo: Infinity,
+};
+/** Nothing is known beforehand: every part is to be assessed. */
+export const undecided: FailZone = {
+  certainFrom: Infinity,
+  certainTo: 0,
+  possibleFrom: 0,
+  possibleTo: Infinity,
+};
+
+/**
+ * Where the dissipation passes an allowance (W). Settling is monotone, so a part whose dissipation at the deviation that
+ * the allowance itself would heat it to stays inside the allowance has its operating point inside it; and a part that
+ * passes the allowance before it is heated at all passes it once heated.
+ * @param least allowance with all rounding against the part, W
+ * @param most allowance with all rounding for the part, W
+ */
+export function dissipationZone(conditions: Conditions, least: number, most: number): FailZone {
+  const load = conditions.load;
+  if (load === undefined) return nowhere;
+  const idle = load.voltageMax === 0 || load.currentMax === 0 || load.powerMax === 0;
+  const axis = conditions.axis.known ? conditions.axis.celsius : NaN;
+  const unheated = deviationAt(conditions, axis, 0);
+  let certain = most > 0 ? dissipationAbove(load, most, unheated) : { from: 0, to: Infinity };
+  if (idle) certain = { from: Infinity, to: 0 };
+  const possible = least > 0 ? possiblyAbove(conditions, load, least) : { from: 0, to: Infinity };
+  return {
+    certainFrom: certain.from,
+    certainTo: certain.to,
+    possibleFrom: possible.from,
+    possibleTo: possible.to,
+  };
+}
+
+/** Zone of an allowance in W that carries only the rounding of its own arithmetic. */
+export function ratedZone(conditions: Conditions, allowance: number): FailZone {
+  return dissipationZone(conditions, allowance * (1 - guard), allowance * (1 + guard));
+}
+
+/** Zone of an allowed element temperature, °C: the dissipation that heats the element to it. */
+export function temperatureZone(conditions: Conditions, celsius: number): FailZone {
+  const { axis, thermal } = conditions;
+  if (!axis.known || thermal === undefined) return undecided;
+  const rise = celsius - axis.celsius;
+  const rounding = guard * (1 + Math.abs(celsius));
+  if (thermal.value === 0) return rise >= 0 ? withoutSettling(conditions) : everywhere;
+  return dissipationZone(conditions, (rise - rounding) / thermal.value, (rise + rounding) / thermal.value);
+}
+
+/** Rises of the element, K, tried in turn as a bound inside which self-heating certainly settles. */
+const boundingRises = [1000, 300, 100, 30];
+
+/** Where a part possibly has no operating point; nothing else can fail a check that has no allowance to hold it to. */
+export function withoutSettling(conditions: Conditions): FailZone {
+  const { load, thermal, axis } = conditions;
+  if (load === undefined) return nowhere;
+  const heats = axis.known && (thermal?.value ?? 0) > 0;
+  if (!heats) {
+    const settlesAnyway =
+      conditions.voltageCoefficient === 0 &&
+      deviationAt(conditions, axis.known ? axis.celsius : NaN, 0) < 0.9;
+    return settlesAnyway ? nowhere : undecided;
+  }
+  for (const rise of boundingRises) {
+    const watt = rise / (thermal?.value ?? 1);
+    const possible = possiblyAbove(conditions, load, watt);
+    if (possible.from > 0 || possible.to < Infinity) {
+      return { ...nowhere, possibleFrom: possible.from, possibleTo: possible.to };
+    }
+  }
+  return undecided;
+}
+
+function possiblyAbove(conditions: Conditions, load: SteadyLoad, watt: number): { from: number; to: number } {
+  if (conditions.voltageCoefficient > 0 && load.voltageMax === Infinity) return { from: 0, to: Infinity };
+  const axis = conditions.axis.known ? conditions.axis.celsius : NaN;
+  const voltage = load.voltageMax === Infinity ? 0 : load.voltageMax;
+  const most = Math.min(watt, load.powerMax, load.voltageMax * load.currentMax);
+  const heated = deviationAt(conditions, axis + (conditions.thermal?.value ?? 0) * most, voltage);
+  // A deviation without end even inside the bound: whether such a part settles at all is to be seen one by one.
+  return heated < runaway ? dissipationAbove(load, watt, heated) : { from: 0, to: Infinity };
+}
+
+/**
+ * Open interval of nominal resistance in which the worst of min(U²/R, I²R, P) over R·(1 ± deviation) is above a
+ * threshold (W): it rises with R by the current and falls by the voltage, so the set is one interval.
+ */
+function dissipationAbove(
+  load: SteadyLoad,
+  threshold: number,
+  deviation: number,
+): { from: number; to: number } {
+  if (load.powerMax <= threshold || load.voltageMax * load.currentMax <= threshold)
+    return { from: Infinity, to: 0 };
+  return {
+    from: load.currentMax === Infinity ? 0 : threshold / (load.currentMax ** 2 * (1 + deviation)),
+    to:
+      load.voltageMax === Infinity || deviation >= 1
+        ? Infinity
+        : load.voltageMax ** 2 / (threshold * (1 - deviation)),
+  };
+}
+
+/** Where the steady voltage passes an allowance (V); it never falls as the resistance grows, so from one edge upwards. */
+export function voltageZone(conditions: Conditions, allowance: number): FailZone {
+  const load = conditions.load;
+  if (load === undefined || load.voltageMax <= allowance * (1 - guard)) return nowhere;
+  if (load.voltageMax <= allowance * (1 + guard)) return undecided;
+  const byCurrent = load.currentMax === Infinity ? 0 : allowance / load.currentMax;
+  const byPower = load.powerMax === Infinity ? 0 : allowance ** 2 / load.powerMax;
+  const worst = Math.max(byCurrent, byPower);
+  if (worst === 0) return everywhere;
+  const axis = conditions.axis.known ? conditions.axis.celsius : NaN;
+  const edge = (worst * (1 + guard)) / (1 + deviationAt(conditions, axis, 0));
+  const bound = settle(conditions, edge / 2, edge);
+  const deviation = bound.settled && bound.deviation < 0.9 ? bound.deviation : Infinity;
+  return {
+    certainFrom: edge,
+    certainTo: Infinity,
+    possibleFrom: (worst * (1 - guard)) / (1 + deviation),
+    possibleTo: Infinity,
+  };
+}
