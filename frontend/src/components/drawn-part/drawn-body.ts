@@ -1,7 +1,7 @@
 import type { BodyMarking } from '@resistry/engineering/marking/body-marking';
 
 /** Bodies that look different; everything in the catalogue is one of them. */
-export type BodyStyle = 'chip' | 'melf' | 'axial' | 'cemented' | 'housed' | 'strip';
+export type BodyStyle = 'chip' | 'melf' | 'axial' | 'cemented' | 'housed' | 'strip' | 'radial';
 
 /** What is needed to draw a part: its body seen from above, and what it bears. */
 export interface DrawnBody {
@@ -26,6 +26,7 @@ const leadShare: Record<BodyStyle, number> = {
   chip: 0,
   melf: 0,
   strip: 0,
+  radial: 0,
   housed: 0.16,
   cemented: 0.2,
   axial: 0.42,

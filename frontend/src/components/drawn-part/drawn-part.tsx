@@ -1,7 +1,7 @@
 import { chakra } from '@chakra-ui/react';
 import type { BodyMarking } from '@resistry/engineering/marking/body-marking';
 import { type BodyStyle, type DrawnBody, type Frame, bodyFrame, markingWords } from './drawn-body';
-import { CementedBody, ChipBody, HousedBody, StripBody } from './flat-bodies';
+import { CementedBody, ChipBody, HousedBody, RadialBody, StripBody } from './flat-bodies';
 import { AxialBody, MelfBody } from './round-bodies';
 
 const boxes = {
@@ -17,6 +17,7 @@ const bodies: Record<BodyStyle, (props: { frame: Frame; marking: BodyMarking }) 
   cemented: CementedBody,
   housed: HousedBody,
   strip: StripBody,
+  radial: RadialBody,
 };
 
 export interface DrawnPartProps {

@@ -90,3 +90,22 @@ export function HousedBody({ frame, marking }: BodyProps) {
     </>
   );
 }
+
+/** An upright part whose two leads leave on one side. */
+export function RadialBody({ frame, marking }: BodyProps) {
+  const body = { ...frame, height: frame.height * 0.78 };
+  return (
+    <>
+      {[0.25, 0.75].map((share) => (
+        <path
+          key={share}
+          d={`M${frame.x + frame.width * share} ${body.y + body.height}V${frame.y + frame.height}`}
+          stroke="#8f9498"
+          strokeWidth={Math.max(1.2, frame.width * 0.05)}
+        />
+      ))}
+      <rect {...body} rx={body.height * 0.08} fill="#5b6f86" />
+      <Printed frame={inset(body, 0.08)} marking={marking} colour="#f4f1e8" />
+    </>
+  );
+}

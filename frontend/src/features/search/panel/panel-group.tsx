@@ -1,5 +1,5 @@
 import { chakra } from '@chakra-ui/react';
-import type { ReactNode } from 'react';
+import { type ReactNode, useEffect, useRef } from 'react';
 
 const Heading = chakra('h2', { base: { fontSize: '2xs', fontWeight: 'semibold', color: 'fg.muted' } });
 
@@ -53,8 +53,13 @@ export interface FoldedGroupProps {
 
 /** A group of the duty that is rarely needed: folded to its title and what it holds. */
 export function FoldedGroup({ title, summary, wrong = false, children }: FoldedGroupProps) {
+  const groupRef = useRef<HTMLDetailsElement>(null);
+  // Opened from outside React's view of it, so that mending the entry does not fold the group under one's hands.
+  useEffect(() => {
+    if (wrong && groupRef.current !== null) groupRef.current.open = true;
+  }, [wrong]);
   return (
-    <Folded open={wrong || undefined}>
+    <Folded ref={groupRef}>
       <summary>
         <chakra.b fontWeight="semibold">{title}</chakra.b>
         <chakra.span color="fg.muted" textAlign="end">

@@ -1,0 +1,78 @@
+import { chakra } from '@chakra-ui/react';
+import type { Basis, BasisInput } from '@resistry/engineering/checks/basis';
+import type { ReactNode } from 'react';
+import { unitWords } from './basis-units';
+
+/** Where a field of the ratings stands: the datasheet and its page, as a link. */
+export type Cite = (field: string) => ReactNode;
+
+const fromWords: Record<BasisInput['from'], string> = {
+  duty: 'the duty',
+  ratings: 'the ratings',
+  policy: 'the policy',
+  derived: 'computed',
+  catalogue: 'the catalogue',
+};
+
+const Inputs = chakra('dl', {
+  base: {
+    display: 'grid',
+    gridTemplateColumns: 'minmax(0, 1fr) auto auto',
+    columnGap: 3,
+    rowGap: 0.5,
+    mt: 1.5,
+    '& dt': { color: 'fg.muted' },
+    '& dd': { m: 0, textAlign: 'end', whiteSpace: 'nowrap' },
+    '& dd + dd': { textAlign: 'start', color: 'fg.muted', whiteSpace: 'normal' },
+  },
+});
+
+export interface BasisViewProps {
+  basis: Basis;
+  missing?: readonly string[];
+  cite?: Cite;
+}
+
+/** Why a number is what it is: formula, inputs with where each comes from, source. */
+export function BasisView({ basis, missing = [], cite }: BasisViewProps) {
+  return (
+    <chakra.div bg="bg.basis" px={3} py={2.5} fontSize="xs" lineHeight={1.45}>
+      {basis.formula !== undefined && <chakra.p fontWeight="semibold">{basis.formula}</chakra.p>}
+      <p>{basis.words}</p>
+      {missing.length > 0 && (
+        <chakra.p color="unrated" fontWeight="semibold" mt={1}>
+          Missing: {missing.join(', ')}.
+        </chakra.p>
+      )}
+      {basis.inputs.length > 0 && (
+        <Inputs>
+          {basis.inputs.map((input) => (
+            <InputLine key={`${input.name} ${input.symbol ?? ''}`} input={input} cite={cite} />
+          ))}
+        </Inputs>
+      )}
+      {basis.notes.map((note) => (
+        <chakra.p key={note} color="fg.muted" mt={1}>
+          {note}
+        </chakra.p>
+      ))}
+      <chakra.p color="fg.muted" mt={1}>
+        {basis.source}
+      </chakra.p>
+    </chakra.div>
+  );
+}
+
+function InputLine({ input, cite }: { input: BasisInput; cite?: Cite }) {
+  const citation = input.field === undefined || input.from !== 'ratings' ? undefined : cite?.(input.field);
+  return (
+    <>
+      <dt>
+        {input.symbol !== undefined && <chakra.b fontWeight="semibold">{input.symbol} </chakra.b>}
+        {input.name}
+      </dt>
+      <dd>{unitWords(input.value, input.unit)}</dd>
+      <dd>{citation ?? fromWords[input.from]}</dd>
+    </>
+  );
+}

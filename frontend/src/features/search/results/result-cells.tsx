@@ -1,0 +1,85 @@
+import { chakra } from '@chakra-ui/react';
+import type { Assessment } from '@resistry/engineering/assessment/assess';
+import { DrawnPart } from '../../../components/drawn-part/drawn-part';
+import { MarginRule } from '../../../components/margin-rule';
+import { MarginWord } from '../../../components/margin-word';
+import { StatusWord } from '../../../components/status-word';
+import { checkWords } from '../../../wording/check-words';
+import { type SearchPart, tightestCheck } from '../search-part';
+import { overSpecification } from './over-specification';
+import { bodyOfPart, priceWords, valueWords } from './part-figures';
+
+export function BodyCell({ part }: { part: SearchPart }) {
+  const body = bodyOfPart(part);
+  return body === undefined ? null : <DrawnPart body={body} />;
+}
+
+/** The company's number first, the manufacturer's beneath; where there is none, the manufacturer's alone. */
+export function NumberCell({ part }: { part: SearchPart }) {
+  return part.companyPartNumber ? (
+    <>
+      <b>{part.companyPartNumber}</b>
+      <span data-second="">{part.manufacturerPartNumber}</span>
+    </>
+  ) : (
+    <>
+      <b>{part.manufacturerPartNumber}</b>
+      <span data-second="">no company number</span>
+    </>
+  );
+}
+
+/** The tightest check as a rule, with its name and figure beneath, and what there is too much of. */
+export function MarginCell({ assessment }: { assessment: Assessment }) {
+  const check = tightestCheck(assessment.checks);
+  if (check === undefined) return <span data-second="">nothing asked</span>;
+  const excess = overSpecification(assessment.excess);
+  return (
+    <>
+      <MarginRule status={check.status} margin={check.margin} />
+      <span data-second="">
+        {checkWords[check.check].toLowerCase()} <MarginWord status={check.status} margin={check.margin} />
+        {excess !== undefined && `, ${excess}`}
+      </span>
+    </>
+  );
+}
+
+const NarrowFrame = chakra('div', {
+  base: {
+    display: 'grid',
+    gridTemplateColumns: '62px minmax(0, 1fr) auto',
+    columnGap: 3,
+    rowGap: 1,
+    alignItems: 'center',
+    py: 2,
+    whiteSpace: 'normal',
+    '& > :nth-of-type(4)': { gridColumn: '1 / -1' },
+  },
+});
+
+/** One result on a narrow screen: what decides, in two lines. */
+export function NarrowResult({ part, assessment }: { part: SearchPart; assessment: Assessment }) {
+  return (
+    <NarrowFrame>
+      <div>
+        <BodyCell part={part} />
+      </div>
+      <div>
+        <b>{part.companyPartNumber ?? part.manufacturerPartNumber}</b>
+        <span data-second="">
+          {part.manufacturer.name} {part.family.code}, {valueWords(part)}
+        </span>
+      </div>
+      <div>
+        <StatusWord kind="approval" status={part.approval} />
+        <chakra.span display="block" textAlign="end" fontSize="xs">
+          {typeof part.unitPrice !== 'number' ? priceWords(null) : `€ ${priceWords(part.unitPrice)}`}
+        </chakra.span>
+      </div>
+      <div>
+        <MarginCell assessment={assessment} />
+      </div>
+    </NarrowFrame>
+  );
+}

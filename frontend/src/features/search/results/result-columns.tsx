@@ -1,0 +1,200 @@
+import type { DataColumn } from '../../../components/data-table/data-column';
+import { Figure } from '../../../components/figure';
+import { StatusWord } from '../../../components/status-word';
+import { checkWords } from '../../../wording/check-words';
+import { approvalWords, supplyWords } from '../../../wording/standing-words';
+import { technologyWords } from '../../../wording/technology-words';
+import type { SearchItem } from '../requests/search-parts';
+import { tightestCheck } from '../search-part';
+import { priceWords, sizeCode } from './part-figures';
+import { BodyCell, MarginCell, NarrowResult, NumberCell } from './result-cells';
+
+type Column = DataColumn<SearchItem>;
+
+const body: Column = {
+  id: 'body',
+  header: 'Body',
+  plainHeader: 'Body',
+  width: '4.6rem',
+  cell: ({ part }) => <BodyCell part={part} />,
+  plain: ({ part }) => part.body?.style ?? null,
+};
+
+const number: Column = {
+  id: 'number',
+  header: 'Part',
+  plainHeader: 'Company part number',
+  width: '7.4rem',
+  fixed: true,
+  sortable: true,
+  cell: ({ part }) => <NumberCell part={part} />,
+  plain: ({ part }) => part.companyPartNumber ?? null,
+};
+
+const manufacturerNumber: Column = {
+  id: 'manufacturerPartNumber',
+  header: 'Manufacturer’s number',
+  plainHeader: 'Manufacturer part number',
+  width: '9rem',
+  sortable: true,
+  hiddenAtFirst: true,
+  cell: ({ part }) => part.manufacturerPartNumber,
+  plain: ({ part }) => part.manufacturerPartNumber,
+};
+
+const family: Column = {
+  id: 'family',
+  header: 'Family',
+  plainHeader: 'Manufacturer and family',
+  width: '6.4rem',
+  sortable: true,
+  cell: ({ part }) => (
+    <>
+      {part.manufacturer.name}
+      <span data-second="">{part.family.code}</span>
+    </>
+  ),
+  plain: ({ part }) => `${part.manufacturer.name} ${part.family.code}`,
+};
+
+const technology: Column = {
+  id: 'technology',
+  header: 'Technology',
+  plainHeader: 'Technology',
+  width: '6.5rem',
+  sortable: true,
+  hiddenAtFirst: true,
+  cell: ({ part }) => technologyWords[part.technology],
+  plain: ({ part }) => technologyWords[part.technology],
+};
+
+const size: Column = {
+  id: 'size',
+  header: 'Size',
+  plainHeader: 'Size, inch/metric',
+  width: '4.2rem',
+  sortable: true,
+  cell: ({ part }) => (
+    <>
+      {part.size.code}
+      <span data-second="">{part.size.metricCode ?? ''}</span>
+    </>
+  ),
+  plain: ({ part }) => sizeCode(part),
+};
+
+const resistance: Column = {
+  id: 'resistance',
+  header: 'Value',
+  plainHeader: 'Resistance, Ω',
+  width: '5.2rem',
+  align: 'end',
+  sortable: true,
+  cell: ({ part }) => <Figure value={part.resistance} quantity="resistance" aligned />,
+  plain: ({ part }) => part.resistance,
+};
+
+const tolerance: Column = {
+  id: 'tolerance',
+  header: 'Tol.',
+  plainHeader: 'Tolerance, fraction',
+  width: '4rem',
+  align: 'end',
+  sortable: true,
+  cell: ({ part }) => (part.resistance === 0 ? '' : <Figure value={part.tolerance} quantity="tolerance" />),
+  plain: ({ part }) => part.tolerance ?? null,
+};
+
+const tcr: Column = {
+  id: 'tcr',
+  header: 'TCR',
+  plainHeader: 'TCR, 1/K',
+  width: '5.2rem',
+  align: 'end',
+  sortable: true,
+  cell: ({ part }) =>
+    part.resistance === 0 ? '' : <Figure value={part.tcr} quantity="temperature-coefficient" />,
+  plain: ({ part }) => part.tcr ?? null,
+};
+
+const margin: Column = {
+  id: 'margin',
+  header: 'Tightest margin',
+  plainHeader: 'Tightest margin, fraction',
+  width: '10.5rem',
+  sortable: true,
+  cell: ({ assessment }) => <MarginCell assessment={assessment} />,
+  plain: ({ assessment }) => tightestCheck(assessment.checks)?.margin ?? null,
+};
+
+const tightest: Column = {
+  id: 'tightestCheck',
+  header: 'Tightest check',
+  plainHeader: 'Tightest check',
+  width: '8rem',
+  hiddenAtFirst: true,
+  cell: ({ assessment }) => checkWords[tightestCheck(assessment.checks)?.check ?? 'value'],
+  plain: ({ assessment }) => tightestCheck(assessment.checks)?.check ?? null,
+};
+
+const approval: Column = {
+  id: 'approval',
+  header: 'Approval',
+  plainHeader: 'Approval',
+  width: '6rem',
+  sortable: true,
+  cell: ({ part }) => <StatusWord kind="approval" status={part.approval} />,
+  plain: ({ part }) => approvalWords[part.approval],
+};
+
+const supply: Column = {
+  id: 'supply',
+  header: 'Supply',
+  plainHeader: 'Supply',
+  width: '8rem',
+  sortable: true,
+  hiddenAtFirst: true,
+  cell: ({ part }) => <StatusWord kind="supply" status={part.supply} />,
+  plain: ({ part }) => supplyWords[part.supply],
+};
+
+const price: Column = {
+  id: 'unitPrice',
+  header: '€ at 1,000',
+  plainHeader: 'Unit price at 1,000, EUR',
+  width: '4.8rem',
+  align: 'end',
+  sortable: true,
+  cell: ({ part }) => priceWords(part.unitPrice),
+  plain: ({ part }) => part.unitPrice ?? null,
+};
+
+export const resultColumns: readonly Column[] = [
+  body,
+  number,
+  manufacturerNumber,
+  family,
+  technology,
+  size,
+  resistance,
+  tolerance,
+  tcr,
+  margin,
+  tightest,
+  approval,
+  supply,
+  price,
+];
+
+/** On a narrow screen a row is one cell. */
+export const narrowColumns: readonly Column[] = [
+  {
+    id: 'part',
+    header: 'Parts',
+    plainHeader: 'Part',
+    width: '100%',
+    fixed: true,
+    cell: ({ part, assessment }) => <NarrowResult part={part} assessment={assessment} />,
+    plain: ({ part }) => part.companyPartNumber ?? part.manufacturerPartNumber,
+  },
+];
