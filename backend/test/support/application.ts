@@ -24,6 +24,7 @@ export interface StartOptions {
 /** The whole application on a data directory of its own, listening on a free port of 127.0.0.1. */
 export class StartedApplication {
   readonly people: PeopleBuilder;
+  private closing: Promise<void> | undefined;
 
   constructor(
     readonly nest: NestExpressApplication,
@@ -49,8 +50,15 @@ export class StartedApplication {
     await this.nest.get(OutboxDispatcher).drain();
   }
 
+  /** Stops the application and leaves its data in place. Doing it twice does no harm. */
+  async close(): Promise<void> {
+    this.closing ??= this.nest.close();
+    await this.closing;
+  }
+
+  /** Stops the application; the data directory goes, unless it was given. */
   async stop(): Promise<void> {
-    await this.nest.close();
+    await this.close();
     if (!this.keepsDirectory) rmSync(this.dataDirectory, { recursive: true, force: true });
   }
 }

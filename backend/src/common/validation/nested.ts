@@ -1,4 +1,5 @@
 import { applyDecorators } from '@nestjs/common';
+import { ApiProperty } from '@nestjs/swagger';
 import { Type } from 'class-transformer';
 import {
   ArrayMaxSize,
@@ -16,7 +17,13 @@ type ClassOf = () => new () => object;
  * object; this does not.
  */
 export function Nested(type: ClassOf, options: { optional?: boolean } = {}): PropertyDecorator {
-  return applyDecorators(...optionally(options), IsPlainObject(), ValidateNested(), Type(type));
+  return applyDecorators(
+    ApiProperty({ type: () => type(), required: options.optional !== true }),
+    ...optionally(options),
+    IsPlainObject(),
+    ValidateNested(),
+    Type(type),
+  );
 }
 
 /** A field that holds a list of objects of the given class, at most `atMost` of them. */
@@ -25,6 +32,7 @@ export function NestedList(
   options: { optional?: boolean; atMost: number },
 ): PropertyDecorator {
   return applyDecorators(
+    ApiProperty({ type: () => [type()], required: options.optional !== true, maxItems: options.atMost }),
     ...optionally(options),
     IsArray(),
     ArrayMaxSize(options.atMost),
