@@ -13,6 +13,7 @@ import { ConfigModule } from './config/config.module';
 import type { Environment } from './config/environment';
 import { DatabaseModule } from './database/database.module';
 import { HealthModule } from './health/health.module';
+import { HousekeepingModule } from './housekeeping/housekeeping.module';
 import { MailModule } from './mail/mail.module';
 import { OutboxModule } from './outbox/outbox.module';
 import { PermissionsModule } from './permissions/permissions.module';
@@ -36,6 +37,7 @@ export class AppModule {
         UsersModule,
         AccountModule,
         BackupsModule,
+        HousekeepingModule,
         HealthModule,
       ],
       providers: [
