@@ -1,14 +1,11 @@
 import { ChakraProvider } from '@chakra-ui/react';
 import { QueryClientProvider } from '@tanstack/react-query';
-import { LazyMotion, MotionConfig } from 'framer-motion';
 import { ThemeProvider } from 'next-themes';
 import { useState } from 'react';
 import { RouterProvider } from 'react-router-dom';
 import { createQueryClient } from './api/query-client';
 import { createRouter } from './router';
 import { system } from './theme/system';
-
-const motionFeatures = () => import('./theme/motion-features').then((module) => module.default);
 
 /** The providers around every page. */
 export function Application() {
@@ -23,13 +20,9 @@ export function Application() {
         // Keeps React from running the script in the page; theme-before-paint.js has already done its work.
         scriptProps={{ type: 'application/json' }}
       >
-        <LazyMotion features={motionFeatures} strict>
-          <MotionConfig reducedMotion="user">
-            <QueryClientProvider client={queryClient}>
-              <RouterProvider router={router} />
-            </QueryClientProvider>
-          </MotionConfig>
-        </LazyMotion>
+        <QueryClientProvider client={queryClient}>
+          <RouterProvider router={router} />
+        </QueryClientProvider>
       </ThemeProvider>
     </ChakraProvider>
   );

@@ -16,6 +16,7 @@ export const routes: RouteObject[] = [
         element: <Shell />,
         children: [
           { index: true, element: <Navigate to="/find" replace /> },
+          { path: '/find', lazy: () => import('./features/search/find-page') },
           { path: '*', element: <NotFoundPage /> },
         ],
       },

@@ -17,6 +17,8 @@ export interface DataTableProps<Row extends object> {
   /** The row at an index, or undefined while it is on its way. */
   rowAt: (index: number) => Row | undefined;
   /** Tells which rows are in sight, so that they can be asked for. */
+  /** What a row is, so that it stays itself when its place changes. */
+  rowKey?: (row: Row) => string | number;
   onVisible?: (first: number, last: number) => void;
   rowHeight?: number;
   sort?: Sort;
@@ -34,6 +36,7 @@ export function DataTable<Row extends object>(props: DataTableProps<Row>) {
     columns,
     rowCount,
     rowAt,
+    rowKey,
     onVisible,
     rowHeight = 48,
     sort,
@@ -94,6 +97,11 @@ export function DataTable<Row extends object>(props: DataTableProps<Row>) {
     virtualizer.scrollToIndex(next.row, { align: 'auto' });
   };
 
+  const keyAt = (index: number): string | number => {
+    const data = rowAt(index);
+    return data !== undefined && rowKey !== undefined ? rowKey(data) : `waiting ${index}`;
+  };
+
   const before = (shown[0]?.start ?? scrollMargin) - scrollMargin;
   const after = virtualizer.getTotalSize() - ((shown[shown.length - 1]?.end ?? scrollMargin) - scrollMargin);
   return (
@@ -117,7 +125,7 @@ export function DataTable<Row extends object>(props: DataTableProps<Row>) {
           <Spacer height={before} span={columns.length} />
           {shown.map(({ index }) => (
             <TableRow
-              key={index}
+              key={keyAt(index)}
               row={rowAt(index)}
               index={index}
               columns={columns}

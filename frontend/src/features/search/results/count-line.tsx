@@ -1,0 +1,51 @@
+import { chakra } from '@chakra-ui/react';
+import type { ReactNode } from 'react';
+import { Button } from '../../../components/button';
+import type { Show } from '../requests/search-request';
+
+const count = new Intl.NumberFormat('en');
+
+export interface CountLineProps {
+  total: number;
+  unrated: number;
+  show: Show;
+  grouped: boolean;
+  onShow: (show: Show) => void;
+  onGrouped: (grouped: boolean) => void;
+  /** What can be done with the table. */
+  children: ReactNode;
+}
+
+/** How many meet the duty; how many cannot be told, and whether those are shown. */
+export function CountLine({ total, unrated, show, grouped, onShow, onGrouped, children }: CountLineProps) {
+  const things = grouped
+    ? total === 1
+      ? 'number meets'
+      : 'numbers meet'
+    : total === 1
+      ? 'part meets'
+      : 'parts meet';
+  return (
+    <chakra.div display="flex" flexWrap="wrap" alignItems="baseline" columnGap={4} rowGap={1} my={3}>
+      <chakra.h1 fontSize="xl" role="status">
+        {count.format(total)} {things} it
+      </chakra.h1>
+      {unrated > 0 && (
+        <Button
+          variant="plain"
+          aria-pressed={show === 'met-and-unrated'}
+          onClick={() => onShow(show === 'met' ? 'met-and-unrated' : 'met')}
+        >
+          {show === 'met'
+            ? `${count.format(unrated)} more are unrated: show them`
+            : `${count.format(unrated)} unrated among them: hide them`}
+        </Button>
+      )}
+      <chakra.div flex={1} />
+      <Button variant="plain" aria-pressed={grouped} onClick={() => onGrouped(!grouped)}>
+        {grouped ? 'One row a part' : 'One row a number'}
+      </Button>
+      {children}
+    </chakra.div>
+  );
+}
