@@ -3,6 +3,7 @@ import type { Request } from 'express';
 import { LoggerModule } from 'nestjs-pino';
 import type { LevelWithSilent } from 'pino';
 import { requestIdOf } from '../http/request-id';
+import { loggedError } from './logged-error';
 
 const SECRET_PATHS = [
   'req.headers.authorization',
@@ -31,6 +32,7 @@ export class LoggingModule {
             customLogLevel: (_request, response, error) =>
               error || response.statusCode >= 500 ? 'error' : response.statusCode >= 400 ? 'warn' : 'info',
             serializers: {
+              err: loggedError,
               req: (request: Request) => ({ id: request.id, method: request.method, url: request.url }),
               res: (response: { statusCode: number }) => ({ statusCode: response.statusCode }),
             },
