@@ -17,6 +17,7 @@ import { HousekeepingModule } from './housekeeping/housekeeping.module';
 import { MailModule } from './mail/mail.module';
 import { OutboxModule } from './outbox/outbox.module';
 import { PermissionsModule } from './permissions/permissions.module';
+import { SeedModule } from './seed/seed.module';
 import { UsersModule } from './users/users.module';
 
 @Module({})
@@ -35,6 +36,7 @@ export class AppModule {
         OutboxModule,
         MailModule,
         UsersModule,
+        SeedModule,
         AccountModule,
         BackupsModule,
         HousekeepingModule,
