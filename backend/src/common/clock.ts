@@ -9,6 +9,11 @@ export class Clock {
     return this.now().toISOString();
   }
 
+  /** Today as ISO 8601 text, in UTC. */
+  today(): string {
+    return this.timestamp().slice(0, 10);
+  }
+
   /** The moment that many seconds from now (negative: ago), as ISO 8601 text in UTC. */
   timestampIn(seconds: number): string {
     return new Date(this.now().getTime() + seconds * 1000).toISOString();

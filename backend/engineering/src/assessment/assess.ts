@@ -2,7 +2,7 @@ import { budgetOf, type BudgetLine } from '../budget/budget';
 import { cautionsOf, type Caution } from '../cautions/cautions';
 import type { Basis } from '../checks/basis';
 import type { CheckName, CheckUnit, Finding, Standing, Status } from '../checks/check';
-import { checkList } from '../checks/list';
+import { checkList, standingChecks } from '../checks/list';
 import type { Policy } from '../derating/policy-entry';
 import type { Requirement } from '../duty/requirement';
 import { conditionsOf, type Conditions } from '../operating/conditions';
@@ -71,18 +71,25 @@ export function findingsOf(
 }
 
 /**
- * Assesses a part: every check the duty asks for, in each operating mode; the mode of the best verdict stands, the first
- * of equals. Modes are never mixed.
+ * Assesses a part: every check the duty asks for, in each operating mode; the mode whose ratings hold best stands, the
+ * first of equals. Modes are never mixed, and the part's standing in the catalogue has no say in the mode.
  * @throws RangeError where the candidate has no mode
  */
 export function assess(candidate: Candidate, requirement: Requirement, policy: Policy): Assessment {
   let best: Assessment | undefined;
   for (const mode of candidate.modes) {
     const assessment = assessMode(mode, candidate.standing, requirement, policy);
-    if (best === undefined || compareVerdicts(assessment.verdict, best.verdict) < 0) best = assessment;
+    if (best === undefined || compareVerdicts(verdictOfRatings(assessment), verdictOfRatings(best)) < 0)
+      best = assessment;
   }
   if (best === undefined) throw new RangeError('A part without an operating mode cannot be assessed.');
   return best;
+}
+
+function verdictOfRatings(assessment: Assessment): Status {
+  return verdictOf(
+    assessment.checks.filter(({ check }) => !standingChecks.has(check)).map(({ status }) => status),
+  );
 }
 
 function assessMode(

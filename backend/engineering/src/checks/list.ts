@@ -2,7 +2,7 @@ import { approvalCheck } from './approval';
 import { bodyCheck } from './body';
 import { categoryTemperatureCheck } from './category-temperature';
 import { certificateCheck } from './certificate';
-import type { CheckDefinition } from './check';
+import type { CheckDefinition, CheckName } from './check';
 import { dissipationCheck } from './dissipation';
 import { elementTemperatureCheck } from './element-temperature';
 import { featuresCheck } from './features';
@@ -45,3 +45,6 @@ export const checkList: readonly CheckDefinition[] = [
   supplyCheck,
   secondSourceCheck,
 ];
+
+/** Checks that are answered from the part's standing in the catalogue, not from its ratings. */
+export const standingChecks: ReadonlySet<CheckName> = new Set(['approval', 'supply', 'second-source']);

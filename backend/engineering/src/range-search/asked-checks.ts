@@ -21,6 +21,3 @@ export function askedChecks(requirement: Requirement): AskedCheck[] {
     )
     .map((definition, position) => ({ definition, bit: 1 << position }));
 }
-
-/** Checks that are answered from the part's standing, not from its ratings. */
-export const standingChecks: ReadonlySet<string> = new Set(['approval', 'supply', 'second-source']);

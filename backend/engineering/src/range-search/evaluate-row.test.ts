@@ -1,12 +1,13 @@
 import * as fc from 'fast-check';
 import { stateOf } from '../assessment/assess';
+import { standingChecks } from '../checks/list';
 import { DutyConflict } from '../duty/duty-conflict';
 import type { Duty } from '../duty/duty';
 import { requirementOf, type Requirement } from '../duty/requirement';
 import { conditionsOf } from '../operating/conditions';
 import { valuesBetween } from '../preferred-values/values-between';
 import { arbitraryDuty, arbitraryPolicy, arbitraryRatings } from '../test-support/arbitrary-duties';
-import { askedChecks, standingChecks } from './asked-checks';
+import { askedChecks } from './asked-checks';
 import { evaluateRow } from './evaluate-row';
 import type { RowMasks } from './row-masks';
 

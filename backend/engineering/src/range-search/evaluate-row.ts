@@ -1,8 +1,9 @@
 import { allowedElementTemperature } from '../checks/element-temperature';
 import type { CheckDefinition, Status } from '../checks/check';
+import { standingChecks } from '../checks/list';
 import type { Conditions } from '../operating/conditions';
 import { settle, type OperatingState } from '../operating/settle';
-import { standingChecks, type AskedCheck } from './asked-checks';
+import type { AskedCheck } from './asked-checks';
 import { classifyValue } from './classify-value';
 import { ratedZone, temperatureZone, voltageZone, withoutSettling, type FailZone } from './fail-zone';
 import { firstAbove, firstNotBelow, setBit, type RowMasks } from './row-masks';

@@ -1,0 +1,126 @@
+import { approvals, supplyStatuses } from '@resistry/engineering/ratings/technology';
+import type { Readers } from '../../database/readers';
+import type { SizeRatings } from '../../parts/ratings/size-ratings';
+import {
+  allocateColumns,
+  type CatalogueColumns,
+  type CatalogueRow,
+  type CompanyNumbers,
+} from './catalogue-columns';
+import type { CatalogueIndex } from './catalogue-index';
+import {
+  companyNumbersSql,
+  partColumnsSql,
+  sizesSql,
+  type PartColumnsRow,
+  type SizeRow,
+} from './part-columns-row';
+import { seriesBits } from './series-bits';
+
+/**
+ * Reads the whole catalogue into columns. Parts of a size without ratings in its family's current revision are left out:
+ * there is nothing to hold them against.
+ */
+export async function buildIndex(
+  readers: Readers,
+  ratings: ReadonlyMap<number, SizeRatings>,
+): Promise<CatalogueIndex> {
+  const sizes = await readers.select<SizeRow>(sizesSql);
+  const numbers = await readers.select<{ id: number }>(companyNumbersSql);
+  const all = await readers.select<PartColumnsRow>(partColumnsSql);
+  const parts = all.filter((part) => ratings.has(part.size_id));
+  const companyPosition = new Map(numbers.map(({ id }, position) => [id, position]));
+  const columns = allocateColumns(parts.length);
+  const rows: CatalogueRow[] = [];
+  for (const [position, part] of parts.entries()) {
+    fill(columns, position, part, companyPosition);
+    extendRows(rows, position, part);
+  }
+  return {
+    columns,
+    rows,
+    ratings,
+    sizes: new Map(
+      sizes.map((size) => [
+        size.id,
+        {
+          sizeId: size.id,
+          code: size.code,
+          familyId: size.family_id,
+          familyRank: size.family_rank,
+          manufacturerId: size.manufacturer_id,
+          manufacturerRank: size.manufacturer_rank,
+          technology: size.technology,
+          bodyStyle: size.body_style,
+        },
+      ]),
+    ),
+    companyNumbers: companyNumbersOf(numbers, columns.company),
+  };
+}
+
+/** Writes one part's standing, which can change, at its position. */
+export function fillStanding(
+  columns: CatalogueColumns,
+  position: number,
+  part: Pick<PartColumnsRow, 'approval' | 'supply' | 'derived_second_source' | 'derived_unit_price_micro'>,
+): void {
+  columns.approval[position] = approvals.indexOf(part.approval);
+  columns.supply[position] = supplyStatuses.indexOf(part.supply);
+  columns.secondSource[position] = part.derived_second_source;
+  columns.price[position] = part.derived_unit_price_micro ?? Infinity;
+}
+
+function fill(
+  columns: CatalogueColumns,
+  position: number,
+  part: PartColumnsRow,
+  companyPosition: ReadonlyMap<number, number>,
+): void {
+  columns.partId[position] = part.id;
+  columns.resistance[position] = part.resistance_ohm;
+  columns.company[position] =
+    part.company_part_number_id === null ? -1 : (companyPosition.get(part.company_part_number_id) ?? -1);
+  columns.series[position] = seriesBits(part.resistance_ohm);
+  columns.numberRank[position] = part.number_rank;
+  fillStanding(columns, position, part);
+}
+
+function extendRows(rows: CatalogueRow[], position: number, part: PartColumnsRow): void {
+  const last = rows.at(-1);
+  const isLink = part.resistance_ohm === 0;
+  if (
+    last !== undefined &&
+    last.sizeId === part.size_id &&
+    last.tolerance === part.tolerance_fraction &&
+    last.tcr === part.tcr_per_kelvin &&
+    last.isLink === isLink
+  ) {
+    last.to = position + 1;
+    return;
+  }
+  rows.push({
+    from: position,
+    to: position + 1,
+    sizeId: part.size_id,
+    tolerance: part.tolerance_fraction,
+    tcr: part.tcr_per_kelvin,
+    isLink,
+  });
+}
+
+function companyNumbersOf(numbers: readonly { id: number }[], company: Int32Array): CompanyNumbers {
+  const counts = new Int32Array(numbers.length + 1);
+  for (const position of company) if (position >= 0) counts[position + 1] = (counts[position + 1] ?? 0) + 1;
+  for (let position = 1; position < counts.length; position += 1)
+    counts[position] = (counts[position] ?? 0) + (counts[position - 1] ?? 0);
+  const source = new Int32Array(counts.at(-1) ?? 0);
+  const next = counts.slice();
+  for (const [part, position] of company.entries()) {
+    if (position < 0) continue;
+    const slot = next[position] ?? 0;
+    source[slot] = part;
+    next[position] = slot + 1;
+  }
+  return { id: Int32Array.from(numbers, ({ id }) => id), sourceFrom: counts, source };
+}
