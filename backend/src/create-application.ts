@@ -28,6 +28,8 @@ export async function createApplication(
     abortOnError: false,
   });
   application.useLogger(application.get(Logger));
+  // From here on the log tells at once what a start is busy with; seeding takes seconds.
+  application.flushLogs();
   application.disable('x-powered-by');
   application.disable('etag');
   // Only where a proxy speaks TLS for us is there one whose word on the client's address counts.
