@@ -19,15 +19,16 @@ const LAST = 'char(1114111)';
 /** What begins with a short word; `$short…` is the word, `$cases…` its ways of writing it in small and capital letters. */
 const beginning = (number: number): string => `
   SELECT p.id FROM json_each($cases${number}) AS c
-    JOIN parts AS p ON p.manufacturer_part_number >= c.value AND p.manufacturer_part_number < c.value || ${LAST}
+    CROSS JOIN parts AS p ON p.manufacturer_part_number >= c.value AND p.manufacturer_part_number < c.value || ${LAST}
   UNION
   SELECT s.part_id FROM json_each($cases${number}) AS c
     JOIN company_part_numbers AS n ON n.number >= c.value AND n.number < c.value || ${LAST}
     JOIN approved_sources AS s ON s.company_part_number_id = n.id
   UNION
-  SELECT p.id FROM families AS f JOIN manufacturers AS m ON m.id = f.manufacturer_id JOIN parts AS p ON p.family_id = f.id
+  SELECT p.id FROM parts AS p WHERE p.family_id IN (
+    SELECT f.id FROM families AS f JOIN manufacturers AS m ON m.id = f.manufacturer_id
     WHERE instr(lower(f.code), $short${number}) = 1 OR instr(lower(f.name), $short${number}) = 1
-      OR instr(lower(m.name), $short${number}) = 1`;
+      OR instr(lower(m.name), $short${number}) = 1)`;
 
 /**
  * Finds parts by what their manufacturer part number, company part number, family and manufacturer are called. Words are
