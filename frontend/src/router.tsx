@@ -1,4 +1,5 @@
 import { Navigate, type RouteObject, createBrowserRouter } from 'react-router-dom';
+import { Loading } from './components/states';
 import { ErrorPage } from './shell/error-page';
 import { NotFoundPage } from './shell/not-found-page';
 import { Shell } from './shell/shell';
@@ -7,6 +8,7 @@ import { Shell } from './shell/shell';
 export const routes: RouteObject[] = [
   {
     errorElement: <ErrorPage />,
+    hydrateFallbackElement: <Loading label="Opening the page" />,
     children: [
       { path: '/sign-in', lazy: () => import('./features/auth/sign-in-page') },
       { path: '/forgotten-password', lazy: () => import('./features/auth/forgotten-password-page') },

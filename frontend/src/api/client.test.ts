@@ -1,32 +1,11 @@
-import axios, {
-  AxiosError,
-  type AxiosAdapter,
-  type AxiosResponse,
-  type InternalAxiosRequestConfig,
-} from 'axios';
+import type { InternalAxiosRequestConfig } from 'axios';
+import { serve } from '../test-support/serve';
+import { sessionOf } from '../test-support/session-of';
 import { client } from './client';
 import { Problem } from './problem';
 import { endSession, sessionState, startSession } from './session';
 
-const session = (accessToken: string) => ({
-  accessToken,
-  user: { id: 1, name: 'I. Tamsin', email: 'designer@brackwater.example.com', roles: ['designer'] },
-  rules: [],
-});
-
-type Answer = (request: InternalAxiosRequestConfig) => { status: number; data: unknown };
-
-/** Stands for the server: one function that sees each request and answers it. */
-function serve(answer: Answer): void {
-  const adapter: AxiosAdapter = (request) => {
-    const { status, data } = answer(request);
-    const response: AxiosResponse = { status, data, statusText: '', headers: {}, config: request };
-    if (status < 400) return Promise.resolve(response);
-    return Promise.reject(new AxiosError(String(status), undefined, request, undefined, response));
-  };
-  client.defaults.adapter = adapter;
-  axios.defaults.adapter = adapter;
-}
+const session = (accessToken: string) => sessionOf(['designer'], [], accessToken);
 
 const token = (request: InternalAxiosRequestConfig): string => String(request.headers.get('Authorization'));
 

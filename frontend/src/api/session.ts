@@ -1,13 +1,9 @@
 import { useSyncExternalStore } from 'react';
 import type { MongoAbility, RawRuleOf } from '@casl/ability';
 import type { PackRule } from '@casl/ability/extra';
+import type { Schema } from './schema';
 
-export interface SignedInUser {
-  id: number;
-  name: string;
-  email: string;
-  roles: string[];
-}
+export type SignedInUser = Schema<'SignedInUser'>;
 
 /** What sign-in and refresh answer. The access token lives in memory only, so that no stored copy can be stolen. */
 export interface Session {

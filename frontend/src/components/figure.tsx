@@ -13,7 +13,7 @@ export interface FigureProps {
 }
 
 const Unit = chakra('span', {
-  base: { color: 'fg.muted', fontWeight: 'normal', ps: '0.18em', fontSize: '0.92em' },
+  base: { color: 'fg.muted', fontWeight: 'normal', fontSize: '0.92em' },
 });
 
 /** A number with its unit, the unit lighter than the figure. */
@@ -32,7 +32,7 @@ export function Figure({ value, quantity, significantDigits = 4, aligned = false
   const whole = point < 0 ? figure : figure.slice(0, point);
   const rest = point < 0 ? '' : figure.slice(point);
   return (
-    <chakra.span display="inline-grid" gridTemplateColumns="1fr 5.6ch" width="full" whiteSpace="nowrap">
+    <chakra.span display="inline-grid" gridTemplateColumns="1fr 4.9ch" width="full" whiteSpace="nowrap">
       <chakra.span textAlign="right">{whole}</chakra.span>
       <chakra.span textAlign="left">
         {rest}

@@ -42,7 +42,7 @@ describe('the margin rule', () => {
 describe('the margin in words', () => {
   it.each([
     ['met', 0.58, '+58\u202f%'],
-    ['unmet', -0.25, '\u221225\u202f%, not met'],
+    ['unmet', -0.25, '25\u202f% short'],
     ['unrated', null, 'unrated'],
     ['met', null, 'met'],
     ['unmet', null, 'not met'],

@@ -1,7 +1,7 @@
 import { chakra } from '@chakra-ui/react';
 import type { Status } from '@resistry/engineering/checks/check';
 import { statusWords } from '../wording/check-words';
-import { marginWords } from '../wording/percent';
+import { marginWords, shortfallWords } from '../wording/percent';
 
 export interface MarginWordProps {
   status: Status;
@@ -9,21 +9,19 @@ export interface MarginWordProps {
 }
 
 /** What the margin rule shows, in words. A shortfall says that it is one. */
+function words({ status, margin }: MarginWordProps): string {
+  if (margin === null || status === 'unrated') return statusWords[status];
+  return status === 'unmet' ? (shortfallWords(margin) ?? statusWords.unmet) : marginWords(margin);
+}
+
 export function MarginWord({ status, margin }: MarginWordProps) {
-  const figure = margin === null ? undefined : marginWords(margin);
-  const words =
-    status === 'unrated' || figure === undefined
-      ? statusWords[status]
-      : status === 'unmet'
-        ? `${figure}, not met`
-        : figure;
   return (
     <chakra.span
       color={status === 'met' ? 'fg' : status}
       fontWeight={status === 'unrated' ? 'normal' : 'semibold'}
       whiteSpace="nowrap"
     >
-      {words}
+      {words({ status, margin })}
     </chakra.span>
   );
 }

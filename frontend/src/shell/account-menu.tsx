@@ -28,9 +28,7 @@ export function AccountMenu() {
     <chakra.div ref={rootRef} position="relative" flexShrink={0}>
       <chakra.button type="button" {...buttonProps} fontSize="sm" py={1} whiteSpace="nowrap">
         <chakra.span fontWeight="medium">{user.name}</chakra.span>{' '}
-        <chakra.span color="fg.muted">
-          {user.roles.map((role) => roleWords[role] ?? role).join(', ')}
-        </chakra.span>
+        <chakra.span color="fg.muted">{user.roles.map((role) => roleWords[role]).join(', ')}</chakra.span>
       </chakra.button>
       {open && (
         <FloatingPanel id={panelId}>

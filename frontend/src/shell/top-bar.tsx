@@ -112,7 +112,7 @@ export function TopBar() {
       <NarrowMenu items={[...work, ...administration]} />
       <Brand />
       <chakra.nav aria-label="Places" display={{ base: 'none', lg: 'block' }} fontSize="sm">
-        <chakra.ul display="flex" gap={6}>
+        <chakra.ul display="flex" alignItems="center" gap={6}>
           <Links items={work} />
           <AdministrationLinks items={administration} />
         </chakra.ul>

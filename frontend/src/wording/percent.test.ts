@@ -1,4 +1,16 @@
-import { marginWords } from './percent';
+import { marginWords, shortfallWords } from './percent';
+
+describe('a shortfall in words', () => {
+  it.each([
+    [-0.25, '25\u202f% short'],
+    // 0.1 % short is shown as 1 %: a shortfall is never shown smaller than it is.
+    [-0.001, '1\u202f% short'],
+    [-1, undefined],
+    [-75, undefined],
+  ])('%p is %s', (margin, words) => {
+    expect(shortfallWords(margin)).toBe(words);
+  });
+});
 
 describe('a margin in words', () => {
   it.each([

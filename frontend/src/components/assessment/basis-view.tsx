@@ -1,10 +1,7 @@
 import { chakra } from '@chakra-ui/react';
-import type { Basis, BasisInput } from '@resistry/engineering/checks/basis';
-import type { ReactNode } from 'react';
+import type { BasisInput } from '@resistry/engineering/checks/basis';
+import type { AnsweredBasis, AnsweredInput } from './answered-assessment';
 import { unitWords } from './basis-units';
-
-/** Where a field of the ratings stands: the datasheet and its page, as a link. */
-export type Cite = (field: string) => ReactNode;
 
 const fromWords: Record<BasisInput['from'], string> = {
   duty: 'the duty',
@@ -28,13 +25,12 @@ const Inputs = chakra('dl', {
 });
 
 export interface BasisViewProps {
-  basis: Basis;
+  basis: AnsweredBasis;
   missing?: readonly string[];
-  cite?: Cite;
 }
 
 /** Why a number is what it is: formula, inputs with where each comes from, source. */
-export function BasisView({ basis, missing = [], cite }: BasisViewProps) {
+export function BasisView({ basis, missing = [] }: BasisViewProps) {
   return (
     <chakra.div bg="bg.basis" px={3} py={2.5} fontSize="xs" lineHeight={1.45}>
       {basis.formula !== undefined && <chakra.p fontWeight="semibold">{basis.formula}</chakra.p>}
@@ -47,7 +43,7 @@ export function BasisView({ basis, missing = [], cite }: BasisViewProps) {
       {basis.inputs.length > 0 && (
         <Inputs>
           {basis.inputs.map((input) => (
-            <InputLine key={`${input.name} ${input.symbol ?? ''}`} input={input} cite={cite} />
+            <InputLine key={`${input.name} ${input.symbol ?? ''}`} input={input} />
           ))}
         </Inputs>
       )}
@@ -63,8 +59,8 @@ export function BasisView({ basis, missing = [], cite }: BasisViewProps) {
   );
 }
 
-function InputLine({ input, cite }: { input: BasisInput; cite?: Cite }) {
-  const citation = input.field === undefined || input.from !== 'ratings' ? undefined : cite?.(input.field);
+function InputLine({ input }: { input: AnsweredInput }) {
+  const { citation } = input;
   return (
     <>
       <dt>
@@ -72,7 +68,9 @@ function InputLine({ input, cite }: { input: BasisInput; cite?: Cite }) {
         {input.name}
       </dt>
       <dd>{unitWords(input.value, input.unit)}</dd>
-      <dd>{citation ?? fromWords[input.from]}</dd>
+      <dd>
+        {citation === undefined ? fromWords[input.from] : `${citation.datasheet}, page ${citation.page}`}
+      </dd>
     </>
   );
 }

@@ -1,8 +1,8 @@
 import { chakra } from '@chakra-ui/react';
-import { type Caution, generalCaution } from '@resistry/engineering/cautions/cautions';
+import type { Caution } from '@resistry/engineering/cautions/cautions';
 
 /** What the numbers warn of, and what every result owes its reader. */
-export function Cautions({ cautions }: { cautions: readonly Caution[] }) {
+export function Cautions({ cautions, notice }: { cautions: readonly Caution[]; notice: string }) {
   return (
     <chakra.aside
       aria-label="Cautions"
@@ -17,7 +17,7 @@ export function Cautions({ cautions }: { cautions: readonly Caution[] }) {
           <chakra.b color="caution">{caution.title}</chakra.b> {caution.text}
         </chakra.p>
       ))}
-      <chakra.p color="fg.muted">{generalCaution}</chakra.p>
+      <chakra.p color="fg.muted">{notice}</chakra.p>
     </chakra.aside>
   );
 }

@@ -1,18 +1,18 @@
 import { chakra } from '@chakra-ui/react';
-import type { CheckResult } from '@resistry/engineering/assessment/assess';
 import { AnimatePresence, m } from 'framer-motion';
 import { useId, useState } from 'react';
 import { checkWords } from '../../wording/check-words';
 import { MarginRule } from '../margin-rule';
 import { MarginWord } from '../margin-word';
+import type { AnsweredCheck } from './answered-assessment';
 import { unitWords } from './basis-units';
-import { BasisView, type Cite } from './basis-view';
+import { BasisView } from './basis-view';
 
 const Line = chakra('button', {
   base: {
     display: 'grid',
     width: 'full',
-    gridTemplateColumns: 'minmax(7rem, 9rem) minmax(4rem, 1fr) minmax(4.6rem, auto)',
+    gridTemplateColumns: '8.6rem minmax(4rem, 1fr) 4.9rem',
     alignItems: 'center',
     columnGap: 3,
     minHeight: 8,
@@ -25,12 +25,12 @@ const Line = chakra('button', {
   },
 });
 
-function accessibleWords(check: CheckResult): string {
+function accessibleWords(check: AnsweredCheck): string {
   if (check.demand === null || check.allowance === null || check.unit === '') return '';
   return `, ${unitWords(check.demand, check.unit)} asked, ${unitWords(check.allowance, check.unit)} allowed`;
 }
 
-function CheckLine({ check, cite }: { check: CheckResult; cite?: Cite }) {
+function CheckLine({ check }: { check: AnsweredCheck }) {
   const [open, setOpen] = useState(false);
   const basisId = useId();
   return (
@@ -58,7 +58,7 @@ function CheckLine({ check, cite }: { check: CheckResult; cite?: Cite }) {
               transition={{ duration: 0.15 }}
               style={{ overflow: 'hidden' }}
             >
-              <BasisView basis={check.basis} missing={check.missing} cite={cite} />
+              <BasisView basis={check.basis} missing={check.missing} />
             </m.div>
           )}
         </AnimatePresence>
@@ -68,11 +68,11 @@ function CheckLine({ check, cite }: { check: CheckResult; cite?: Cite }) {
 }
 
 /** An assessment line by line; each opens to its basis. */
-export function CheckLines({ checks, cite }: { checks: readonly CheckResult[]; cite?: Cite }) {
+export function CheckLines({ checks }: { checks: readonly AnsweredCheck[] }) {
   return (
     <chakra.ul borderTop="1px solid" borderColor="border">
       {checks.map((check) => (
-        <CheckLine key={check.check} check={check} cite={cite} />
+        <CheckLine key={check.check} check={check} />
       ))}
     </chakra.ul>
   );

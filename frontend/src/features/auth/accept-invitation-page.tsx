@@ -1,27 +1,31 @@
 import { chakra } from '@chakra-ui/react';
 import { Form, Formik } from 'formik';
-import { Link, useSearchParams } from 'react-router-dom';
+import { Link, useLocation } from 'react-router-dom';
 import { object, string } from 'yup';
 import { problemOf } from '../../api/problem';
 import { Button } from '../../components/button';
 import { FormField } from '../../components/form-field';
 import { FormRefusal } from '../../components/form-refusal';
+import { Failed, Loading } from '../../components/states';
+import { roleWords } from '../../wording/role-words';
 import { AuthFrame } from './auth-frame';
+import { tokenOfFragment } from './fragment-token';
 import { newPassword, repeatedPassword } from './password-rules';
 import { useAcceptInvitation } from './requests/accept-invitation';
+import { useInvitationPreview } from './requests/preview-invitation';
 
 const schema = object({
   name: string()
     .trim()
     .required('Enter your name as colleagues know it.')
-    .max(200, 'At most 200 characters.'),
+    .max(100, 'At most 100 characters.'),
   password: newPassword,
   repeated: repeatedPassword,
 });
 
 export function Component() {
-  const [parameters] = useSearchParams();
-  const token = parameters.get('token') ?? '';
+  const token = tokenOfFragment(useLocation().hash);
+  const preview = useInvitationPreview(token);
   const accept = useAcceptInvitation();
   const refusal = accept.isError ? problemOf(accept.error) : undefined;
   if (accept.isSuccess) {
@@ -31,8 +35,24 @@ export function Component() {
       </AuthFrame>
     );
   }
+  if (preview.isPending) {
+    return (
+      <AuthFrame title="Accept the invitation">
+        <Loading label="Reading the invitation" lines={3} />
+      </AuthFrame>
+    );
+  }
+  if (preview.isError) {
+    return (
+      <AuthFrame title="This invitation cannot be used">
+        <Failed error={preview.error} onRetry={() => void preview.refetch()} />
+        <Link to="/sign-in">To sign-in</Link>
+      </AuthFrame>
+    );
+  }
+  const roles = preview.data.roles.map((role) => roleWords[role]).join(', ');
   return (
-    <AuthFrame title="Accept the invitation" lead="Say who you are and choose a password.">
+    <AuthFrame title="Accept the invitation" lead={`For ${preview.data.email}, as ${roles}.`}>
       <Formik
         initialValues={{ name: '', password: '', repeated: '' }}
         validationSchema={schema}

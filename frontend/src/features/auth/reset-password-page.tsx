@@ -1,20 +1,20 @@
 import { chakra } from '@chakra-ui/react';
 import { Form, Formik } from 'formik';
-import { Link, useSearchParams } from 'react-router-dom';
+import { Link, useLocation } from 'react-router-dom';
 import { object } from 'yup';
 import { problemOf } from '../../api/problem';
 import { Button } from '../../components/button';
 import { FormField } from '../../components/form-field';
 import { FormRefusal } from '../../components/form-refusal';
 import { AuthFrame } from './auth-frame';
+import { tokenOfFragment } from './fragment-token';
 import { newPassword, repeatedPassword } from './password-rules';
 import { useResetPassword } from './requests/reset-password';
 
 const schema = object({ password: newPassword, repeated: repeatedPassword });
 
 export function Component() {
-  const [parameters] = useSearchParams();
-  const token = parameters.get('token') ?? '';
+  const token = tokenOfFragment(useLocation().hash);
   const reset = useResetPassword();
   if (reset.isSuccess) {
     return (

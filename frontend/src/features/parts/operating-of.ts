@@ -1,6 +1,7 @@
-import type { Assessment } from '@resistry/engineering/assessment/assess';
 import type { Duty } from '@resistry/engineering/duty/duty';
 import type { DeratingAxis } from '@resistry/engineering/ratings/ratings';
+
+import type { AnsweredAssessment } from '../../components/assessment/answered-assessment';
 
 /**
  * Where the duty lies on a derating chart: from and to in °C on the curve's axis, dissipation in W.
@@ -8,7 +9,7 @@ import type { DeratingAxis } from '@resistry/engineering/ratings/ratings';
  */
 export function operatingOf(
   duty: Duty,
-  assessment: Assessment,
+  assessment: AnsweredAssessment,
   axis: DeratingAxis,
 ): { from: number; to: number; dissipation: number } | undefined {
   const dissipation = assessment.checks.find((check) => check.check === 'dissipation')?.demand;

@@ -23,13 +23,20 @@ export function filtersOf(state: FindState): Filters | undefined {
   };
 }
 
+/** The policy as the server takes it; an id that is none asks for the company's own, as the sentence then says. */
+function policyOf(chosen: string | undefined): SearchRequest['policy'] {
+  if (chosen === 'none') return 'none';
+  const id = Number(chosen);
+  return Number.isInteger(id) && id > 0 ? id : undefined;
+}
+
 /** The question that Find asks; undefined while something typed cannot be read. */
 export function requestOf(state: FindState, duty: Duty | undefined): SearchRequest | undefined {
   const filters = filtersOf(state);
   if (duty === undefined || filters === undefined) return undefined;
   return {
     duty,
-    policy: state.duty.policy,
+    policy: policyOf(state.duty.policy),
     filters,
     show: state.show,
     group: state.grouped ? 'company' : undefined,

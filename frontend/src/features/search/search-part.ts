@@ -1,5 +1,5 @@
-import type { CheckResult } from '@resistry/engineering/assessment/assess';
 import type { Approval, SupplyStatus, Technology } from '@resistry/engineering/ratings/technology';
+import type { AnsweredCheck } from '../../components/assessment/answered-assessment';
 import type { BodyStyle } from '../../components/drawn-part/drawn-body';
 
 /** A part as a search lists it. SI values; an absent or null one is not stated by the datasheet. */
@@ -23,13 +23,13 @@ export interface SearchPart {
 }
 
 /** The check that leaves least room, which is the one to look at first. */
-export function tightestCheck(checks: readonly CheckResult[]): CheckResult | undefined {
+export function tightestCheck(checks: readonly AnsweredCheck[]): AnsweredCheck | undefined {
   const failing =
     checks.find((check) => check.status === 'unmet') ?? checks.find((check) => check.status === 'unrated');
   if (failing !== undefined) return failing;
   return checks
     .filter((check) => check.margin !== null)
-    .reduce<CheckResult | undefined>(
+    .reduce<AnsweredCheck | undefined>(
       (least, check) => (least === undefined || (check.margin ?? 0) < (least.margin ?? 0) ? check : least),
       undefined,
     );

@@ -9,7 +9,7 @@ export interface Acceptance {
 }
 
 export async function acceptInvitation(acceptance: Acceptance): Promise<void> {
-  await client.post('/auth/invitations/accept', acceptance);
+  await client.post('/invitations/accept', acceptance);
 }
 
 export function useAcceptInvitation() {

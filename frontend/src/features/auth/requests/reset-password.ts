@@ -8,7 +8,7 @@ export interface NewPassword {
 }
 
 export async function resetPassword({ token, password }: NewPassword): Promise<void> {
-  await client.post('/auth/password-resets/complete', { token, password });
+  await client.post('/auth/password-resets/redeem', { token, password });
 }
 
 export function useResetPassword() {

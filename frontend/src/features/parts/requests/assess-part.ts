@@ -1,25 +1,20 @@
-import type { Assessment } from '@resistry/engineering/assessment/assess';
-import type { PolicyEntry } from '@resistry/engineering/derating/policy-entry';
 import type { Duty } from '@resistry/engineering/duty/duty';
 import { keepPreviousData, queryOptions, useQuery } from '@tanstack/react-query';
 import { client } from '../../../api/client';
-
-/** An assessment as the server answers it: which policy it was made under, and the entry in force. */
-export interface PartAssessment extends Assessment {
-  policy: { id: string; version: number; name?: string; entry?: PolicyEntry } | 'none' | 'inline';
-}
+import type { AnsweredAssessment } from '../../../components/assessment/answered-assessment';
+import type { SearchRequest } from '../../search/requests/search-request';
 
 export interface AssessmentRequest {
   duty: Duty;
-  policy?: string;
+  policy?: SearchRequest['policy'];
 }
 
 export async function assessPart(
   id: number,
   request: AssessmentRequest,
   signal?: AbortSignal,
-): Promise<PartAssessment> {
-  const { data } = await client.post<PartAssessment>(`/parts/${id}/assessment`, request, { signal });
+): Promise<AnsweredAssessment> {
+  const { data } = await client.post<AnsweredAssessment>(`/parts/${id}/assessment`, request, { signal });
   return data;
 }
 

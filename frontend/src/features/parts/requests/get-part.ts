@@ -3,19 +3,10 @@ import { queryOptions, useQuery } from '@tanstack/react-query';
 import { client } from '../../../api/client';
 import type { SearchPart } from '../../search/search-part';
 
-/** Where one rating stands in a datasheet. */
-export interface Citation {
-  /** Field of the ratings, for example `ratedDissipation`. */
-  field: string;
-  page: number;
-  datasheet: { id: number; title: string; revision: string };
-}
-
 /** A part with everything the catalogue knows of its ratings. */
 export interface PartDetails extends SearchPart {
   /** One set of ratings for each operating mode. */
   modes: { name?: string | null; ratings: Ratings }[];
-  citations: Citation[];
   version: number;
 }
 

@@ -1,15 +1,17 @@
 import { queryOptions, useQuery } from '@tanstack/react-query';
 import { client } from '../../../api/client';
 
-/** A version of a derating policy as lists show it. */
+/** A published version of a derating policy as lists show it. */
 export interface PolicySummary {
-  id: string;
+  id: number;
   name: string;
   version: number;
-  /** The company's own policy that holds where nobody names another. */
-  published: boolean;
-  /** Whose table it is, in the words of the document. */
-  source?: string | null;
+  origin: 'company' | 'agency';
+  /** Where its figures come from. */
+  source: string;
+  /** The company's own that holds where nobody names another. */
+  inForce: boolean;
+  note: string;
 }
 
 export async function listPolicies(signal?: AbortSignal): Promise<PolicySummary[]> {

@@ -11,7 +11,7 @@ export interface DutyText {
   entries: Partial<Record<EntryName, string>>;
   pulses: PulseText[];
   deviation: DeviationRule;
-  /** Id of a policy version, `none` for the manufacturer's own ratings, absent for the company's published policy. */
+  /** Id of a policy version, `none` for the manufacturer's own ratings, absent for the company's policy in force. */
   policy?: string;
   mounting?: Mounting;
   features: Feature[];

@@ -75,7 +75,7 @@ function changeOfNumber(field: string, to: number, duty: DutyText): Change | und
   }
   const interval = endOf(field);
   if (interval === undefined) return undefined;
-  const { quantity } = entryDefinitions[interval.name];
+  const { quantity, label } = entryDefinitions[interval.name];
   const text = formatQuantity(to, quantity);
   // The other end stays as it was typed, or at nothing where only one number was.
   const [low, high] = (duty.entries[interval.name] ?? '').split(/…|\.\.+| to /);
@@ -83,7 +83,7 @@ function changeOfNumber(field: string, to: number, duty: DutyText): Change | und
     interval.end === 'max'
       ? `${high === undefined ? '0' : (low ?? '0').trim()}…${text}`
       : `${text}…${(high ?? low ?? '0').trim()}`;
-  return { words: text, relaxed: withEntry(interval.name, pair) };
+  return { words: `${text} ${label.toLowerCase()}`, relaxed: withEntry(interval.name, pair) };
 }
 
 function changeOf({ field, to }: Relaxation, duty: DutyText): Change | undefined {

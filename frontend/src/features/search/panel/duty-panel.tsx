@@ -26,15 +26,15 @@ const deviationOptions = deviationRules.map((value) => ({
   words: value === 'worst-case' ? 'worst case' : 'root sum of squares',
 }));
 
-/** Versions by name, the published one first and chosen where nothing is. */
+/** Versions by name, the one in force first and chosen where nothing is. */
 function policyOptions(policies: readonly PolicySummary[]): { value: string; words: string }[] {
-  const published = policies.find((policy) => policy.published);
+  const inForce = policies.find((policy) => policy.inForce);
   const words = (policy: PolicySummary): string => `${policy.name} ${policy.version}`;
   return [
-    { value: '', words: published === undefined ? 'the company’s' : words(published) },
+    { value: '', words: inForce === undefined ? 'the company’s' : words(inForce) },
     ...policies
-      .filter((policy) => policy !== published)
-      .map((policy) => ({ value: policy.id, words: words(policy) })),
+      .filter((policy) => policy !== inForce)
+      .map((policy) => ({ value: String(policy.id), words: words(policy) })),
     { value: 'none', words: 'none, as rated' },
   ];
 }

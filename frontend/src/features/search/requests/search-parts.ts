@@ -1,15 +1,15 @@
-import type { Assessment } from '@resistry/engineering/assessment/assess';
 import type { CheckName } from '@resistry/engineering/checks/check';
 import { keepPreviousData, queryOptions } from '@tanstack/react-query';
 import { client } from '../../../api/client';
+import type { AnsweredAssessment } from '../../../components/assessment/answered-assessment';
 import type { SearchPart } from '../search-part';
 import type { SearchRequest } from './search-request';
 
 export interface SearchItem {
   part: SearchPart;
-  assessment: Assessment;
+  assessment: AnsweredAssessment;
   /** With `group: 'company'`: the approved sources under the number, each with its own assessment. */
-  sources?: { part: SearchPart; assessment: Assessment }[];
+  sources?: { part: SearchPart; assessment: AnsweredAssessment }[];
 }
 
 export interface Knockout {

@@ -21,7 +21,8 @@ export interface Filters {
 /** One question to the catalogue, without the page. */
 export interface SearchRequest {
   duty: Duty;
-  policy?: string;
+  /** Id of a version, or `none`; absent for the company's policy in force. */
+  policy?: number | 'none';
   filters?: Filters;
   show: Show;
   group?: 'company';

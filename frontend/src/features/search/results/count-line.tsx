@@ -27,8 +27,10 @@ export function CountLine({ total, unrated, show, grouped, onShow, onGrouped, ch
       : 'parts meet';
   return (
     <chakra.div display="flex" flexWrap="wrap" alignItems="baseline" columnGap={4} rowGap={1} my={3}>
-      <chakra.h1 fontSize="xl" role="status">
-        {count.format(total)} {things} it
+      <chakra.h1 fontSize="xl">
+        <span role="status">
+          {count.format(total)} {things} it
+        </span>
       </chakra.h1>
       {unrated > 0 && (
         <Button

@@ -1,5 +1,5 @@
 import { chakra } from '@chakra-ui/react';
-import type { Assessment } from '@resistry/engineering/assessment/assess';
+import type { AnsweredAssessment } from '../../../components/assessment/answered-assessment';
 import { DrawnPart } from '../../../components/drawn-part/drawn-part';
 import { MarginRule } from '../../../components/margin-rule';
 import { MarginWord } from '../../../components/margin-word';
@@ -30,7 +30,7 @@ export function NumberCell({ part }: { part: SearchPart }) {
 }
 
 /** The tightest check as a rule, with its name and figure beneath, and what there is too much of. */
-export function MarginCell({ assessment }: { assessment: Assessment }) {
+export function MarginCell({ assessment }: { assessment: AnsweredAssessment }) {
   const check = tightestCheck(assessment.checks);
   if (check === undefined) return <span data-second="">nothing asked</span>;
   const excess = overSpecification(assessment.excess);
@@ -39,8 +39,8 @@ export function MarginCell({ assessment }: { assessment: Assessment }) {
       <MarginRule status={check.status} margin={check.margin} />
       <span data-second="">
         {checkWords[check.check].toLowerCase()} <MarginWord status={check.status} margin={check.margin} />
-        {excess !== undefined && `, ${excess}`}
       </span>
+      {excess !== undefined && <span data-second="">{excess}</span>}
     </>
   );
 }
@@ -59,7 +59,7 @@ const NarrowFrame = chakra('div', {
 });
 
 /** One result on a narrow screen: what decides, in two lines. */
-export function NarrowResult({ part, assessment }: { part: SearchPart; assessment: Assessment }) {
+export function NarrowResult({ part, assessment }: { part: SearchPart; assessment: AnsweredAssessment }) {
   return (
     <NarrowFrame>
       <div>

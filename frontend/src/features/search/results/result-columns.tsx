@@ -1,3 +1,4 @@
+import { formatQuantityParts } from '@resistry/engineering/notation/format-quantity-parts';
 import type { DataColumn } from '../../../components/data-table/data-column';
 import { Figure } from '../../../components/figure';
 import { StatusWord } from '../../../components/status-word';
@@ -11,11 +12,17 @@ import { BodyCell, MarginCell, NarrowResult, NumberCell } from './result-cells';
 
 type Column = DataColumn<SearchItem>;
 
+/** The coefficient in the unit of its column. */
+function Ppm({ tcr: perKelvin }: { tcr: number | null | undefined }) {
+  if (typeof perKelvin !== 'number') return <span data-second="">not stated</span>;
+  return formatQuantityParts(perKelvin, 'temperature-coefficient', { significantDigits: 3 }).figure;
+}
+
 const body: Column = {
   id: 'body',
   header: 'Body',
   plainHeader: 'Body',
-  width: '4.6rem',
+  width: '4.5rem',
   cell: ({ part }) => <BodyCell part={part} />,
   plain: ({ part }) => part.body?.style ?? null,
 };
@@ -24,7 +31,7 @@ const number: Column = {
   id: 'number',
   header: 'Part',
   plainHeader: 'Company part number',
-  width: '7.4rem',
+  width: '6.1rem',
   fixed: true,
   sortable: true,
   cell: ({ part }) => <NumberCell part={part} />,
@@ -46,7 +53,7 @@ const family: Column = {
   id: 'family',
   header: 'Family',
   plainHeader: 'Manufacturer and family',
-  width: '6.4rem',
+  width: '4.8rem',
   sortable: true,
   cell: ({ part }) => (
     <>
@@ -72,7 +79,7 @@ const size: Column = {
   id: 'size',
   header: 'Size',
   plainHeader: 'Size, inch/metric',
-  width: '4.2rem',
+  width: '3.4rem',
   sortable: true,
   cell: ({ part }) => (
     <>
@@ -87,7 +94,7 @@ const resistance: Column = {
   id: 'resistance',
   header: 'Value',
   plainHeader: 'Resistance, Ω',
-  width: '5.2rem',
+  width: '4.4rem',
   align: 'end',
   sortable: true,
   cell: ({ part }) => <Figure value={part.resistance} quantity="resistance" aligned />,
@@ -98,7 +105,7 @@ const tolerance: Column = {
   id: 'tolerance',
   header: 'Tol.',
   plainHeader: 'Tolerance, fraction',
-  width: '4rem',
+  width: '3.4rem',
   align: 'end',
   sortable: true,
   cell: ({ part }) => (part.resistance === 0 ? '' : <Figure value={part.tolerance} quantity="tolerance" />),
@@ -107,13 +114,12 @@ const tolerance: Column = {
 
 const tcr: Column = {
   id: 'tcr',
-  header: 'TCR',
+  header: 'ppm/K',
   plainHeader: 'TCR, 1/K',
-  width: '5.2rem',
+  width: '3.3rem',
   align: 'end',
   sortable: true,
-  cell: ({ part }) =>
-    part.resistance === 0 ? '' : <Figure value={part.tcr} quantity="temperature-coefficient" />,
+  cell: ({ part }) => (part.resistance === 0 ? '' : <Ppm tcr={part.tcr} />),
   plain: ({ part }) => part.tcr ?? null,
 };
 
@@ -121,7 +127,7 @@ const margin: Column = {
   id: 'margin',
   header: 'Tightest margin',
   plainHeader: 'Tightest margin, fraction',
-  width: '10.5rem',
+  width: '8rem',
   sortable: true,
   cell: ({ assessment }) => <MarginCell assessment={assessment} />,
   plain: ({ assessment }) => tightestCheck(assessment.checks)?.margin ?? null,
@@ -141,7 +147,7 @@ const approval: Column = {
   id: 'approval',
   header: 'Approval',
   plainHeader: 'Approval',
-  width: '6rem',
+  width: '5.2rem',
   sortable: true,
   cell: ({ part }) => <StatusWord kind="approval" status={part.approval} />,
   plain: ({ part }) => approvalWords[part.approval],
@@ -160,9 +166,9 @@ const supply: Column = {
 
 const price: Column = {
   id: 'unitPrice',
-  header: '€ at 1,000',
+  header: '€/1,000',
   plainHeader: 'Unit price at 1,000, EUR',
-  width: '4.8rem',
+  width: '4rem',
   align: 'end',
   sortable: true,
   cell: ({ part }) => priceWords(part.unitPrice),

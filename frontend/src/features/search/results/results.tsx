@@ -29,7 +29,7 @@ export interface ResultsProps {
   ledger: React.ReactNode;
 }
 
-const rowHeights = { wide: 48, narrow: 104 };
+const rowHeights = { wide: 52, narrow: 112 };
 const keyOf = ({ part }: SearchItem): number => part.id;
 
 /** The parts that meet the duty, with how many they are and what can be done with the list. */

@@ -5,8 +5,10 @@ import { entryWords } from '../duty/entry-words';
 
 const phrase = {
   fontWeight: 'semibold',
-  borderBottom: '2px solid',
-  borderColor: 'accent',
+  textDecoration: 'underline 2px',
+  textDecorationColor: 'accent',
+  textUnderlineOffset: '5px',
+  display: 'inline',
   lineHeight: 'inherit',
   textAlign: 'start',
   _hover: { color: 'accent' },

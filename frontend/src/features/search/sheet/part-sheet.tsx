@@ -2,16 +2,18 @@ import { chakra } from '@chakra-ui/react';
 import type { Duty } from '@resistry/engineering/duty/duty';
 import { Suspense, lazy } from 'react';
 import { Link } from 'react-router-dom';
+import type { AnsweredAssessment } from '../../../components/assessment/answered-assessment';
 import { Cautions } from '../../../components/assessment/cautions';
 import { CheckLines } from '../../../components/assessment/check-lines';
 import { DrawnPart } from '../../../components/drawn-part/drawn-part';
 import { Moving } from '../../../components/moving';
 import { SideSheet } from '../../../components/side-sheet';
 import { Failed, Loading } from '../../../components/states';
-import { citeFrom } from '../../parts/cite';
+import { usePolicyEntry } from '../../policies/use-policy-entry';
 import { operatingOf } from '../../parts/operating-of';
-import { type PartAssessment, usePartAssessment } from '../../parts/requests/assess-part';
+import { usePartAssessment } from '../../parts/requests/assess-part';
 import { type PartDetails, usePart } from '../../parts/requests/get-part';
+import type { SearchRequest } from '../requests/search-request';
 import { bodyOfPart, sizeCode, valueWords } from '../results/part-figures';
 
 const DeratingChart = lazy(() =>
@@ -22,7 +24,7 @@ export interface PartSheetProps {
   id: number;
   /** Undefined while the duty cannot be read. */
   duty: Duty | undefined;
-  policy?: string;
+  policy?: SearchRequest['policy'];
   policyName: string;
   /** Carries the duty to the part's own page. */
   address: string;
@@ -65,13 +67,12 @@ function SheetHead({ part, address }: { part: PartDetails; address: string }) {
     <chakra.div display="flex" gap={3} alignItems="center" pe={8} mb={3}>
       {body !== undefined && <DrawnPart body={body} size="sheet" labelled />}
       <div>
-        <chakra.h2 fontSize="lg">
-          <Link to={`/parts/${part.id}${address}`}>
-            {part.companyPartNumber ?? part.manufacturerPartNumber}
-          </Link>
-        </chakra.h2>
+        <chakra.h2 fontSize="lg">{part.companyPartNumber ?? part.manufacturerPartNumber}</chakra.h2>
         <chakra.p fontSize="xs" color="fg.muted" lineHeight={1.35}>
           {part.manufacturer.name} {part.family.code} {sizeCode(part)}, {valueWords(part)}
+        </chakra.p>
+        <chakra.p fontSize="xs" mt={0.5}>
+          <Link to={`/parts/${part.id}${address}`}>Ratings, offers and history</Link>
         </chakra.p>
       </div>
     </chakra.div>
@@ -80,7 +81,7 @@ function SheetHead({ part, address }: { part: PartDetails; address: string }) {
 
 interface SheetBodyProps {
   part: PartDetails;
-  assessment: PartAssessment;
+  assessment: AnsweredAssessment;
   duty: Duty;
   policyName: string;
 }
@@ -88,11 +89,11 @@ interface SheetBodyProps {
 function SheetBody({ part, assessment, duty, policyName }: SheetBodyProps) {
   const mode = part.modes.find((each) => (each.name ?? undefined) === assessment.mode) ?? part.modes[0];
   const { derating, ratedDissipation } = mode?.ratings ?? {};
-  const entry = typeof assessment.policy === 'object' ? assessment.policy.entry : undefined;
+  const entry = usePolicyEntry(assessment.policy, mode?.ratings);
   return (
     <chakra.div display="grid" gap={5}>
       <div>
-        <CheckLines checks={assessment.checks} cite={citeFrom(part.citations, part.family.id)} />
+        <CheckLines checks={assessment.checks} />
         {assessment.mode !== undefined && (
           <chakra.p fontSize="xs" color="fg.muted" mt={1.5}>
             In the operating mode “{assessment.mode}”.
@@ -110,7 +111,7 @@ function SheetBody({ part, assessment, duty, policyName }: SheetBodyProps) {
           />
         </Suspense>
       )}
-      <Cautions cautions={assessment.cautions} />
+      <Cautions cautions={assessment.cautions} notice={assessment.notice} />
     </chakra.div>
   );
 }
