@@ -1,3 +1,5 @@
+import { fractionAt, kneeOf, zeroOf } from '@resistry/engineering/derating/curve';
+import type { DeratingCurve } from '@resistry/engineering/ratings/ratings';
 import { technologies } from '@resistry/engineering/ratings/technology';
 import { join } from 'node:path';
 import { REPOSITORY_ROOT } from '../config/environment';
@@ -65,6 +67,31 @@ describe('the families of the demonstration', () => {
     expect(packed).toEqual(new Set(family.sizes.map(({ code }) => code)));
   });
 
+  it.each(families)('$code: its ratings agree with each other', (family) => {
+    for (const { sizes } of family.revisions) {
+      for (const { columns, modes } of sizes.values()) {
+        const [limiting, overload] = [
+          columns['limiting_element_voltage_volt'],
+          columns['overload_voltage_volt'],
+        ];
+        if (isNumber(limiting) && isNumber(overload)) expect(overload).toBeGreaterThan(limiting);
+        for (const mode of modes) {
+          const points = JSON.parse(String(mode['derating_points'])) as [number, number][];
+          const curve: DeratingCurve = { axis: 'ambient', points };
+          const dissipation = mode['rated_dissipation_watt'];
+          const highest = mode['max_element_temperature_celsius'];
+          const thermal = mode['thermal_resistance_kelvin_per_watt'];
+          const falls = fractionAt(curve, zeroOf(curve)) === 0;
+          if (falls && isNumber(highest)) expect(zeroOf(curve)).toBeLessThanOrEqual(highest);
+          // R_th = (T_film at P70 − 70 °C) / P70 (references.md, Ratings): the film stays below its limit at the knee.
+          if (isNumber(thermal) && isNumber(highest) && isNumber(dissipation)) {
+            expect(kneeOf(curve) + thermal * dissipation).toBeLessThanOrEqual(highest);
+          }
+        }
+      }
+    }
+  });
+
   it.each(families)('$code: the examples of its datasheet are written and read back', (family: Family) => {
     const template = currentRevision(family).orderingCode;
     const vocabulary = vocabularyOf(family);
@@ -94,6 +121,10 @@ describe('the families of the demonstration', () => {
     }
   });
 });
+
+function isNumber(value: unknown): value is number {
+  return typeof value === 'number';
+}
 
 function vocabularyOf(family: Family): Parameters<typeof readOrderingCode>[2] {
   return {

@@ -94,7 +94,7 @@ export class Fields {
 
   /** A quantity with its unit; in SI. */
   quantity(name: string, quantity: Quantity): number {
-    return this.parse(name, this.text(name), quantity);
+    return this.parse(name, this.raw(name), quantity);
   }
 
   quantities(name: string, quantity: Quantity, count: number): number[] {
