@@ -1,37 +1,13 @@
 import { expandParts, type ExpandedPart } from './expand-parts';
-import { currentRevision, type Columns, type Family, type FamilyRevision } from './family';
-import type { IdSequences } from './id-sequences';
+import { currentRevision, type Columns, type Family } from './family';
+import { emptyFamilyRows, type FamilyContext, type FamilyRows } from './family-tables';
 import { momentOf } from './moments';
+import { addRevision, idOf } from './revision-rows';
 
 /** A part with its place in the database. */
 export interface PlacedPart extends ExpandedPart {
   readonly id: number;
   readonly family: Family;
-}
-
-/** Tables that a family fills, in an order in which every row finds what it refers to. */
-export const familyTables = [
-  'families',
-  'datasheets',
-  'sizes',
-  'family_revisions',
-  'size_ratings',
-  'operating_modes',
-  'ranges',
-  'packagings',
-  'citations',
-  'declarations',
-  'certificates',
-  'parts',
-] as const;
-export type FamilyTable = (typeof familyTables)[number];
-export type FamilyRows = Readonly<Record<FamilyTable, Columns[]>>;
-
-export interface FamilyContext {
-  readonly manufacturerId: number;
-  /** Local part of an address → id of the account. */
-  readonly personId: (address: string) => number;
-  readonly ids: IdSequences;
 }
 
 /** A family as rows. Revisions come as drafts: what makes them public is in `publications`. */
@@ -41,10 +17,6 @@ export interface FilledFamily {
   readonly rows: FamilyRows;
   readonly publications: readonly { id: number; published_by: number; published_at: string }[];
   readonly parts: readonly PlacedPart[];
-}
-
-export function emptyFamilyRows(): FamilyRows {
-  return Object.fromEntries(familyTables.map((table) => [table, []])) as unknown as FamilyRows;
 }
 
 /** Turns a family, with every part that its current revision offers, into rows of the catalogue. */
@@ -115,81 +87,6 @@ export function familyRows(family: Family, context: FamilyContext): FilledFamily
   return { familyId, currentRevisionId, rows, publications, parts };
 }
 
-interface RevisionPlace {
-  readonly id: number;
-  readonly familyId: number;
-  readonly sizeIds: ReadonlyMap<string, number>;
-  readonly datasheetIds: ReadonlyMap<string, number>;
-  readonly context: FamilyContext;
-}
-
-function addRevision(rows: FamilyRows, revision: FamilyRevision, place: RevisionPlace): void {
-  const { id, sizeIds, datasheetIds, context } = place;
-  const datasheetId = idOf(datasheetIds, revision.datasheet);
-  rows.family_revisions.push({
-    id,
-    family_id: place.familyId,
-    number: revision.number,
-    description: revision.description,
-    datasheet_id: datasheetId,
-    reference_temperature_celsius: revision.referenceTemperature,
-    failure_rate_style: revision.failureRateStyle,
-    features: JSON.stringify(revision.features),
-    ordering_code_template: revision.orderingCodeTemplate,
-    entered_by: context.personId(revision.entered.by),
-    entered_at: momentOf(revision.entered.on, 10),
-  });
-  for (const [size, ratings] of revision.sizes) {
-    const ratingsId = context.ids.next('size_ratings');
-    rows.size_ratings.push({
-      id: ratingsId,
-      revision_id: id,
-      size_id: idOf(sizeIds, size),
-      ...ratings.columns,
-    });
-    rows.operating_modes.push(
-      ...ratings.modes.map((mode, index) => ({ size_ratings_id: ratingsId, position: index + 1, ...mode })),
-    );
-  }
-  for (const range of revision.ranges) {
-    for (const size of range.sizes) {
-      rows.ranges.push({
-        revision_id: id,
-        size_id: idOf(sizeIds, size),
-        tolerance_fraction: range.tolerance,
-        tcr_per_kelvin: range.tcr,
-        resistance_min_ohm: range.min,
-        resistance_max_ohm: range.max,
-        series: JSON.stringify(range.series),
-      });
-    }
-  }
-  for (const { sizes, code, description, quantity } of revision.packagings) {
-    rows.packagings.push(
-      ...sizes.map((size) => ({
-        revision_id: id,
-        size_id: idOf(sizeIds, size),
-        code,
-        description,
-        quantity,
-      })),
-    );
-  }
-  for (const { fields, size, page, note } of revision.citations) {
-    const sizeId = size === null ? null : idOf(sizeIds, size);
-    rows.citations.push(
-      ...fields.map((field) => ({
-        revision_id: id,
-        size_id: sizeId,
-        field,
-        datasheet_id: datasheetId,
-        page,
-        note,
-      })),
-    );
-  }
-}
-
 function addPapers(
   rows: FamilyRows,
   family: Family,
@@ -213,10 +110,4 @@ function addPapers(
       })),
     );
   }
-}
-
-function idOf(ids: ReadonlyMap<string, number>, name: string): number {
-  const id = ids.get(name);
-  if (id === undefined) throw new RangeError(`“${name}” has no row of its own.`);
-  return id;
 }

@@ -1,6 +1,7 @@
 import type { Transaction } from 'sequelize';
 import type { Writer } from '../database/writer';
-import { familyTables, type FilledFamily } from './family-rows';
+import type { FilledFamily } from './family-rows';
+import { familyTables } from './family-tables';
 import { insertRows } from './insert-rows';
 
 /** Writes families with their parts, publishes their revisions and makes the last one current. */

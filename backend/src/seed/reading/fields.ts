@@ -2,7 +2,12 @@ import type { Quantity } from '@resistry/engineering/notation/quantity';
 import { parseQuantity } from '@resistry/engineering/notation/parse-quantity';
 import { SeedDataError } from './seed-data-error';
 
-type Plain = Readonly<Record<string, unknown>>;
+/** An object of a file as JSON gives it. */
+export type Plain = Readonly<Record<string, unknown>>;
+
+export function isPlain(value: unknown): value is Plain {
+  return typeof value === 'object' && value !== null && !Array.isArray(value);
+}
 
 /**
  * One object of a seed file, read field by field. Quantities are written with their units as engineers write them and come
@@ -17,10 +22,8 @@ export class Fields {
     readonly path: string,
     value: unknown,
   ) {
-    if (typeof value !== 'object' || value === null || Array.isArray(value)) {
-      throw new SeedDataError(file, path, 'must be an object');
-    }
-    this.plain = value as Plain;
+    if (!isPlain(value)) throw new SeedDataError(file, path, 'must be an object');
+    this.plain = value;
   }
 
   /** Reads an object as a whole: what `read` does not ask for is refused. */
@@ -50,6 +53,19 @@ export class Fields {
     const value = this.plain[name];
     if (value === undefined) throw this.refusal(name, 'is missing');
     return value;
+  }
+
+  /** An object that is not read field by field. */
+  object(name: string): Plain {
+    const value = this.raw(name);
+    if (isPlain(value)) return value;
+    throw this.refusal(name, 'must be an object');
+  }
+
+  objects(name: string): Plain[] {
+    const values = this.raw(name);
+    if (Array.isArray(values) && values.every(isPlain)) return values;
+    throw this.refusal(name, 'must be a list of objects');
   }
 
   text(name: string): string {

@@ -1,4 +1,4 @@
-type Plain = Readonly<Record<string, unknown>>;
+import { isPlain, type Plain } from './fields';
 
 /** Lays changes over a base, object by object, list of modes place by place; null takes a field away. */
 function layOver(base: unknown, changes: unknown): unknown {
@@ -10,16 +10,12 @@ function layOver(base: unknown, changes: unknown): unknown {
         .filter((name) => changes[name] !== null)
         .map((name) => [
           name,
-          name === 'modes' ? layModes(base[name], changes[name]) : layPlain(base[name], changes[name]),
+          // Curves, drifts and pulses are replaced as wholes: half an old curve is no curve.
+          name === 'modes' ? layModes(base[name], changes[name]) : (changes[name] ?? base[name]),
         ]),
     );
   }
   return changes;
-}
-
-/** Curves, drifts and pulses are replaced as wholes: half an old curve is no curve. */
-function layPlain(base: unknown, changes: unknown): unknown {
-  return changes === undefined ? base : changes;
 }
 
 function layModes(base: unknown, changes: unknown): unknown {
@@ -34,7 +30,7 @@ function layModes(base: unknown, changes: unknown): unknown {
  * each other place by place; everything else is replaced as a whole; null takes a field away.
  */
 export function sizeOver(common: Plain, size: Plain): Plain {
-  return withoutNulls(layOver(common, size) as Plain);
+  return withoutNulls(plainOf(layOver(common, size)));
 }
 
 /** A revision that says `basedOn` written out: what it gives laid over what the other gives. */
@@ -57,8 +53,4 @@ function withoutNulls(plain: Plain): Plain {
 
 function plainOf(value: unknown): Plain {
   return isPlain(value) ? value : {};
-}
-
-function isPlain(value: unknown): value is Plain {
-  return typeof value === 'object' && value !== null && !Array.isArray(value);
 }

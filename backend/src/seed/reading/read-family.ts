@@ -11,8 +11,6 @@ import { Fields } from './fields';
 import { revisionOver } from './merge-revisions';
 import { type FamilyFrame, readDeed, readRevision } from './read-revision';
 
-type Plain = Readonly<Record<string, unknown>>;
-
 /**
  * Reads a family's file.
  *
@@ -48,9 +46,8 @@ export function readFamily(file: string, content: unknown): Family {
 }
 
 function readRevisions(fields: Fields, frame: FamilyFrame): FamilyRevision[] {
-  const given = fields.raw('revisions');
-  if (!Array.isArray(given) || given.length === 0) throw fields.refusal('revisions', 'must be a list');
-  const plains = given as Plain[];
+  const plains = fields.objects('revisions');
+  if (plains.length === 0) throw fields.refusal('revisions', 'needs at least one revision');
   const revisions = plains.map((plain, place) => {
     const base = plains.find((candidate) => candidate['number'] === plain['basedOn']);
     if (plain['basedOn'] !== undefined && (base === undefined || base['basedOn'] !== undefined)) {

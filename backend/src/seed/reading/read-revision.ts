@@ -9,13 +9,11 @@ import type {
   FamilyRevision,
   FamilySizeRatings,
 } from '../family';
-import { Fields } from './fields';
+import { Fields, isPlain } from './fields';
 import { checkLacks, readLacks } from './lacks';
 import { sizeOver } from './merge-revisions';
 import { citableFields } from './rating-fields';
 import { readSizeRatings } from './read-size-ratings';
-
-type Plain = Readonly<Record<string, unknown>>;
 
 /** What a revision may point at. */
 export interface FamilyFrame {
@@ -71,16 +69,16 @@ export function readRevision(fields: Fields, frame: FamilyFrame): FamilyRevision
 }
 
 function readSizes(fields: Fields, frame: FamilyFrame): Map<string, FamilySizeRatings> {
-  const common = fields.raw('common') as Plain;
-  const given = fields.raw('sizes') as Plain;
+  const common = fields.object('common');
+  const given = fields.object('sizes');
   const stranger = Object.keys(given).find((code) => !frame.sizes.includes(code));
   if (stranger !== undefined) throw fields.refusal(`sizes.${stranger}`, 'is not a size of the family');
   return new Map(
     frame.sizes.map((code) => {
       const own = given[code];
-      if (own === undefined) throw fields.refusal(`sizes.${code}`, 'is missing');
+      if (!isPlain(own)) throw fields.refusal(`sizes.${code}`, 'must be an object');
       const path = `${fields.path}.sizes.${code}`;
-      return [code, Fields.read(fields.file, path, sizeOver(common, own as Plain), readSizeRatings)];
+      return [code, Fields.read(fields.file, path, sizeOver(common, own), readSizeRatings)];
     }),
   );
 }
