@@ -12,6 +12,13 @@ import type { ApplicationOptions } from './config/application-options';
 import { ConfigModule } from './config/config.module';
 import type { Environment } from './config/environment';
 import { DatabaseModule } from './database/database.module';
+import { CompanyPartNumbersModule } from './company-part-numbers/company-part-numbers.module';
+import { FacetsModule } from './facets/facets.module';
+import { FamiliesModule } from './families/families.module';
+import { ManufacturersModule } from './manufacturers/manufacturers.module';
+import { PartsModule } from './parts/parts.module';
+import { ReviewsModule } from './reviews/reviews.module';
+import { TextSearchModule } from './text-search/text-search.module';
 import { HealthModule } from './health/health.module';
 import { HousekeepingModule } from './housekeeping/housekeeping.module';
 import { MailModule } from './mail/mail.module';
@@ -40,6 +47,13 @@ export class AppModule {
         AccountModule,
         BackupsModule,
         HousekeepingModule,
+        ManufacturersModule,
+        FamiliesModule,
+        PartsModule,
+        CompanyPartNumbersModule,
+        FacetsModule,
+        TextSearchModule,
+        ReviewsModule,
         HealthModule,
       ],
       providers: [

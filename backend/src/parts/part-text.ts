@@ -50,8 +50,8 @@ export class PartText {
 /** The same as a part of larger statements. */
 export function partTextQuery(text: string): PartTextQuery {
   const words = [...new Set(text.split(/\s+/))].filter((word) => word !== '');
-  const indexed = words.filter((word) => [...word].length >= SHORTEST_INDEXED);
-  const short = words.filter((word) => [...word].length < SHORTEST_INDEXED);
+  const indexed = words.filter((word) => Array.from(word).length >= SHORTEST_INDEXED);
+  const short = words.filter((word) => Array.from(word).length < SHORTEST_INDEXED);
   const selects = [
     ...(indexed.length > 0 ? [INDEXED] : []),
     ...short.map((_, number) => `SELECT id FROM (${beginning(number)})`),
@@ -76,7 +76,7 @@ function phrase(word: string): string {
 
 /** ab → ab, aB, Ab, AB. */
 function cases(word: string): string[] {
-  return [...word].reduce<string[]>(
+  return Array.from(word).reduce<string[]>(
     (beginnings, character) => {
       const letters = new Set([character.toLowerCase(), character.toUpperCase()]);
       return beginnings.flatMap((start) => [...letters].map((letter) => start + letter));

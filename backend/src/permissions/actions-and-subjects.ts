@@ -27,6 +27,7 @@ export const SUBJECTS = [
   'Manufacturer',
   'CompanyPartNumber',
   'Offer',
+  'Review',
   'Policy',
   'User',
   'Permission',

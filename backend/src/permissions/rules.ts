@@ -66,6 +66,12 @@ export const rules: readonly PermissionRule[] = [
     sentence: 'A component engineer keeps the company part numbers and the derating policy.',
   },
   {
+    roles: ['component-engineer', 'designer', 'purchasing'],
+    actions: ['read'],
+    subjects: ['Review'],
+    sentence: 'Component engineers, designers and purchasing see which parts are under review.',
+  },
+  {
     roles: ['purchasing'],
     actions: ['set-supply-status', 'set-last-order-date'],
     subjects: ['Part'],

@@ -1,0 +1,102 @@
+import { ApiProperty, ApiPropertyOptional } from '@nestjs/swagger';
+import {
+  approvals,
+  supplyStatuses,
+  type Approval,
+  type SupplyStatus,
+} from '@resistry/engineering/ratings/technology';
+import { PersonRefDto } from '../../common/reading/person-ref.dto';
+import { NamedDto } from '../summary/part-summary.dto';
+
+export class OrderingCodeDto {
+  @ApiProperty({ description: 'Code of the packaging' })
+  packaging: string;
+
+  @ApiProperty()
+  description: string;
+
+  @ApiProperty({ description: 'Pieces in one packaging' })
+  quantity: number;
+
+  @ApiPropertyOptional({ description: 'Absent where the template of the family cannot write it' })
+  code?: string;
+}
+
+/** A part under a company part number. */
+export class SourceDto {
+  @ApiProperty()
+  id: number;
+
+  @ApiProperty()
+  manufacturerPartNumber: string;
+
+  @ApiProperty({ type: NamedDto })
+  manufacturer: NamedDto;
+
+  @ApiProperty({ type: NamedDto })
+  family: NamedDto;
+
+  @ApiProperty({ description: 'Place in the approved manufacturer list, from 1' })
+  position: number;
+
+  @ApiProperty({ enum: approvals })
+  approval: Approval;
+
+  @ApiProperty({ enum: supplyStatuses })
+  supply: SupplyStatus;
+
+  @ApiPropertyOptional({ description: 'Lowest unit price at 1000 pieces in force today, EUR' })
+  unitPrice?: number;
+
+  @ApiPropertyOptional({ description: 'Day, ISO 8601' })
+  lastOrderOn?: string;
+}
+
+export class PriceBreakDto {
+  @ApiProperty({ description: 'From so many pieces' })
+  quantity: number;
+
+  @ApiProperty({ description: 'A piece, in the currency of the offer' })
+  unitPrice: number;
+}
+
+export class OfferDto {
+  @ApiProperty()
+  id: number;
+
+  @ApiProperty({ type: NamedDto })
+  supplier: NamedDto;
+
+  @ApiProperty({ description: 'Code of the packaging' })
+  packaging: string;
+
+  @ApiProperty({ enum: ['EUR'] })
+  currency: 'EUR';
+
+  @ApiProperty({ description: 'Pieces' })
+  minimumOrder: number;
+
+  @ApiProperty({ description: 'Pieces; orders are multiples of it' })
+  orderMultiple: number;
+
+  @ApiProperty()
+  leadTimeDays: number;
+
+  @ApiProperty({ description: 'First day, ISO 8601' })
+  validFrom: string;
+
+  @ApiProperty({ description: 'Last day, ISO 8601' })
+  validUntil: string;
+
+  @ApiProperty({ description: 'Today lies between its first and its last day' })
+  inForce: boolean;
+
+  @ApiProperty({ type: [PriceBreakDto] })
+  priceBreaks: PriceBreakDto[];
+
+  @ApiProperty({ type: PersonRefDto })
+  enteredBy: PersonRefDto;
+
+  @ApiProperty({ description: 'ISO 8601' })
+  enteredAt: string;
+}
