@@ -1,5 +1,5 @@
 import { expandParts, type ExpandedPart } from './expand-parts';
-import { currentRevision, type Columns, type Family } from './family';
+import { currentRevision, type Family } from './family';
 import { emptyFamilyRows, type FamilyContext, type FamilyRows } from './family-tables';
 import { momentOf } from './moments';
 import { addRevision, idOf } from './revision-rows';

@@ -27,5 +27,18 @@ export interface FamilyContext {
 }
 
 export function emptyFamilyRows(): FamilyRows {
-  return Object.fromEntries(familyTables.map((table) => [table, []])) as unknown as FamilyRows;
+  return {
+    families: [],
+    datasheets: [],
+    sizes: [],
+    family_revisions: [],
+    size_ratings: [],
+    operating_modes: [],
+    ranges: [],
+    packagings: [],
+    citations: [],
+    declarations: [],
+    certificates: [],
+    parts: [],
+  };
 }
