@@ -10,7 +10,10 @@ import { buildIndex, fillStanding } from './index/build-index';
 import type { CatalogueIndex } from './index/catalogue-index';
 import type { PartColumnsRow } from './index/part-columns-row';
 
-type StandingRow = Pick<PartColumnsRow, 'id' | 'approval' | 'supply' | 'derived_second_source' | 'derived_unit_price_micro'>;
+type StandingRow = Pick<
+  PartColumnsRow,
+  'id' | 'approval' | 'supply' | 'derived_second_source' | 'derived_unit_price_micro'
+>;
 
 const standingSql = `
   SELECT id, approval, supply, derived_second_source, derived_unit_price_micro
@@ -19,7 +22,9 @@ const standingSql = `
 /** The catalogue in memory, kept to the database: built when first asked for, and told of every change of a standing. */
 @Injectable()
 export class SearchIndex implements OnApplicationShutdown {
-  private readonly host: SearchHost = __filename.endsWith('.ts') ? new InlineSearchHost() : new ThreadSearchHost();
+  private readonly host: SearchHost = __filename.endsWith('.ts')
+    ? new InlineSearchHost()
+    : new ThreadSearchHost();
   private building?: Promise<{ index: CatalogueIndex; positions: ReadonlyMap<number, number> }>;
 
   constructor(

@@ -1,4 +1,4 @@
-import type { CheckName, Finding } from '../checks/check';
+import type { CheckDefinition, CheckName, Finding } from '../checks/check';
 
 /** How many times a rating passes its demand, by check: the sign of over-specification. */
 export type Excess = Partial<Record<CheckName, number>>;
@@ -13,11 +13,12 @@ export const excessChecks: ReadonlySet<CheckName> = new Set([
 ]);
 
 /** allowance / demand of the met checks that count; a demand of 0 has no ratio. */
-export function excessOf(findings: readonly { check: CheckName; finding: Finding }[]): Excess {
+export function excessOf(findings: readonly { definition: CheckDefinition; finding: Finding }[]): Excess {
   const excess: Excess = {};
-  for (const { check, finding } of findings) {
-    if (excessChecks.has(check) && finding.status === 'met' && finding.margin !== null)
-      excess[check] = finding.margin + 1;
+  for (const { definition, finding } of findings) {
+    if (excessChecks.has(definition.name) && finding.status === 'met' && finding.margin !== null) {
+      excess[definition.name] = finding.margin + 1;
+    }
   }
   return excess;
 }

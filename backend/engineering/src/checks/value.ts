@@ -1,6 +1,7 @@
 import { hasPulses, type Conditions } from '../operating/conditions';
 import type { OperatingState } from '../operating/settle';
 import { budgetOf } from '../budget/budget';
+import { driftAt } from '../deviation/drift';
 import type { Window } from '../duty/window';
 import { formatQuantity } from '../notation/format-quantity';
 import { knownInputs } from './basis';
@@ -12,13 +13,30 @@ export function distanceToEdge(window: Window, nominal: number): number {
   return Math.min((window.upper - nominal) / nominal, (nominal - window.lower) / nominal);
 }
 
+const nothing: readonly string[] = [];
+
 /** Data without which the deviation budget cannot pass a part: tolerance, TCR with an ambient, drift with a life. */
-export function missingForValue(conditions: Conditions, state: OperatingState): string[] {
+export function missingForValue(conditions: Conditions, state: OperatingState): readonly string[] {
+  const missing = missingForBudget(conditions, state);
+  return hasPulses(conditions.requirement) ? [...missing, notComputed('self-heating by pulses')] : missing;
+}
+
+function missingForBudget(conditions: Conditions, state: OperatingState): readonly string[] {
+  const { ratings, requirement } = conditions;
+  const temperature = requirement.duty.ambient !== undefined;
+  const life = requirement.duty.life !== undefined;
+  const complete =
+    ratings.tolerance !== undefined &&
+    (!temperature || ratings.tcr !== undefined) &&
+    (!(temperature || life) || !Number.isNaN(state.hot)) &&
+    (!life ||
+      (ratings.drift !== undefined &&
+        driftAt(ratings.technology, ratings.drift, conditions.hours, state.hot).complete));
+  if (complete) return nothing;
   const essential = new Set(['tolerance', 'temperature', 'drift']);
-  const missing = budgetOf(conditions, state)
+  return budgetOf(conditions, state)
     .filter((line) => line.amount === null && essential.has(line.contribution))
     .flatMap((line) => line.missing);
-  return hasPulses(conditions.requirement) ? [...missing, notComputed('self-heating by pulses')] : missing;
 }
 
 export const valueCheck: CheckDefinition = {

@@ -13,20 +13,21 @@ export function conflictsOfLoad(
   window: { lower: number; upper: number } | undefined,
 ): Conflict[] {
   if (duty.load === undefined || window?.lower === 0) return [];
-  const ohm = (value: number): string => formatQuantity(value, 'resistance');
+  const ohm = (value: number): string =>
+    Number.isFinite(value) ? formatQuantity(value, 'resistance') : 'more than any resistance';
   const lower = window?.lower ?? 0;
   const upper = window?.upper ?? Infinity;
   const atLeast = [
-    { value: load.voltageMin / load.currentMax, pointers: ['/load/voltage/min', '/load/current/max'] },
-    { value: load.voltageMin ** 2 / load.powerMax, pointers: ['/load/voltage/min', '/load/power/max'] },
+    { value: least(load.voltageMin, load.currentMax), pointers: ['/load/voltage/min', '/load/current/max'] },
+    { value: least(load.voltageMin ** 2, load.powerMax), pointers: ['/load/voltage/min', '/load/power/max'] },
     {
       value: lower,
       pointers: duty.window ? ['/window/lower'] : ['/limits/voltage/max', '/limits/current/max'],
     },
   ];
   const atMost = [
-    { value: ratio(load.voltageMax, load.currentMin), pointers: ['/load/voltage/max', '/load/current/min'] },
-    { value: ratio(load.powerMax, load.currentMin ** 2), pointers: ['/load/power/max', '/load/current/min'] },
+    { value: most(load.voltageMax, load.currentMin), pointers: ['/load/voltage/max', '/load/current/min'] },
+    { value: most(load.powerMax, load.currentMin ** 2), pointers: ['/load/power/max', '/load/current/min'] },
     {
       value: upper,
       pointers: duty.window ? ['/window/upper'] : ['/limits/voltage/min', '/limits/current/min'],
@@ -53,8 +54,13 @@ export function conflictsOfLoad(
   return conflicts;
 }
 
-/** A quotient in which nothing divided by nothing sets no bound. */
-function ratio(numerator: number, denominator: number): number {
+/** A quotient as a lower bound: nothing at all, whatever divides it, asks for nothing. */
+function least(numerator: number, denominator: number): number {
+  return numerator === 0 ? 0 : numerator / denominator;
+}
+
+/** A quotient as an upper bound: anything divided by nothing bounds nothing. */
+function most(numerator: number, denominator: number): number {
   return denominator === 0 ? Infinity : numerator / denominator;
 }
 

@@ -73,10 +73,14 @@ export function impliedQuantities(requirement: Requirement): ImpliedQuantities {
   const stated = window && { ...window, upper: finite(window.upper) };
   if (load === undefined) return { window: stated };
   const lower =
-    window?.lower ?? Math.max(load.voltageMin / load.currentMax, load.voltageMin ** 2 / load.powerMax);
+    window?.lower ??
+    Math.max(quotient(load.voltageMin, load.currentMax, 0), quotient(load.voltageMin ** 2, load.powerMax, 0));
   const upper =
     window?.upper ??
-    Math.min(bound(load.voltageMax, load.currentMin), bound(load.powerMax, load.currentMin ** 2));
+    Math.min(
+      quotient(load.voltageMax, load.currentMin, Infinity),
+      quotient(load.powerMax, load.currentMin ** 2, Infinity),
+    );
   const implied =
     window === undefined && (lower > 0 || upper < Infinity) ? { lower, upper: finite(upper) } : stated;
   return {
@@ -93,6 +97,7 @@ export function impliedQuantities(requirement: Requirement): ImpliedQuantities {
   };
 }
 
-function bound(numerator: number, denominator: number): number {
-  return denominator === 0 ? Infinity : numerator / denominator;
+/** A quotient; where both are nothing it bounds nothing, which is 0 from below and Infinity from above. */
+function quotient(numerator: number, denominator: number, unbounded: number): number {
+  return numerator === 0 && denominator === 0 ? unbounded : numerator / denominator;
 }

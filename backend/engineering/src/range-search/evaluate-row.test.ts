@@ -1,5 +1,5 @@
 import * as fc from 'fast-check';
-import { stateOf } from '../assessment/assess';
+import { stateOf } from '../assessment/judge';
 import { standingChecks } from '../checks/list';
 import { DutyConflict } from '../duty/duty-conflict';
 import type { Duty } from '../duty/duty';

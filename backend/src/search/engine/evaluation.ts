@@ -16,6 +16,8 @@ export interface Scratch {
   masks: RowMasks;
   /** For the second and further operating modes of a row. */
   other: RowMasks;
+  /** Of parts with several operating modes, the checks that are unmet in every mode. */
+  unmetInEveryMode: Uint32Array;
 }
 
 export function allocateScratch(length: number): Scratch {
@@ -24,7 +26,7 @@ export function allocateScratch(length: number): Scratch {
     unrated: new Uint32Array(length),
     exact: 0,
   });
-  return { masks: masks(), other: masks() };
+  return { masks: masks(), other: masks(), unmetInEveryMode: new Uint32Array(length) };
 }
 
 /** The checks a requirement asks and how the rows of a catalogue stand under it. */
@@ -33,6 +35,7 @@ export interface Evaluation {
   policy: Policy;
   checks: readonly AskedCheck[];
   masks: RowMasks;
+  unmetInEveryMode: Uint32Array;
 }
 
 /** Ratings of a row in one of its modes, at a resistance that stands for all of them (1 Ω, or 0 for links). */
@@ -75,7 +78,7 @@ export function evaluateRows(
   scratch.other.exact = 0;
   for (const row of rows) evaluateModes(index, row, requirement, policy, checks, scratch, standing);
   scratch.masks.exact += scratch.other.exact;
-  return { requirement, policy, checks, masks: scratch.masks };
+  return { requirement, policy, checks, masks: scratch.masks, unmetInEveryMode: scratch.unmetInEveryMode };
 }
 
 function evaluateModes(
@@ -84,7 +87,7 @@ function evaluateModes(
   requirement: Requirement,
   policy: Policy,
   checks: readonly AskedCheck[],
-  { masks, other }: Scratch,
+  { masks, other, unmetInEveryMode }: Scratch,
   standing: Uint32Array,
 ): void {
   const { columns } = index;
@@ -93,6 +96,10 @@ function evaluateModes(
   modes.forEach((conditions, mode) => {
     const into = mode === 0 ? masks : other;
     evaluateRow(conditions, checks, columns.resistance, from, to, into);
+    for (let position = from; position < to; position += 1) {
+      const common = mode === 0 ? ~0 : (unmetInEveryMode[position] ?? 0);
+      unmetInEveryMode[position] = common & (into.unmet[position] ?? 0);
+    }
     if (mode > 0) keepBetterMode(masks, other, from, to);
   });
   for (let position = from; position < to; position += 1) {
@@ -102,6 +109,7 @@ function evaluateModes(
       columns.secondSource[position] ?? 0,
     );
     masks.unmet[position] = (masks.unmet[position] ?? 0) | (standing[key] ?? 0);
+    unmetInEveryMode[position] = (unmetInEveryMode[position] ?? 0) | (standing[key] ?? 0);
   }
 }
 

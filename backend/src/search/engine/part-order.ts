@@ -1,14 +1,10 @@
 import { totalExcess, excessOf } from '@resistry/engineering/assessment/excess';
-import { findingsOf, stateOf } from '@resistry/engineering/assessment/assess';
-import { verdictOf, compareVerdicts } from '@resistry/engineering/assessment/verdict';
-import type { CheckName, Finding } from '@resistry/engineering/checks/check';
-import { standingChecks } from '@resistry/engineering/checks/list';
-import { settle } from '@resistry/engineering/operating/settle';
-import type { Conditions } from '@resistry/engineering/operating/conditions';
+import { judge } from '@resistry/engineering/assessment/judge';
 import { approvals, type Approval } from '@resistry/engineering/ratings/technology';
 import type { CatalogueRow } from '../index/catalogue-columns';
 import type { CatalogueIndex } from '../index/catalogue-index';
-import { conditionsOfRow, type Evaluation } from './evaluation';
+import { candidateAt } from './candidate-at';
+import type { Evaluation } from './evaluation';
 import { rowOfPosition } from './row-of-position';
 import type { SortColumn } from './search-plan';
 
@@ -26,7 +22,6 @@ const preferenceByCode = approvals.map((approval) => preference[approval]);
 /** Reads the sort keys of single parts; what has to be assessed for one is assessed once. */
 export class PartOrder {
   private readonly excesses = new Map<number, { excess: number; margin: number }>();
-  private readonly conditions = new Map<CatalogueRow, Conditions[]>();
 
   constructor(
     private readonly index: CatalogueIndex,
@@ -100,7 +95,8 @@ export class PartOrder {
   private assessed(position: number): { excess: number; margin: number } {
     const known = this.excesses.get(position);
     if (known !== undefined) return known;
-    const findings = this.bestMode(position);
+    const { requirement, policy } = this.evaluation;
+    const { findings } = judge(candidateAt(this.index, position), requirement, policy);
     const margins = findings.map(({ finding }) => finding.margin).filter((margin) => margin !== null);
     const found = {
       excess: totalExcess(excessOf(findings)),
@@ -108,23 +104,5 @@ export class PartOrder {
     };
     this.excesses.set(position, found);
     return found;
-  }
-
-  private bestMode(position: number): { check: CheckName; finding: Finding }[] {
-    const row = rowOfPosition(this.index.rows, position);
-    const { requirement, policy } = this.evaluation;
-    let modes = this.conditions.get(row);
-    if (modes === undefined) {
-      modes = conditionsOfRow(this.index, row, requirement, policy);
-      this.conditions.set(row, modes);
-    }
-    const resistance = this.index.columns.resistance[position] ?? NaN;
-    const found = modes.map((conditions) => {
-      const state = row.isLink ? stateOf(conditions) : settle(conditions, resistance, resistance);
-      return findingsOf(conditions, state, undefined).filter(({ check }) => !standingChecks.has(check));
-    });
-    const verdict = (findings: readonly { finding: Finding }[]): ReturnType<typeof verdictOf> =>
-      verdictOf(findings.map(({ finding }) => finding.status));
-    return found.reduce((best, next) => (compareVerdicts(verdict(next), verdict(best)) < 0 ? next : best));
   }
 }

@@ -64,6 +64,7 @@ function collect(
   const tally = new Tally(evaluation.checks);
   const accepts = partFilter(index, plan.filters);
   const misses: Miss[] = [];
+  const { unmetInEveryMode } = evaluation;
   const { unmet, unrated } = evaluation.masks;
   const numbers = new Set<number>();
   for (const { from, to } of rows) {
@@ -76,14 +77,17 @@ function collect(
       }
       const mask = unmet[position] ?? 0;
       tally.add(position, mask, unrated[position] ?? 0);
-      if (plan.relaxations && mask !== 0) misses.push({ unit: [position], unmet: mask });
+      if (plan.relaxations && mask !== 0)
+        misses.push({ unit: [position], unmet: unmetInEveryMode[position] ?? 0 });
     }
   }
   for (const number of numbers) {
     const unit = judgedSources(index, number);
     const masks = masksOfNumber(evaluation, unit);
     tally.add(number, masks.unmet, masks.unrated);
-    if (plan.relaxations && masks.unmet !== 0) misses.push({ unit, unmet: masks.unmet });
+    if (!plan.relaxations || masks.unmet === 0) continue;
+    const common = unit.reduce((bits, position) => bits | (unmetInEveryMode[position] ?? 0), 0);
+    misses.push({ unit, unmet: common });
   }
   return { tally, misses };
 }

@@ -20,7 +20,10 @@ port.on('message', (message: ToSearchThread) => {
   );
 });
 
-async function answer(id: number, search: () => ReturnType<InlineSearchHost['search']>): Promise<FromSearchThread> {
+async function answer(
+  id: number,
+  search: () => ReturnType<InlineSearchHost['search']>,
+): Promise<FromSearchThread> {
   try {
     return { id, ok: true, result: await search() };
   } catch (error) {

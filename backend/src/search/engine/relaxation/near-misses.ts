@@ -1,7 +1,7 @@
 import type { AskedCheck } from '@resistry/engineering/range-search/asked-checks';
 import type { Unit } from './retrial';
 
-/** A unit that the search removed, with the checks that removed it. */
+/** A unit that the search removed, with the checks that are unmet in every operating mode. */
 export interface Miss {
   unit: Unit;
   unmet: number;

@@ -33,7 +33,7 @@ export function relaxationsOf(
     missesDependingOn(pointer.startsWith('/limits') ? misses : inWindow, bitsDependingOn(checks, pointer));
   const found: (Relaxation | undefined)[] = [];
   if (valueBit !== 0 && !requirement.link) {
-    const kept = misses.filter(({ unmet }) => unmet === valueBit).map(({ unit }) => unit);
+    const kept = misses.filter(({ unmet }) => (unmet & ~valueBit) === 0).map(({ unit }) => unit);
     const lifeOf = lifeIntervals(index, evaluation);
     found.push(
       relaxWindow(duty, 'lower', kept, lifeOf, retrial),
@@ -55,7 +55,10 @@ function isInside(window: { lower: number; upper: number } | undefined, resistan
   return window === undefined || (resistance >= window.lower && resistance <= window.upper);
 }
 
-/** The interval over life of a unit: of all its positions together, in each row's first operating mode. */
+/**
+ * The narrowest interval over life that each position of a unit has in any operating mode, all positions together: no
+ * narrower window can hold the unit.
+ */
 function lifeIntervals(index: CatalogueIndex, { requirement, policy }: Evaluation): LifeInterval {
   const conditions = new Map<number, ReturnType<typeof conditionsOfRow>>();
   return (unit) => {
@@ -63,15 +66,15 @@ function lifeIntervals(index: CatalogueIndex, { requirement, policy }: Evaluatio
     let high = 0;
     for (const position of unit) {
       const row = rowOfPosition(index.rows, position);
+      if (row.isLink) return { low: 0, high: Infinity };
       const modes = conditions.get(row.from) ?? conditionsOfRow(index, row, requirement, policy);
       conditions.set(row.from, modes);
       const resistance = index.columns.resistance[position] ?? NaN;
-      const first = modes[0];
-      if (first === undefined || row.isLink) return { low: 0, high: Infinity };
-      const state = settle(first, resistance, resistance);
-      if (!state.settled) return { low: 0, high: Infinity };
-      low = Math.min(low, state.low);
-      high = Math.max(high, state.high);
+      const states = modes
+        .map((mode) => settle(mode, resistance, resistance))
+        .filter(({ settled }) => settled);
+      low = Math.min(low, Math.max(0, ...states.map((state) => state.low)));
+      high = Math.max(high, Math.min(Infinity, ...states.map((state) => state.high)));
     }
     return { low, high };
   };
