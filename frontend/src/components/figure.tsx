@@ -1,4 +1,3 @@
-import { chakra } from '@chakra-ui/react';
 import { formatQuantityParts } from '@resistry/engineering/notation/format-quantity-parts';
 import type { Quantity } from '@resistry/engineering/notation/quantity';
 
@@ -12,32 +11,27 @@ export interface FigureProps {
   aligned?: boolean;
 }
 
-const Unit = chakra('span', {
-  base: { color: 'fg.muted', fontWeight: 'normal', fontSize: '0.92em' },
-});
-
 /** A number with its unit, the unit lighter than the figure. */
 export function Figure({ value, quantity, significantDigits = 4, aligned = false }: FigureProps) {
-  if (value === null || value === undefined) return <chakra.span color="fg.muted">not stated</chakra.span>;
+  if (value === null || value === undefined) return <span className="not-stated">not stated</span>;
   const { figure, unit } = formatQuantityParts(value, quantity, { significantDigits });
+  const unitShown = unit !== '' && <span className="unit"> {unit}</span>;
   if (!aligned) {
     return (
-      <chakra.span whiteSpace="nowrap">
+      <span className="figure">
         {figure}
-        {unit !== '' && <Unit> {unit}</Unit>}
-      </chakra.span>
+        {unitShown}
+      </span>
     );
   }
   const point = figure.indexOf('.');
-  const whole = point < 0 ? figure : figure.slice(0, point);
-  const rest = point < 0 ? '' : figure.slice(point);
   return (
-    <chakra.span display="inline-grid" gridTemplateColumns="1fr 4.9ch" width="full" whiteSpace="nowrap">
-      <chakra.span textAlign="right">{whole}</chakra.span>
-      <chakra.span textAlign="left">
-        {rest}
-        {unit !== '' && <Unit> {unit}</Unit>}
-      </chakra.span>
-    </chakra.span>
+    <span className="figure aligned">
+      <span>{point < 0 ? figure : figure.slice(0, point)}</span>
+      <span>
+        {point < 0 ? '' : figure.slice(point)}
+        {unitShown}
+      </span>
+    </span>
   );
 }

@@ -1,4 +1,3 @@
-import { chakra } from '@chakra-ui/react';
 import type { Status } from '@resistry/engineering/checks/check';
 import { useId } from 'react';
 import { demandPosition, highestRatio, lowestRatio, positionOf, tickRatios } from './margin-scale';
@@ -12,32 +11,31 @@ export interface MarginRuleProps {
 const trackHeight = 12;
 const middle = trackHeight / 2;
 
-const Rule = chakra('svg', {
-  base: {
-    width: 'full',
-    height: '0.75rem',
-    overflow: 'visible',
-    '& rect': { transition: 'x 180ms, width 180ms' },
-  },
-});
-
 function Track() {
   return (
-    <chakra.g color="border.track" stroke="currentColor">
+    <g className="track" stroke="currentColor">
       <line x1="0" x2="100%" y1={middle} y2={middle} strokeWidth={2} />
       {tickRatios.map((ratio) => {
         const at = `${positionOf(ratio)}%`;
         return <line key={ratio} x1={at} x2={at} y1={middle - 3} y2={middle + 3} strokeWidth={1} />;
       })}
       <line x1="100%" x2="100%" y1={middle - 3} y2={middle + 3} strokeWidth={1} />
-    </chakra.g>
+    </g>
   );
 }
 
 function DemandTick() {
   const at = `${demandPosition}%`;
   return (
-    <chakra.line x1={at} x2={at} y1={0} y2={trackHeight} color="fg" stroke="currentColor" strokeWidth={1.6} />
+    <line
+      className="demand"
+      x1={at}
+      x2={at}
+      y1={0}
+      y2={trackHeight}
+      stroke="currentColor"
+      strokeWidth={1.6}
+    />
   );
 }
 
@@ -49,17 +47,17 @@ function Allowance({ status, margin }: { status: 'met' | 'unmet'; margin: number
   const bar = { x: `${from}%`, width: `${Math.abs(end - demandPosition)}%`, y: middle - 3, height: 6 };
   if (status === 'met') {
     return (
-      <chakra.g color="met">
+      <g data-status="met">
         <rect {...bar} fill="currentColor" />
         {ratio > highestRatio && <BeyondEnd at="100%" direction={1} />}
-      </chakra.g>
+      </g>
     );
   }
   return (
-    <chakra.g color="unmet">
+    <g data-status="unmet">
       <rect {...bar} fill="none" stroke="currentColor" strokeWidth={1.4} />
       {ratio < lowestRatio && <BeyondEnd at="0" direction={-1} />}
-    </chakra.g>
+    </g>
   );
 }
 
@@ -76,7 +74,7 @@ function BeyondEnd({ at, direction }: { at: string; direction: 1 | -1 }) {
 function Unrated() {
   const pattern = useId();
   return (
-    <chakra.g color="unrated">
+    <g data-status="unrated">
       <defs>
         <pattern
           id={pattern}
@@ -89,21 +87,21 @@ function Unrated() {
         </pattern>
       </defs>
       <rect x="0" width="100%" y={middle - 3} height={6} fill={`url(#${pattern})`} />
-    </chakra.g>
+    </g>
   );
 }
 
 /** A check without a number: a tick mark or a cross where the demand stands. */
 function YesOrNo({ status }: { status: 'met' | 'unmet' }) {
   return (
-    <chakra.svg x={`${demandPosition}%`} overflow="visible" color={status}>
+    <svg x={`${demandPosition}%`} overflow="visible" data-status={status}>
       <path
         d={status === 'met' ? 'M-5 6.5 -1.5 10 5.5 2' : 'M-4.5 1.5 4.5 10.5M4.5 1.5 -4.5 10.5'}
         fill="none"
         stroke="currentColor"
         strokeWidth={1.8}
       />
-    </chakra.svg>
+    </svg>
   );
 }
 
@@ -113,16 +111,14 @@ function YesOrNo({ status }: { status: 'met' | 'unmet' }) {
  */
 export function MarginRule({ status, margin }: MarginRuleProps) {
   return (
-    <Rule aria-hidden="true" data-status={status}>
+    <svg className="margin-rule" aria-hidden="true">
       {status === 'unrated' ? (
         <>
           <Unrated />
           <DemandTick />
         </>
       ) : margin === null ? (
-        <>
-          <YesOrNo status={status} />
-        </>
+        <YesOrNo status={status} />
       ) : (
         <>
           <Track />
@@ -130,6 +126,6 @@ export function MarginRule({ status, margin }: MarginRuleProps) {
           <DemandTick />
         </>
       )}
-    </Rule>
+    </svg>
   );
 }

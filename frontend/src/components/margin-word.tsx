@@ -1,4 +1,3 @@
-import { chakra } from '@chakra-ui/react';
 import type { Status } from '@resistry/engineering/checks/check';
 import { statusWords } from '../wording/check-words';
 import { marginWords, shortfallWords } from '../wording/percent';
@@ -16,12 +15,8 @@ function words({ status, margin }: MarginWordProps): string {
 
 export function MarginWord({ status, margin }: MarginWordProps) {
   return (
-    <chakra.span
-      color={status === 'met' ? 'fg' : status}
-      fontWeight={status === 'unrated' ? 'normal' : 'semibold'}
-      whiteSpace="nowrap"
-    >
+    <span className="margin-word" data-status={status}>
       {words({ status, margin })}
-    </chakra.span>
+    </span>
   );
 }

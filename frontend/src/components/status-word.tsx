@@ -1,4 +1,3 @@
-import { chakra } from '@chakra-ui/react';
 import type { Status } from '@resistry/engineering/checks/check';
 import type { Approval, SupplyStatus } from '@resistry/engineering/ratings/technology';
 import type { ReactNode } from 'react';
@@ -11,23 +10,26 @@ export type StatusWordProps =
   | { kind: 'supply'; status: SupplyStatus }
   | { kind: 'verdict'; status: Status };
 
+/** What a colour says here; see row-styles. */
+type Tone = 'preferred' | 'met' | 'unmet' | 'unrated' | 'caution' | 'quiet';
+
 interface Appearance {
   shape: ReactNode;
   word: string;
-  colour: string;
+  tone: Tone;
   strong: boolean;
 }
 
-const approvalColours: Record<Approval, string> = {
+const approvalTones: Record<Approval, Tone> = {
   preferred: 'preferred',
   approved: 'preferred',
   'in-review': 'caution',
-  draft: 'fg.muted',
+  draft: 'quiet',
   restricted: 'caution',
   withdrawn: 'unmet',
 };
 
-const supplyColours: Record<SupplyStatus, string> = {
+const supplyTones: Record<SupplyStatus, Tone> = {
   active: 'met',
   'not-recommended': 'caution',
   'last-time-buy': 'caution',
@@ -40,21 +42,21 @@ function appearance(props: StatusWordProps): Appearance {
       return {
         shape: approvalShapes[props.status],
         word: approvalWords[props.status],
-        colour: approvalColours[props.status],
+        tone: approvalTones[props.status],
         strong: props.status === 'preferred',
       };
     case 'supply':
       return {
         shape: supplyShapes[props.status],
         word: supplyWords[props.status],
-        colour: supplyColours[props.status],
+        tone: supplyTones[props.status],
         strong: false,
       };
     case 'verdict':
       return {
         shape: verdictShapes[props.status],
         word: statusWords[props.status],
-        colour: props.status,
+        tone: props.status,
         strong: props.status === 'unmet',
       };
   }
@@ -62,13 +64,13 @@ function appearance(props: StatusWordProps): Appearance {
 
 /** The state of a thing as shape and word; the colour only repeats them. */
 export function StatusWord(props: StatusWordProps) {
-  const { shape, word, colour, strong } = appearance(props);
+  const { shape, word, tone, strong } = appearance(props);
   return (
-    <chakra.span display="inline-flex" alignItems="center" gap={1.5} whiteSpace="nowrap">
-      <chakra.svg viewBox="0 0 12 12" width="0.75rem" height="0.75rem" color={colour} aria-hidden="true">
+    <span className="status-word" data-tone={tone} data-strong={strong || undefined}>
+      <svg viewBox="0 0 12 12" aria-hidden="true">
         {shape}
-      </chakra.svg>
-      <chakra.span fontWeight={strong ? 'semibold' : 'normal'}>{word}</chakra.span>
-    </chakra.span>
+      </svg>
+      <span>{word}</span>
+    </span>
   );
 }

@@ -2,6 +2,7 @@ import { createSystem, defaultBaseConfig, defineConfig } from '@chakra-ui/react'
 import { globalStyles } from './global-styles';
 import { dialogRecipe } from './recipes/dialog';
 import { menuRecipe, popoverRecipe } from './recipes/menu';
+import { rowStyles } from './row-styles';
 import { semanticTokens } from './semantic-tokens';
 import { tokens } from './tokens';
 
@@ -12,7 +13,7 @@ export const system = createSystem(
     cssVarsPrefix: 'resistry',
     cssVarsRoot: ':where(html)',
     preflight: false,
-    globalCss: globalStyles,
+    globalCss: { ...globalStyles, ...rowStyles },
     theme: {
       breakpoints: { sm: '30rem', md: '48rem', lg: '64rem', xl: '80rem' },
       keyframes: {

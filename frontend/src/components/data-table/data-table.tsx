@@ -1,5 +1,14 @@
 import { useVirtualizer } from '@tanstack/react-virtual';
-import { type KeyboardEvent, type RefObject, useCallback, useEffect, useId, useRef, useState } from 'react';
+import {
+  type CSSProperties,
+  type KeyboardEvent,
+  type RefObject,
+  useCallback,
+  useEffect,
+  useId,
+  useRef,
+  useState,
+} from 'react';
 import type { DataColumn, Sort } from './data-column';
 import { tabSeparated } from './delimited-text';
 import { type GridPosition, nextPosition } from './grid-position';
@@ -31,19 +40,18 @@ export interface DataTableProps<Row extends object> {
 
 /** A table of as many rows as the server has, of which only those in sight exist. */
 export function DataTable<Row extends object>(props: DataTableProps<Row>) {
-  const {
-    label,
-    columns,
-    rowCount,
-    rowAt,
-    rowKey,
-    onVisible,
-    rowHeight = 48,
-    sort,
-    onSortBy,
-    onOpen,
-    scrollRef,
-  } = props;
+  const { rowHeight = 48 } = props;
+  // The frame with its styles stays out of what is drawn while scrolling.
+  return (
+    <TableFrame style={{ '--row-height': `${rowHeight}px` } as CSSProperties}>
+      <VirtualTable {...props} rowHeight={rowHeight} />
+    </TableFrame>
+  );
+}
+
+function VirtualTable<Row extends object>(props: DataTableProps<Row> & { rowHeight: number }) {
+  const { label, columns, rowCount, rowAt, rowKey, onVisible, rowHeight, sort, onSortBy, onOpen, scrollRef } =
+    props;
   const gridId = useId();
   const bodyRef = useRef<HTMLTableSectionElement>(null);
   const [active, setActive] = useState<GridPosition>({ row: 0, column: 0 });
@@ -52,7 +60,7 @@ export function DataTable<Row extends object>(props: DataTableProps<Row>) {
     count: rowCount,
     getScrollElement: () => scrollRef.current,
     estimateSize: () => rowHeight,
-    overscan: 12,
+    overscan: 8,
     scrollMargin,
     // The head covers the first row that scrolls under it.
     scrollPaddingStart: rowHeight,
@@ -67,6 +75,13 @@ export function DataTable<Row extends object>(props: DataTableProps<Row>) {
   useEffect(() => {
     if (last >= first) onVisible?.(first, last);
   }, [first, last, onVisible]);
+
+  // Rows keep one handler for ever: a new one with each page of data would draw all of them again.
+  const openRef = useRef(onOpen);
+  useEffect(() => {
+    openRef.current = onOpen;
+  }, [onOpen]);
+  const open = useCallback((index: number) => openRef.current(index), []);
 
   const point = useCallback(
     (atRow: number, atColumn: number) => setActive({ row: atRow, column: atColumn }),
@@ -89,7 +104,7 @@ export function DataTable<Row extends object>(props: DataTableProps<Row>) {
       if (data !== undefined) void navigator.clipboard.writeText(tabSeparated(columns, [data]));
       return;
     }
-    const page = Math.max(1, last - first - 12);
+    const page = Math.max(1, last - first - 16);
     const next = nextPosition(event, { row, column }, { rows: rowCount, columns: columns.length, page });
     if (next === undefined) return;
     event.preventDefault();
@@ -105,41 +120,39 @@ export function DataTable<Row extends object>(props: DataTableProps<Row>) {
   const before = (shown[0]?.start ?? scrollMargin) - scrollMargin;
   const after = virtualizer.getTotalSize() - ((shown[shown.length - 1]?.end ?? scrollMargin) - scrollMargin);
   return (
-    <TableFrame style={{ '--row-height': `${rowHeight}px` } as React.CSSProperties}>
-      <table
-        role="grid"
-        aria-label={label}
-        aria-rowcount={rowCount + 1}
-        aria-colcount={columns.length}
-        aria-activedescendant={rowCount > 0 ? cellId(gridId, row, column) : undefined}
-        tabIndex={0}
-        onKeyDown={press}
-      >
-        <colgroup>
-          {columns.map((each) => (
-            <col key={each.id} style={{ width: each.width }} />
-          ))}
-        </colgroup>
-        <TableHead columns={columns} sort={sort} onSortBy={onSortBy} />
-        <tbody ref={bodyRef}>
-          <Spacer height={before} span={columns.length} />
-          {shown.map(({ index }) => (
-            <TableRow
-              key={keyAt(index)}
-              row={rowAt(index)}
-              index={index}
-              columns={columns}
-              gridId={gridId}
-              activeColumn={index === row ? column : -1}
-              selected={index === props.selectedIndex}
-              onOpen={onOpen}
-              onPoint={point}
-            />
-          ))}
-          <Spacer height={after} span={columns.length} />
-        </tbody>
-      </table>
-    </TableFrame>
+    <table
+      role="grid"
+      aria-label={label}
+      aria-rowcount={rowCount + 1}
+      aria-colcount={columns.length}
+      aria-activedescendant={rowCount > 0 ? cellId(gridId, row, column) : undefined}
+      tabIndex={0}
+      onKeyDown={press}
+    >
+      <colgroup>
+        {columns.map((each) => (
+          <col key={each.id} style={{ width: each.width }} />
+        ))}
+      </colgroup>
+      <TableHead columns={columns} sort={sort} onSortBy={onSortBy} />
+      <tbody ref={bodyRef}>
+        <Spacer height={before} span={columns.length} />
+        {shown.map(({ index }) => (
+          <TableRow
+            key={keyAt(index)}
+            row={rowAt(index)}
+            index={index}
+            columns={columns}
+            gridId={gridId}
+            activeColumn={index === row ? column : -1}
+            selected={index === props.selectedIndex}
+            onOpen={open}
+            onPoint={point}
+          />
+        ))}
+        <Spacer height={after} span={columns.length} />
+      </tbody>
+    </table>
   );
 }
 

@@ -4,13 +4,13 @@ import type { BodyStyle, DrawnBody } from './drawn-body';
 /** What is known of a part's body; sizes in m, Ω, fraction, 1/K. */
 export interface KnownBody {
   style: BodyStyle;
-  length?: number | null;
-  width?: number | null;
+  length?: number;
+  width?: number;
   /** Inch code with the metric one where there is one: 1206/3216M. */
   sizeCode: string;
   resistance: number;
-  tolerance?: number | null;
-  tcr?: number | null;
+  tolerance?: number;
+  tcr?: number;
 }
 
 const markedStyle: Record<BodyStyle, MarkedBody['style']> = {
@@ -26,15 +26,15 @@ const markedStyle: Record<BodyStyle, MarkedBody['style']> = {
 /** The body to draw, or undefined where its proportion is not known: an invented one would be a wrong picture. */
 export function drawnBodyOf(part: KnownBody): DrawnBody | undefined {
   const { length, width } = part;
-  if (typeof length !== 'number' || typeof width !== 'number') return undefined;
+  if (length === undefined || width === undefined) return undefined;
   return {
     style: part.style,
     length,
     width,
     marking: bodyMarking({
       resistance: part.resistance,
-      tolerance: part.tolerance ?? undefined,
-      tcr: part.tcr ?? undefined,
+      tolerance: part.tolerance,
+      tcr: part.tcr,
       style: markedStyle[part.style],
       size: part.sizeCode,
       isLink: part.resistance === 0,

@@ -1,4 +1,3 @@
-import { chakra } from '@chakra-ui/react';
 import type { BodyMarking } from '@resistry/engineering/marking/body-marking';
 import { type BodyStyle, type DrawnBody, type Frame, bodyFrame, markingWords } from './drawn-body';
 import { CementedBody, ChipBody, HousedBody, RadialBody, StripBody } from './flat-bodies';
@@ -36,13 +35,13 @@ export function DrawnPart({ body, size = 'row', labelled = false }: DrawnPartPro
     ? { role: 'img', 'aria-label': markingWords(body.marking) }
     : { 'aria-hidden': true };
   return (
-    <chakra.svg
+    <svg
       viewBox={`0 0 ${box.width} ${box.height}`}
       width={`${box.width}px`}
       height={`${box.height}px`}
       {...label}
     >
       <Body frame={bodyFrame(body, box)} marking={body.marking} />
-    </chakra.svg>
+    </svg>
   );
 }

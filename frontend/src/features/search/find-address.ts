@@ -3,8 +3,16 @@ import { readDutyAddress, writeDuty } from './duty/duty-address';
 import type { DutyText } from './duty/duty-text';
 import type { Show } from './requests/search-request';
 
-/** Filters as they stand in an address: lists by commas, limits as typed. */
-export const filterNames = ['manufacturer', 'family', 'technology', 'size', 'series', 'certificate'] as const;
+/** Filters as they stand in an address: ids, codes or figures as typed (1 %, 50 ppm/K), by commas. */
+export const filterNames = [
+  'manufacturer',
+  'family',
+  'technology',
+  'size',
+  'series',
+  'tolerance',
+  'tcr',
+] as const;
 export type FilterName = (typeof filterNames)[number];
 
 /** Everything Find shows, as its address holds it. */
@@ -13,9 +21,8 @@ export interface FindState {
   /** Part number, family or manufacturer. */
   text: string;
   filters: Record<FilterName, string[]>;
-  /** As typed: 1 %, 50 ppm/K. */
-  tolerance: string;
-  tcr: string;
+  /** Only parts with a safety certificate in date. */
+  certificate: boolean;
   show: Show;
   grouped: boolean;
   sort?: Sort;
@@ -43,10 +50,10 @@ export function readFind(address: URLSearchParams): FindState {
       technology: split(address.get('technology')),
       size: split(address.get('size')),
       series: split(address.get('series')),
-      certificate: split(address.get('certificate')),
+      tolerance: split(address.get('tolerance')),
+      tcr: split(address.get('tcr')),
     },
-    tolerance: address.get('tolerance') ?? '',
-    tcr: address.get('tcr') ?? '',
+    certificate: address.get('certificate') === 'yes',
     show: address.get('show') === 'met-and-unrated' ? 'met-and-unrated' : 'met',
     grouped: address.get('group') === 'company',
     sort: readSort(address.get('sort')),
@@ -61,8 +68,7 @@ export function writeFind(state: FindState): URLSearchParams {
   for (const name of filterNames) {
     if (state.filters[name].length > 0) address.set(name, state.filters[name].join(','));
   }
-  if (state.tolerance.trim() !== '') address.set('tolerance', state.tolerance.trim());
-  if (state.tcr.trim() !== '') address.set('tcr', state.tcr.trim());
+  if (state.certificate) address.set('certificate', 'yes');
   if (state.show !== 'met') address.set('show', state.show);
   if (state.grouped) address.set('group', 'company');
   if (state.sort !== undefined)

@@ -31,10 +31,13 @@ beforeEach(() => {
     }
     if (request.url === '/parts/search') {
       asked.push(JSON.parse(String(request.data)) as Asked);
-      const items = [{ part: examplePart(), assessment: exampleAssessment() }];
+      const items = [{ part: examplePart(), assessment: exampleAssessment(), overSpecification: [] }];
       const knockouts = [{ check: 'value', removes: 41_208, removesAlone: 96 }];
       const relaxations = [{ field: '/window/upper', to: 5000, gains: 44 }];
-      return { status: 200, data: { total: 1, unrated: 6, items, knockouts, relaxations } };
+      return {
+        status: 200,
+        data: { total: 1, unrated: 6, byApproval: { preferred: 1 }, items, knockouts, relaxations },
+      };
     }
     if (request.url === '/parts/122')
       return { status: 200, data: { ...examplePart(), modes: [], version: 1 } };

@@ -1,25 +1,32 @@
 import type { Duty } from '@resistry/engineering/duty/duty';
 import { parseQuantity } from '@resistry/engineering/notation/parse-quantity';
+import { technologies } from '@resistry/engineering/ratings/technology';
 import type { FindState } from './find-address';
 import { type Filters, type SearchRequest, sortOf } from './requests/search-request';
 
-const some = (values: string[]): string[] | undefined => (values.length > 0 ? values : undefined);
+const some = <Value>(values: Value[]): Value[] | undefined => (values.length > 0 ? values : undefined);
 
-/** The filters as the server takes them, or undefined while a limit cannot be read. */
-export function filtersOf(state: FindState): Filters | undefined {
-  const tolerance = state.tolerance.trim() === '' ? undefined : parseQuantity(state.tolerance, 'tolerance');
-  const tcr = state.tcr.trim() === '' ? undefined : parseQuantity(state.tcr, 'temperature-coefficient');
-  if (tolerance?.ok === false || tcr?.ok === false) return undefined;
+const ids = (texts: string[]): number[] => texts.map(Number).filter((id) => Number.isInteger(id) && id > 0);
+
+/** Figures that can be read; one from a tampered link that cannot be is left out, as unknown words are. */
+const figures = (texts: string[], quantity: 'tolerance' | 'temperature-coefficient'): number[] =>
+  texts.flatMap((text) => {
+    const parsed = parseQuantity(text, quantity);
+    return parsed.ok ? [parsed.value] : [];
+  });
+
+/** The filters as the server takes them. */
+export function filtersOf({ text, filters, certificate }: FindState): Filters {
   return {
-    text: state.text === '' ? undefined : state.text,
-    manufacturers: some(state.filters.manufacturer),
-    families: some(state.filters.family),
-    technologies: some(state.filters.technology),
-    sizes: some(state.filters.size),
-    series: some(state.filters.series),
-    certificates: some(state.filters.certificate),
-    tolerance: tolerance?.value,
-    tcr: tcr?.value,
+    text: text === '' ? undefined : text,
+    manufacturers: some(ids(filters.manufacturer)),
+    families: some(ids(filters.family)),
+    technologies: some(technologies.filter((technology) => filters.technology.includes(technology))),
+    sizes: some(filters.size),
+    series: some(filters.series),
+    tolerances: some(figures(filters.tolerance, 'tolerance')),
+    tcrs: some(figures(filters.tcr, 'temperature-coefficient')),
+    certificate: certificate ? true : undefined,
   };
 }
 
@@ -32,12 +39,11 @@ function policyOf(chosen: string | undefined): SearchRequest['policy'] {
 
 /** The question that Find asks; undefined while something typed cannot be read. */
 export function requestOf(state: FindState, duty: Duty | undefined): SearchRequest | undefined {
-  const filters = filtersOf(state);
-  if (duty === undefined || filters === undefined) return undefined;
+  if (duty === undefined) return undefined;
   return {
     duty,
     policy: policyOf(state.duty.policy),
-    filters,
+    filters: filtersOf(state),
     show: state.show,
     group: state.grouped ? 'company' : undefined,
     sort: sortOf(state.sort),

@@ -1,26 +1,41 @@
-import type { Approval, SupplyStatus, Technology } from '@resistry/engineering/ratings/technology';
+import type { Approval, Mounting, SupplyStatus, Technology } from '@resistry/engineering/ratings/technology';
 import type { AnsweredCheck } from '../../components/assessment/answered-assessment';
 import type { BodyStyle } from '../../components/drawn-part/drawn-body';
 
-/** A part as a search lists it. SI values; an absent or null one is not stated by the datasheet. */
+interface Named {
+  id: number;
+  code: string;
+  name: string;
+}
+
+/** A part as lists show it. SI values; what is absent is not stated by the datasheet. */
 export interface SearchPart {
   id: number;
   manufacturerPartNumber: string;
-  companyPartNumber?: string | null;
-  manufacturer: { id: number; name: string };
-  family: { id: number; code: string; name: string };
+  companyPartNumber?: { id: number; number: string };
+  manufacturer: Named;
+  family: Named;
   technology: Technology;
-  size: { code: string; metricCode?: string | null };
-  body?: { style: BodyStyle; length?: number | null; width?: number | null; height?: number | null } | null;
+  size: { id: number; code: string; metricCode?: string };
+  bodyStyle: BodyStyle;
+  /** m */
+  body?: { length: number; width: number; height: number };
+  mounting?: Mounting;
   /** Ω; 0 for a zero-ohm link. */
   resistance: number;
-  tolerance?: number | null;
-  tcr?: number | null;
+  tolerance?: number;
+  tcr?: number;
+  ratedDissipation?: number;
   approval: Approval;
   supply: SupplyStatus;
   /** € a piece at 1,000, the lowest of the offers in force. */
-  unitPrice?: number | null;
+  unitPrice?: number;
+  secondSource: boolean;
 }
+
+/** The company's number, or the manufacturer's where it has none. */
+export const leadingNumber = (part: SearchPart): string =>
+  part.companyPartNumber?.number ?? part.manufacturerPartNumber;
 
 /** The check that leaves least room, which is the one to look at first. */
 export function tightestCheck(checks: readonly AnsweredCheck[]): AnsweredCheck | undefined {

@@ -1,4 +1,5 @@
 import type { CheckName } from '@resistry/engineering/checks/check';
+import type { Approval } from '@resistry/engineering/ratings/technology';
 import { keepPreviousData, queryOptions } from '@tanstack/react-query';
 import { client } from '../../../api/client';
 import type { AnsweredAssessment } from '../../../components/assessment/answered-assessment';
@@ -9,7 +10,10 @@ export interface SearchItem {
   part: SearchPart;
   assessment: AnsweredAssessment;
   /** With `group: 'company'`: the approved sources under the number, each with its own assessment. */
+  companyPartNumber?: { id: number; number: string };
   sources?: { part: SearchPart; assessment: AnsweredAssessment }[];
+  /** What it has far more of than is asked, in words, the largest first. */
+  overSpecification: string[];
 }
 
 export interface Knockout {
@@ -29,6 +33,8 @@ export interface Relaxation {
 export interface SearchAnswer {
   total: number;
   unrated: number;
+  /** The total by approval. */
+  byApproval: Partial<Record<Approval, number>>;
   items: SearchItem[];
   knockouts: Knockout[];
   relaxations: Relaxation[];

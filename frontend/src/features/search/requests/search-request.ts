@@ -1,21 +1,25 @@
 import type { Duty } from '@resistry/engineering/duty/duty';
+import type { Technology } from '@resistry/engineering/ratings/technology';
 import type { Sort } from '../../../components/data-table/data-column';
 
 export type Show = 'met' | 'met-and-unrated';
 
-/** What narrows the catalogue beside the duty; lists hold ids or codes. */
+/** What narrows the catalogue beside the duty. */
 export interface Filters {
   text?: string;
-  manufacturers?: string[];
-  families?: string[];
-  technologies?: string[];
+  /** Ids. */
+  manufacturers?: number[];
+  families?: number[];
+  technologies?: Technology[];
+  /** Codes. */
   sizes?: string[];
   series?: string[];
-  /** Fraction, at most. */
-  tolerance?: number;
-  /** 1/K, at most. */
-  tcr?: number;
-  certificates?: string[];
+  /** Fractions. */
+  tolerances?: number[];
+  /** 1/K. */
+  tcrs?: number[];
+  /** Has a safety certificate in date. */
+  certificate?: boolean;
 }
 
 /** One question to the catalogue, without the page. */
@@ -26,9 +30,10 @@ export interface SearchRequest {
   filters?: Filters;
   show: Show;
   group?: 'company';
-  sort?: { by: string; direction: 'ascending' | 'descending' };
+  /** A column, with a minus before it for falling order. */
+  sort?: string;
 }
 
 export function sortOf(sort: Sort | undefined): SearchRequest['sort'] {
-  return sort && { by: sort.column, direction: sort.descending ? 'descending' : 'ascending' };
+  return sort && `${sort.descending ? '-' : ''}${sort.column}`;
 }

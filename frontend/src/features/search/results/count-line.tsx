@@ -1,6 +1,8 @@
 import { chakra } from '@chakra-ui/react';
+import { type Approval, approvals } from '@resistry/engineering/ratings/technology';
 import type { ReactNode } from 'react';
 import { Button } from '../../../components/button';
+import { approvalWords } from '../../../wording/standing-words';
 import type { Show } from '../requests/search-request';
 
 const count = new Intl.NumberFormat('en');
@@ -8,6 +10,7 @@ const count = new Intl.NumberFormat('en');
 export interface CountLineProps {
   total: number;
   unrated: number;
+  byApproval: Partial<Record<Approval, number>>;
   show: Show;
   grouped: boolean;
   onShow: (show: Show) => void;
@@ -17,7 +20,16 @@ export interface CountLineProps {
 }
 
 /** How many meet the duty; how many cannot be told, and whether those are shown. */
-export function CountLine({ total, unrated, show, grouped, onShow, onGrouped, children }: CountLineProps) {
+export function CountLine({
+  total,
+  unrated,
+  byApproval,
+  show,
+  grouped,
+  onShow,
+  onGrouped,
+  children,
+}: CountLineProps) {
   const things = grouped
     ? total === 1
       ? 'number meets'
@@ -32,6 +44,16 @@ export function CountLine({ total, unrated, show, grouped, onShow, onGrouped, ch
           {count.format(total)} {things} it
         </span>
       </chakra.h1>
+      <chakra.span fontSize="sm" color="fg.muted">
+        {approvals
+          .filter((approval) => (byApproval[approval] ?? 0) > 0)
+          .reverse()
+          .map(
+            (approval) =>
+              `${count.format(byApproval[approval] ?? 0)} ${approvalWords[approval].toLowerCase()}`,
+          )
+          .join(', ')}
+      </chakra.span>
       {unrated > 0 && (
         <Button
           variant="plain"

@@ -6,19 +6,18 @@ import type { SearchPart } from '../search-part';
 const euro = new Intl.NumberFormat('en', { minimumFractionDigits: 3, maximumFractionDigits: 4 });
 
 /** € a piece, or what is said where no offer is in force. */
-export const priceWords = (price: number | null | undefined): string =>
-  price === null || price === undefined ? 'no offer' : euro.format(price);
+export const priceWords = (price: number | undefined): string =>
+  price === undefined ? 'no offer' : euro.format(price);
 
 /** Inch and metric code, both, because 0402 and 0603 name two sizes each. */
 export const sizeCode = ({ size }: SearchPart): string =>
-  size.metricCode ? `${size.code}/${size.metricCode}` : size.code;
+  size.metricCode !== undefined ? `${size.code}/${size.metricCode}` : size.code;
 
 export function bodyOfPart(part: SearchPart): DrawnBody | undefined {
-  if (!part.body) return undefined;
   return drawnBodyOf({
-    style: part.body.style,
-    length: part.body.length,
-    width: part.body.width,
+    style: part.bodyStyle,
+    length: part.body?.length,
+    width: part.body?.width,
     sizeCode: sizeCode(part),
     resistance: part.resistance,
     tolerance: part.tolerance,
@@ -31,7 +30,7 @@ export function valueWords({ resistance, tolerance, tcr }: SearchPart): string {
   if (resistance === 0) return 'zero-ohm link';
   return [
     formatQuantity(resistance, 'resistance'),
-    ...(typeof tolerance === 'number' ? [formatQuantity(tolerance, 'tolerance')] : []),
-    ...(typeof tcr === 'number' ? [formatQuantity(tcr, 'temperature-coefficient')] : []),
+    ...(tolerance !== undefined ? [formatQuantity(tolerance, 'tolerance')] : []),
+    ...(tcr !== undefined ? [formatQuantity(tcr, 'temperature-coefficient')] : []),
   ].join(' ');
 }

@@ -5,7 +5,7 @@ import { MarginRule } from '../../../components/margin-rule';
 import { MarginWord } from '../../../components/margin-word';
 import { StatusWord } from '../../../components/status-word';
 import { checkWords } from '../../../wording/check-words';
-import { type SearchPart, tightestCheck } from '../search-part';
+import { type SearchPart, leadingNumber, tightestCheck } from '../search-part';
 import { overSpecification } from './over-specification';
 import { bodyOfPart, priceWords, valueWords } from './part-figures';
 
@@ -18,7 +18,7 @@ export function BodyCell({ part }: { part: SearchPart }) {
 export function NumberCell({ part }: { part: SearchPart }) {
   return part.companyPartNumber ? (
     <>
-      <b>{part.companyPartNumber}</b>
+      <b>{part.companyPartNumber.number}</b>
       <span data-second="">{part.manufacturerPartNumber}</span>
     </>
   ) : (
@@ -66,7 +66,7 @@ export function NarrowResult({ part, assessment }: { part: SearchPart; assessmen
         <BodyCell part={part} />
       </div>
       <div>
-        <b>{part.companyPartNumber ?? part.manufacturerPartNumber}</b>
+        <b>{leadingNumber(part)}</b>
         <span data-second="">
           {part.manufacturer.name} {part.family.code}, {valueWords(part)}
         </span>
@@ -74,7 +74,7 @@ export function NarrowResult({ part, assessment }: { part: SearchPart; assessmen
       <div>
         <StatusWord kind="approval" status={part.approval} />
         <chakra.span display="block" textAlign="end" fontSize="xs">
-          {typeof part.unitPrice !== 'number' ? priceWords(null) : `€ ${priceWords(part.unitPrice)}`}
+          {part.unitPrice === undefined ? priceWords(undefined) : `€ ${priceWords(part.unitPrice)}`}
         </chakra.span>
       </div>
       <div>

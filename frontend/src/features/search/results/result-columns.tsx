@@ -6,15 +6,15 @@ import { checkWords } from '../../../wording/check-words';
 import { approvalWords, supplyWords } from '../../../wording/standing-words';
 import { technologyWords } from '../../../wording/technology-words';
 import type { SearchItem } from '../requests/search-parts';
-import { tightestCheck } from '../search-part';
+import { leadingNumber, tightestCheck } from '../search-part';
 import { priceWords, sizeCode } from './part-figures';
 import { BodyCell, MarginCell, NarrowResult, NumberCell } from './result-cells';
 
 type Column = DataColumn<SearchItem>;
 
 /** The coefficient in the unit of its column. */
-function Ppm({ tcr: perKelvin }: { tcr: number | null | undefined }) {
-  if (typeof perKelvin !== 'number') return <span data-second="">not stated</span>;
+function Ppm({ tcr: perKelvin }: { tcr: number | undefined }) {
+  if (perKelvin === undefined) return <span data-second="">not stated</span>;
   return formatQuantityParts(perKelvin, 'temperature-coefficient', { significantDigits: 3 }).figure;
 }
 
@@ -24,22 +24,22 @@ const body: Column = {
   plainHeader: 'Body',
   width: '4.5rem',
   cell: ({ part }) => <BodyCell part={part} />,
-  plain: ({ part }) => part.body?.style ?? null,
+  plain: ({ part }) => part.bodyStyle,
 };
 
 const number: Column = {
-  id: 'number',
+  id: 'company-part-number',
   header: 'Part',
   plainHeader: 'Company part number',
   width: '6.1rem',
   fixed: true,
   sortable: true,
   cell: ({ part }) => <NumberCell part={part} />,
-  plain: ({ part }) => part.companyPartNumber ?? null,
+  plain: ({ part }) => part.companyPartNumber?.number ?? null,
 };
 
 const manufacturerNumber: Column = {
-  id: 'manufacturerPartNumber',
+  id: 'part-number',
   header: 'Manufacturer’s number',
   plainHeader: 'Manufacturer part number',
   width: '9rem',
@@ -69,7 +69,6 @@ const technology: Column = {
   header: 'Technology',
   plainHeader: 'Technology',
   width: '6.5rem',
-  sortable: true,
   hiddenAtFirst: true,
   cell: ({ part }) => technologyWords[part.technology],
   plain: ({ part }) => technologyWords[part.technology],
@@ -143,6 +142,40 @@ const tightest: Column = {
   plain: ({ assessment }) => tightestCheck(assessment.checks)?.check ?? null,
 };
 
+const dissipation: Column = {
+  id: 'dissipation',
+  header: 'Rated',
+  plainHeader: 'Rated dissipation, W',
+  width: '4.4rem',
+  align: 'end',
+  sortable: true,
+  hiddenAtFirst: true,
+  cell: ({ part }) =>
+    part.resistance === 0 ? '' : <Figure value={part.ratedDissipation} quantity="power" />,
+  plain: ({ part }) => part.ratedDissipation ?? null,
+};
+
+const secondSource: Column = {
+  id: 'secondSource',
+  header: 'Second source',
+  plainHeader: 'Second source',
+  width: '6rem',
+  hiddenAtFirst: true,
+  cell: ({ part }) => (part.secondSource ? 'yes' : 'none'),
+  plain: ({ part }) => (part.secondSource ? 'yes' : 'no'),
+};
+
+const excess: Column = {
+  id: 'excess',
+  header: 'More than needed',
+  plainHeader: 'More than needed',
+  width: '11rem',
+  sortable: true,
+  hiddenAtFirst: true,
+  cell: ({ overSpecification }) => overSpecification.join(', '),
+  plain: ({ overSpecification }) => overSpecification.join(', '),
+};
+
 const approval: Column = {
   id: 'approval',
   header: 'Approval',
@@ -165,7 +198,7 @@ const supply: Column = {
 };
 
 const price: Column = {
-  id: 'unitPrice',
+  id: 'price',
   header: '€/1,000',
   plainHeader: 'Unit price at 1,000, EUR',
   width: '4rem',
@@ -185,10 +218,13 @@ export const resultColumns: readonly Column[] = [
   resistance,
   tolerance,
   tcr,
+  dissipation,
   margin,
   tightest,
+  excess,
   approval,
   supply,
+  secondSource,
   price,
 ];
 
@@ -201,6 +237,6 @@ export const narrowColumns: readonly Column[] = [
     width: '100%',
     fixed: true,
     cell: ({ part, assessment }) => <NarrowResult part={part} assessment={assessment} />,
-    plain: ({ part }) => part.companyPartNumber ?? part.manufacturerPartNumber,
+    plain: ({ part }) => leadingNumber(part),
   },
 ];

@@ -1,14 +1,13 @@
-import { type RefObject, useCallback, useState } from 'react';
+import type { ReactNode, RefObject } from 'react';
 import { ColumnChooser } from '../../../components/data-table/column-chooser';
 import type { Sort } from '../../../components/data-table/data-column';
-import { DataTable } from '../../../components/data-table/data-table';
 import { useTableColumns } from '../../../components/data-table/use-table-columns';
 import { Empty } from '../../../components/states';
-import type { SearchItem } from '../requests/search-parts';
 import type { SearchRequest, Show } from '../requests/search-request';
 import type { Search } from '../requests/use-search';
 import { CountLine } from './count-line';
 import { narrowColumns, resultColumns } from './result-columns';
+import { ResultTable } from './result-table';
 import { TableActions } from './table-actions';
 
 export interface ResultsProps {
@@ -26,39 +25,25 @@ export interface ResultsProps {
   onGrouped: (grouped: boolean) => void;
   onOpen: (partId: number) => void;
   /** What stands between the count and the rows. */
-  ledger: React.ReactNode;
+  ledger: ReactNode;
 }
 
 const rowHeights = { wide: 52, narrow: 112 };
-const keyOf = ({ part }: SearchItem): number => part.id;
 
 /** The parts that meet the duty, with how many they are and what can be done with the list. */
 export function Results(props: ResultsProps) {
   const { search, request, show, grouped, sort, narrow, openPart, scrollRef, onSort, onOpen, ledger } = props;
   const table = useTableColumns('results', resultColumns, sort, onSort);
-  const columns = narrow ? narrowColumns : table.visible;
-  const [openIndex, setOpenIndex] = useState<number>();
-  const { itemAt, showRange, answer } = search;
-  const total = answer?.total ?? 0;
-  const unrated = answer?.unrated ?? 0;
-  const rowCount = show === 'met' ? total : total + unrated;
-
-  const open = useCallback(
-    (index: number) => {
-      const item = itemAt(index);
-      if (item === undefined) return;
-      setOpenIndex(index);
-      onOpen(item.part.id);
-    },
-    [itemAt, onOpen],
-  );
-
-  const selected = openIndex !== undefined && itemAt(openIndex)?.part.id === openPart ? openIndex : undefined;
+  const total = search.answer?.total ?? 0;
+  const unrated = search.answer?.unrated ?? 0;
+  // What was asked for when it was answered, not what the switch says by now.
+  const rowCount = search.answered?.show === 'met-and-unrated' ? total + unrated : total;
   return (
     <>
       <CountLine
         total={total}
         unrated={unrated}
+        byApproval={search.answer?.byApproval ?? {}}
         show={show}
         grouped={grouped}
         onShow={props.onShow}
@@ -74,18 +59,15 @@ export function Results(props: ResultsProps) {
           {unrated > 0 && ' Some parts cannot be told for lack of data; they can be shown.'}
         </Empty>
       ) : (
-        <DataTable
-          label="Parts that meet the duty"
-          columns={columns}
+        <ResultTable
+          answered={search.answered}
           rowCount={rowCount}
-          rowAt={itemAt}
-          rowKey={keyOf}
-          onVisible={showRange}
+          columns={narrow ? narrowColumns : table.visible}
           rowHeight={narrow ? rowHeights.narrow : rowHeights.wide}
           sort={sort}
           onSortBy={table.sortBy}
-          selectedIndex={selected}
-          onOpen={open}
+          openPart={openPart}
+          onOpen={onOpen}
           scrollRef={scrollRef}
         />
       )}

@@ -14,6 +14,7 @@ import { operatingOf } from '../../parts/operating-of';
 import { usePartAssessment } from '../../parts/requests/assess-part';
 import { type PartDetails, usePart } from '../../parts/requests/get-part';
 import type { SearchRequest } from '../requests/search-request';
+import { leadingNumber } from '../search-part';
 import { bodyOfPart, sizeCode, valueWords } from '../results/part-figures';
 
 const DeratingChart = lazy(() =>
@@ -67,7 +68,7 @@ function SheetHead({ part, address }: { part: PartDetails; address: string }) {
     <chakra.div display="flex" gap={3} alignItems="center" pe={8} mb={3}>
       {body !== undefined && <DrawnPart body={body} size="sheet" labelled />}
       <div>
-        <chakra.h2 fontSize="lg">{part.companyPartNumber ?? part.manufacturerPartNumber}</chakra.h2>
+        <chakra.h2 fontSize="lg">{leadingNumber(part)}</chakra.h2>
         <chakra.p fontSize="xs" color="fg.muted" lineHeight={1.35}>
           {part.manufacturer.name} {part.family.code} {sizeCode(part)}, {valueWords(part)}
         </chakra.p>
