@@ -6,12 +6,31 @@ import { PartStandingReading } from './details/part-standing-reading';
 import { PartText } from './part-text';
 import { PartsController } from './parts.controller';
 import { StandingChanges } from './standing-changes';
+import { ApprovalChanges } from './standing/approval-changes';
+import { PartReviews } from './standing/part-reviews';
+import { StandingController } from './standing/standing.controller';
+import { StandingDoor } from './standing/standing-door';
+import { StandingLetters } from './standing/standing-letters';
+import { StandingTransitions } from './standing/standing-transitions';
+import { SupplyChanges } from './standing/supply-changes';
 import { PartReadingModule } from './summary/part-reading.module';
 
 @Module({
   imports: [FamiliesModule, PartReadingModule],
-  controllers: [PartsController],
-  providers: [PartDetails, PartPurchasingReading, PartStandingReading, PartText, StandingChanges],
+  controllers: [PartsController, StandingController],
+  providers: [
+    PartDetails,
+    PartPurchasingReading,
+    PartStandingReading,
+    PartText,
+    StandingChanges,
+    ApprovalChanges,
+    PartReviews,
+    StandingDoor,
+    StandingLetters,
+    StandingTransitions,
+    SupplyChanges,
+  ],
   exports: [PartPurchasingReading, PartText, StandingChanges],
 })
 export class PartsModule {}

@@ -23,7 +23,8 @@ export class PermissionGuard implements CanActivate {
     }
     const person = personOf(context.switchToHttp().getRequest<Request>());
     if (!person) throw new UnauthenticatedProblem();
-    if (!person.mightDo(access.action, access.subject)) throw refusalOf(access.action, access.subject);
+    const { actions, subject } = access;
+    if (!actions.some((action) => person.mightDo(action, subject))) throw refusalOf(actions, subject);
     return true;
   }
 }

@@ -1,0 +1,64 @@
+import { ApiProperty, ApiPropertyOptional } from '@nestjs/swagger';
+import { supplyStatuses, type SupplyStatus } from '@resistry/engineering/ratings/technology';
+import { IsIn, IsInt, IsOptional, IsString, Max, MaxLength, Min } from 'class-validator';
+import { Day } from '../../common/validation/day';
+import { Filled } from '../../common/validation/filled';
+import { approvalTargets, type ApprovalTarget } from './approval-transitions';
+
+const LONGEST = 1000;
+
+class ReasonedForm {
+  @ApiProperty({ maxLength: LONGEST })
+  @IsString()
+  @Filled()
+  @MaxLength(LONGEST)
+  reason: string;
+
+  @ApiProperty({ type: 'integer', minimum: 1, description: 'Version of the part that the change is made on' })
+  @IsInt()
+  @Min(1)
+  @Max(Number.MAX_SAFE_INTEGER)
+  version: number;
+}
+
+export class ApprovalChangeForm extends ReasonedForm {
+  @ApiProperty({ enum: approvalTargets })
+  @IsIn(approvalTargets)
+  to: ApprovalTarget;
+
+  @ApiPropertyOptional({ maxLength: LONGEST, description: 'Of a restriction: what the part may be used for' })
+  @IsOptional()
+  @IsString()
+  @Filled()
+  @MaxLength(LONGEST)
+  words?: string;
+
+  @ApiPropertyOptional({ maxLength: LONGEST, description: 'Of a restriction: where it holds' })
+  @IsOptional()
+  @IsString()
+  @Filled()
+  @MaxLength(LONGEST)
+  scope?: string;
+
+  @ApiPropertyOptional({
+    maxLength: LONGEST,
+    description: 'Of a promotion: why one source will do',
+  })
+  @IsOptional()
+  @IsString()
+  @Filled()
+  @MaxLength(LONGEST)
+  exception?: string;
+}
+
+export class SupplyChangeForm extends ReasonedForm {
+  @ApiProperty({ enum: supplyStatuses })
+  @IsIn(supplyStatuses)
+  to: SupplyStatus;
+
+  @ApiPropertyOptional({ description: 'Day, ISO 8601; a last-time buy needs it' })
+  @IsOptional()
+  @IsString()
+  @Day()
+  lastOrderDate?: string;
+}
