@@ -2,6 +2,7 @@ import { type DynamicModule, Module } from '@nestjs/common';
 import { APP_FILTER, APP_PIPE } from '@nestjs/core';
 import { ScheduleModule } from '@nestjs/schedule';
 import { AccountModule } from './account/account.module';
+import { AssessmentsModule } from './assessments/assessments.module';
 import { AuditModule } from './audit/audit.module';
 import { AuthModule } from './auth/auth.module';
 import { BackupsModule } from './backups/backups.module';
@@ -17,13 +18,16 @@ import { FacetsModule } from './facets/facets.module';
 import { FamiliesModule } from './families/families.module';
 import { ManufacturersModule } from './manufacturers/manufacturers.module';
 import { PartsModule } from './parts/parts.module';
+import { PoliciesModule } from './policies/policies.module';
 import { ReviewsModule } from './reviews/reviews.module';
 import { TextSearchModule } from './text-search/text-search.module';
 import { HealthModule } from './health/health.module';
 import { HousekeepingModule } from './housekeeping/housekeeping.module';
 import { MailModule } from './mail/mail.module';
+import { NotationModule } from './notation/notation.module';
 import { OutboxModule } from './outbox/outbox.module';
 import { PermissionsModule } from './permissions/permissions.module';
+import { SearchModule } from './search/search.module';
 import { SeedModule } from './seed/seed.module';
 import { UsersModule } from './users/users.module';
 
@@ -54,6 +58,10 @@ export class AppModule {
         FacetsModule,
         TextSearchModule,
         ReviewsModule,
+        PoliciesModule,
+        NotationModule,
+        AssessmentsModule,
+        SearchModule,
         HealthModule,
       ],
       providers: [

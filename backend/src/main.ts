@@ -1,6 +1,7 @@
 import { createApplication } from './create-application';
 import { ConfigurationError } from './config/configuration-error';
 import { readEnvironment } from './config/environment';
+import { SearchIndex } from './search/search-index';
 
 // SQLite and bcrypt work in libuv's pool, whose four threads a few searches would fill. It must be set before the
 // pool starts, which is at the first file that anything reads.
@@ -23,6 +24,8 @@ async function main(): Promise<void> {
   };
   process.once('SIGTERM', stop);
   process.once('SIGINT', stop);
+  // The first search would otherwise wait until the catalogue is in memory.
+  await application.get(SearchIndex).ready();
   await application.listen(environment.port, environment.host);
   process.stdout.write(`Resistry answers at ${await application.getUrl()}\n`);
 }

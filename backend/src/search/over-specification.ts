@@ -4,10 +4,10 @@ import type { CheckName } from '@resistry/engineering/checks/check';
 /** From how many times its demand on a rating is called more than needed; a factor of two is common practice as reserve. */
 const named = 3;
 
+/** The voltage a body bears comes with its size and is left out: naming it would name nearly every part. */
 const words: Partial<Record<CheckName, (times: string) => string>> = {
   value: (times) => `${times} × tighter than the window needs`,
   dissipation: (times) => `${times} × the dissipation`,
-  voltage: (times) => `${times} × the voltage`,
   insulation: (times) => `${times} × the insulation voltage`,
   'link-current': (times) => `${times} × the current`,
 };

@@ -1,7 +1,9 @@
-import { Injectable, type OnApplicationShutdown } from '@nestjs/common';
+import { Injectable, type OnApplicationShutdown, type OnModuleInit } from '@nestjs/common';
+import { Cron, CronExpression } from '@nestjs/schedule';
 import { Readers } from '../database/readers';
 import type { SizeRatings } from '../parts/ratings/size-ratings';
 import { SizeRatingsReader } from '../parts/ratings/size-ratings-reader';
+import { StandingChanges } from '../parts/standing-changes';
 import type { SearchPlan, SearchResult } from './engine/search-plan';
 import { InlineSearchHost } from './host/inline-search-host';
 import type { SearchHost } from './host/search-host';
@@ -21,7 +23,7 @@ const standingSql = `
 
 /** The catalogue in memory, kept to the database: built when first asked for, and told of every change of a standing. */
 @Injectable()
-export class SearchIndex implements OnApplicationShutdown {
+export class SearchIndex implements OnModuleInit, OnApplicationShutdown {
   private readonly host: SearchHost = __filename.endsWith('.ts')
     ? new InlineSearchHost()
     : new ThreadSearchHost();
@@ -30,7 +32,12 @@ export class SearchIndex implements OnApplicationShutdown {
   constructor(
     private readonly readers: Readers,
     private readonly sizeRatings: SizeRatingsReader,
+    private readonly standingChanges: StandingChanges,
   ) {}
+
+  onModuleInit(): void {
+    this.standingChanges.subscribe((partIds) => this.refreshStanding(partIds));
+  }
 
   async search(plan: SearchPlan): Promise<SearchResult> {
     await this.ready();
@@ -55,6 +62,7 @@ export class SearchIndex implements OnApplicationShutdown {
   }
 
   /** Reads the whole catalogue again: after parts, ratings or company part numbers have come or gone, and each day. */
+  @Cron(CronExpression.EVERY_DAY_AT_1AM)
   async rebuild(): Promise<void> {
     const next = this.build();
     await next;

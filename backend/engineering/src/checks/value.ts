@@ -115,7 +115,7 @@ export const valueCheck: CheckDefinition = {
         },
         {
           name: 'resistance over life',
-          value: `${formatQuantity(state.low, 'resistance')} … ${formatQuantity(state.high, 'resistance')}`,
+          value: `${formatQuantity(state.low, 'resistance', { significantDigits: 5 })} … ${formatQuantity(state.high, 'resistance', { significantDigits: 5 })}`,
           from: 'derived',
         },
       ),

@@ -76,8 +76,9 @@ function collect(
         continue;
       }
       const mask = unmet[position] ?? 0;
-      tally.add(position, mask, unrated[position] ?? 0);
-      if (plan.relaxations && mask !== 0)
+      const lacks = unrated[position] ?? 0;
+      tally.add(position, mask, lacks);
+      if (plan.relaxations && (mask | lacks) !== 0)
         misses.push({ unit: [position], unmet: unmetInEveryMode[position] ?? 0 });
     }
   }
@@ -85,7 +86,7 @@ function collect(
     const unit = judgedSources(index, number);
     const masks = masksOfNumber(evaluation, unit);
     tally.add(number, masks.unmet, masks.unrated);
-    if (!plan.relaxations || masks.unmet === 0) continue;
+    if (!plan.relaxations || (masks.unmet | masks.unrated) === 0) continue;
     const common = unit.reduce((bits, position) => bits | (unmetInEveryMode[position] ?? 0), 0);
     misses.push({ unit, unmet: common });
   }

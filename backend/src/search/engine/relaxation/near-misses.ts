@@ -1,7 +1,10 @@
 import type { AskedCheck } from '@resistry/engineering/range-search/asked-checks';
 import type { Unit } from './retrial';
 
-/** A unit that the search removed, with the checks that are unmet in every operating mode. */
+/**
+ * A unit that the search does not count as met, with the checks that are unmet in every operating mode; none for one
+ * that is unrated, which a loosened demand can make met as well.
+ */
 export interface Miss {
   unit: Unit;
   unmet: number;

@@ -33,7 +33,9 @@ export function relaxationsOf(
     missesDependingOn(pointer.startsWith('/limits') ? misses : inWindow, bitsDependingOn(checks, pointer));
   const found: (Relaxation | undefined)[] = [];
   if (valueBit !== 0 && !requirement.link) {
-    const kept = misses.filter(({ unmet }) => (unmet & ~valueBit) === 0).map(({ unit }) => unit);
+    const kept = misses
+      .filter(({ unmet }) => unmet !== 0 && (unmet & ~valueBit) === 0)
+      .map(({ unit }) => unit);
     const lifeOf = lifeIntervals(index, evaluation);
     found.push(
       relaxWindow(duty, 'lower', kept, lifeOf, retrial),
