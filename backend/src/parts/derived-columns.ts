@@ -23,9 +23,9 @@ const RANGE = `(SELECT min(r.id) FROM families AS f
 
 /**
  * Lowest unit price at 1000 pieces among the offers in force today that sell as few: of each, the price of its largest
- * break up to 1000.
+ * break up to 1000. Stands in a statement over `parts` and binds today's day.
  */
-const PRICE = `(SELECT min((SELECT b.unit_price_micro FROM offer_price_breaks AS b
+export const PRICE = `(SELECT min((SELECT b.unit_price_micro FROM offer_price_breaks AS b
       WHERE b.offer_id = o.id AND b.quantity <= 1000 ORDER BY b.quantity DESC LIMIT 1))
   FROM offers AS o
   WHERE o.part_id = parts.id AND o.minimum_order <= 1000 AND $today BETWEEN o.valid_from AND o.valid_until)`;

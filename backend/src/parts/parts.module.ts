@@ -5,6 +5,7 @@ import { PartPurchasingReading } from './details/part-purchasing-reading';
 import { PartStandingReading } from './details/part-standing-reading';
 import { PartText } from './part-text';
 import { PartsController } from './parts.controller';
+import { PriceRefresh } from './price-refresh';
 import { StandingChanges } from './standing-changes';
 import { ApprovalChanges } from './standing/approval-changes';
 import { PartReviews } from './standing/part-reviews';
@@ -23,6 +24,7 @@ import { PartReadingModule } from './summary/part-reading.module';
     PartPurchasingReading,
     PartStandingReading,
     PartText,
+    PriceRefresh,
     StandingChanges,
     ApprovalChanges,
     PartReviews,
