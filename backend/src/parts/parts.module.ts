@@ -1,5 +1,6 @@
 import { Module } from '@nestjs/common';
 import { FamiliesModule } from '../families/families.module';
+import { Alternates } from './alternates/alternates.service';
 import { PartDetails } from './details/part-details';
 import { PartPurchasingReading } from './details/part-purchasing-reading';
 import { PartStandingReading } from './details/part-standing-reading';
@@ -20,6 +21,7 @@ import { PartReadingModule } from './summary/part-reading.module';
   imports: [FamiliesModule, PartReadingModule],
   controllers: [PartsController, StandingController],
   providers: [
+    Alternates,
     PartDetails,
     PartPurchasingReading,
     PartStandingReading,
