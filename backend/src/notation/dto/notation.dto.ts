@@ -75,8 +75,17 @@ export class MarkingQuery {
   tcr?: number;
 }
 
+const markingKinds = [
+  'colour-bands',
+  'letter-code',
+  'three-character',
+  'four-character',
+  'two-digit-and-letter',
+  'link',
+] as const satisfies readonly MarkingKind[];
+
 export class MarkingReadingDto {
-  @ApiProperty()
+  @ApiProperty({ enum: markingKinds })
   kind: MarkingKind;
 
   @ApiProperty({ description: 'Ω' })
@@ -90,7 +99,7 @@ export class MarkingReadingDto {
 }
 
 export class MarkingFormDto {
-  @ApiProperty()
+  @ApiProperty({ enum: markingKinds })
   kind: MarkingKind;
 
   @ApiPropertyOptional()
