@@ -4,2048 +4,4738 @@
  */
 
 export interface paths {
-  '/api/auth/sign-in': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "/api/auth/sign-in": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Sign in; the refresh token comes as a cookie */
+        post: operations["signIn"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
     };
-    get?: never;
-    put?: never;
-    /** Sign in; the refresh token comes as a cookie */
-    post: operations['signIn'];
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/auth/refresh': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "/api/auth/refresh": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** A new access token for the refresh cookie */
+        post: operations["refreshSignIn"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
     };
-    get?: never;
-    put?: never;
-    /** A new access token for the refresh cookie */
-    post: operations['refreshSignIn'];
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/auth/sign-out': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "/api/auth/sign-out": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** End the sign-in of the refresh cookie */
+        post: operations["signOut"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
     };
-    get?: never;
-    put?: never;
-    /** End the sign-in of the refresh cookie */
-    post: operations['signOut'];
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/auth/sign-out-everywhere': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "/api/auth/sign-out-everywhere": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** End every sign-in of the person who asks */
+        post: operations["signOutEverywhere"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
     };
-    get?: never;
-    put?: never;
-    /** End every sign-in of the person who asks */
-    post: operations['signOutEverywhere'];
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/auth/me': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "/api/auth/me": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Who is signed in and what he or she may do */
+        get: operations["readMe"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
     };
-    /** Who is signed in and what he or she may do */
-    get: operations['readMe'];
-    put?: never;
-    post?: never;
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/auth/password-resets': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "/api/auth/password-resets": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Have a link to a new password sent by mail */
+        post: operations["requestPasswordReset"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
     };
-    get?: never;
-    put?: never;
-    /** Have a link to a new password sent by mail */
-    post: operations['requestPasswordReset'];
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/auth/password-resets/redeem': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "/api/auth/password-resets/redeem": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Set a new password with the token from the letter */
+        post: operations["resetPassword"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
     };
-    get?: never;
-    put?: never;
-    /** Set a new password with the token from the letter */
-    post: operations['resetPassword'];
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/permissions': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "/api/permissions": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Who may do what, rule by rule */
+        get: operations["readPermissions"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
     };
-    /** Who may do what, rule by rule */
-    get: operations['readPermissions'];
-    put?: never;
-    post?: never;
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/audit': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "/api/audit": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Who changed what, newest first */
+        get: operations["listAuditEntries"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
     };
-    /** Who changed what, newest first */
-    get: operations['listAuditEntries'];
-    put?: never;
-    post?: never;
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/outbox': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "/api/outbox": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** What has failed to be delivered */
+        get: operations["listUndelivered"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
     };
-    /** What has failed to be delivered */
-    get: operations['listUndelivered'];
-    put?: never;
-    post?: never;
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/outbox/{id}/retry': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "/api/outbox/{id}/retry": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Try a message again that has been given up */
+        post: operations["retryDelivery"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
     };
-    get?: never;
-    put?: never;
-    /** Try a message again that has been given up */
-    post: operations['retryDelivery'];
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/mail': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "/api/mail": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** The letters that the local catcher keeps, newest first */
+        get: operations["listMail"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
     };
-    /** The letters that the local catcher keeps, newest first */
-    get: operations['listMail'];
-    put?: never;
-    post?: never;
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/mail/{id}': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "/api/mail/{id}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** One letter with its text and links */
+        get: operations["readMail"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
     };
-    /** One letter with its text and links */
-    get: operations['readMail'];
-    put?: never;
-    post?: never;
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/users': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "/api/users": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Everybody who has an account */
+        get: operations["listUsers"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
     };
-    /** Everybody who has an account */
-    get: operations['listUsers'];
-    put?: never;
-    post?: never;
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/users/{id}': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "/api/users/{id}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** One account */
+        get: operations["readUser"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
     };
-    /** One account */
-    get: operations['readUser'];
-    put?: never;
-    post?: never;
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/users/{id}/roles': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "/api/users/{id}/roles": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        /** Give a person these roles and no others */
+        put: operations["changeUserRoles"];
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
     };
-    get?: never;
-    /** Give a person these roles and no others */
-    put: operations['changeUserRoles'];
-    post?: never;
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/users/{id}/deactivate': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "/api/users/{id}/deactivate": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Keep a person out and end his or her sessions */
+        post: operations["deactivateUser"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
     };
-    get?: never;
-    put?: never;
-    /** Keep a person out and end his or her sessions */
-    post: operations['deactivateUser'];
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/users/{id}/reactivate': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "/api/users/{id}/reactivate": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Let a person back in */
+        post: operations["reactivateUser"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
     };
-    get?: never;
-    put?: never;
-    /** Let a person back in */
-    post: operations['reactivateUser'];
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/invitations': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "/api/invitations": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Invitations that nobody has followed yet */
+        get: operations["listInvitations"];
+        put?: never;
+        /** Send somebody a way in by mail */
+        post: operations["invite"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
     };
-    /** Invitations that nobody has followed yet */
-    get: operations['listInvitations'];
-    put?: never;
-    /** Send somebody a way in by mail */
-    post: operations['invite'];
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/invitations/{id}': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "/api/invitations/{id}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post?: never;
+        /** Take an invitation back */
+        delete: operations["withdrawInvitation"];
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
     };
-    get?: never;
-    put?: never;
-    post?: never;
-    /** Take an invitation back */
-    delete: operations['withdrawInvitation'];
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/invitations/preview': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "/api/invitations/preview": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** What the invitation with this token offers */
+        post: operations["previewInvitation"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
     };
-    get?: never;
-    put?: never;
-    /** What the invitation with this token offers */
-    post: operations['previewInvitation'];
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/invitations/accept': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "/api/invitations/accept": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Make the account; then sign in */
+        post: operations["acceptInvitation"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
     };
-    get?: never;
-    put?: never;
-    /** Make the account; then sign in */
-    post: operations['acceptInvitation'];
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/account/name': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "/api/account/name": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        /** Change the name that others see */
+        put: operations["changeOwnName"];
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
     };
-    get?: never;
-    /** Change the name that others see */
-    put: operations['changeOwnName'];
-    post?: never;
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/account/password': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "/api/account/password": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Change the password; other sessions end */
+        post: operations["changeOwnPassword"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
     };
-    get?: never;
-    put?: never;
-    /** Change the password; other sessions end */
-    post: operations['changeOwnPassword'];
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/account/sessions': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "/api/account/sessions": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Where the person is signed in */
+        get: operations["listOwnSessions"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
     };
-    /** Where the person is signed in */
-    get: operations['listOwnSessions'];
-    put?: never;
-    post?: never;
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/account/sessions/{id}': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "/api/account/sessions/{id}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post?: never;
+        /** Sign out one of the own sessions */
+        delete: operations["endOwnSession"];
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
     };
-    get?: never;
-    put?: never;
-    post?: never;
-    /** Sign out one of the own sessions */
-    delete: operations['endOwnSession'];
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/backups': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "/api/backups": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** The backups, newest first */
+        get: operations["listBackups"];
+        put?: never;
+        /** Take a backup now */
+        post: operations["takeBackup"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
     };
-    /** The backups, newest first */
-    get: operations['listBackups'];
-    put?: never;
-    /** Take a backup now */
-    post: operations['takeBackup'];
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/backups/{name}/check': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "/api/backups/{name}/check": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Whether a backup is whole and can be restored */
+        post: operations["checkBackup"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
     };
-    get?: never;
-    put?: never;
-    /** Whether a backup is whole and can be restored */
-    post: operations['checkBackup'];
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/health': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "/api/manufacturers": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** All manufacturers with their numbers of families and parts */
+        get: operations["listManufacturers"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
     };
-    /** Whether the application answers and reaches its database */
-    get: operations['readHealth'];
-    put?: never;
-    post?: never;
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
+    "/api/families": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Families with their numbers of parts by approval */
+        get: operations["listFamilies"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/families/{id}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** A family with its current ratings and its papers */
+        get: operations["readFamily"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/families/{id}/revisions/{number}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** One revision of a family */
+        get: operations["readFamilyRevision"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/parts/{id}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Everything that the catalogue knows of a part */
+        get: operations["readPart"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/parts/{id}/alternates": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Parts of equal form, fit and function, with every difference */
+        get: operations["listAlternates"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/parts/{id}/transitions": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** What can become of a part, whether the person who asks may do it, and what it demands */
+        get: operations["readTransitions"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/parts/{id}/approval": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Submit, approve, promote, restrict or withdraw a part */
+        post: operations["changeApproval"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/parts/{id}/supply": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Set the supply status of a part and its last order date */
+        post: operations["changeSupply"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/company-part-numbers": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Company part numbers, by number */
+        get: operations["listCompanyPartNumbers"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/company-part-numbers/{number}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** A company part number with its approved manufacturer list */
+        get: operations["readCompanyPartNumber"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/facets": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** What a search can be narrowed to, with numbers of parts */
+        get: operations["readFacets"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/text-search": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Parts, families and manufacturers by what they are called */
+        get: operations["searchText"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/reviews": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Parts that wait for a decision, or got one */
+        get: operations["listReviews"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/policies": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Published versions of the derating policies */
+        get: operations["listPolicies"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/policies/{id}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** One published version with its entries */
+        get: operations["readPolicy"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/notation": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** A quantity as engineers write it, read into its SI value */
+        get: operations["readNotation"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/preferred-values": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Preferred values of a series between two resistances (IEC 60063) */
+        get: operations["listPreferredValues"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/marking": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** What a marking can mean, or the forms a resistance can bear (IEC 60062) */
+        get: operations["readMarking"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/requirements": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** What follows from a duty */
+        post: operations["deriveRequirement"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/assessments": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Hold a part known only by its numbers against a duty */
+        post: operations["assessRatings"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/parts/search": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Parts that meet a duty, with exact counts of what each check removes */
+        post: operations["searchParts"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/parts/{id}/assessment": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Hold one catalogue part against a duty */
+        post: operations["assessPart"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/health": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Whether the application answers and reaches its database */
+        get: operations["readHealth"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
 }
 export type webhooks = Record<string, never>;
 export interface components {
-  schemas: {
-    SignIn: {
-      /** @example designer@brackwater.example.com */
-      email: string;
-      password: string;
+    schemas: {
+        SignIn: {
+            /** @example designer@brackwater.example.com */
+            email: string;
+            password: string;
+        };
+        /** @enum {string} */
+        Role: "administrator" | "librarian" | "component-engineer" | "designer" | "purchasing";
+        SignedInUser: {
+            id: number;
+            email: string;
+            name: string;
+            roles: components["schemas"]["Role"][];
+        };
+        SignedIn: {
+            user: components["schemas"]["SignedInUser"];
+            /** @description The rules of this person, packed by @casl/ability; unpack with unpackRules of @casl/ability/extra */
+            rules: unknown[][];
+            /** @description Goes into the Authorization header as a bearer token; good for ten minutes */
+            accessToken: string;
+        };
+        FieldErrorDocument: {
+            /** @description JSON pointer (RFC 6901) to the faulty field */
+            pointer: string;
+            message: string;
+        };
+        ProblemDocument: {
+            /** @example urn:resistry:problem:malformed */
+            type: string;
+            title: string;
+            status: number;
+            detail: string;
+            /** @description Identifies this request in the log */
+            instance: string;
+            errors?: components["schemas"]["FieldErrorDocument"][];
+            /** @description The rule that forbids */
+            rule?: string;
+            /** @description Seconds after which another attempt makes sense */
+            retryAfter?: number;
+        };
+        Me: {
+            user: components["schemas"]["SignedInUser"];
+            /** @description The rules of this person, packed by @casl/ability; unpack with unpackRules of @casl/ability/extra */
+            rules: unknown[][];
+        };
+        PasswordResetRequest: {
+            email: string;
+        };
+        PasswordResetTaken: {
+            /** @description The same words whether or not the address has an account */
+            message: string;
+        };
+        NewPassword: {
+            /** @description From the link in the letter */
+            token: string;
+            password: string;
+        };
+        /** @enum {string} */
+        Action: "read" | "compute" | "create" | "update" | "submit" | "approve" | "promote" | "restrict" | "withdraw" | "set-supply-status" | "set-last-order-date" | "invite" | "change-roles" | "deactivate" | "reactivate" | "manage";
+        /** @enum {string} */
+        Subject: "Account" | "Search" | "Part" | "Family" | "Manufacturer" | "CompanyPartNumber" | "Offer" | "Review" | "Policy" | "User" | "Permission" | "AuditEntry" | "Mail" | "OutboxMessage" | "Backup";
+        PermissionRow: {
+            role: components["schemas"]["Role"];
+            action: components["schemas"]["Action"];
+            subject: components["schemas"]["Subject"];
+            /** @description True where it also depends on the thing itself; the sentence says how */
+            conditional: boolean;
+            sentence: string;
+        };
+        PermissionTable: {
+            roles: components["schemas"]["Role"][];
+            actions: components["schemas"]["Action"][];
+            subjects: components["schemas"]["Subject"][];
+            rows: components["schemas"]["PermissionRow"][];
+        };
+        AuditEntry: {
+            id: number;
+            /** @description ISO 8601 */
+            recordedAt: string;
+            /** @description Absent where no person acted */
+            actorId?: number;
+            actorName: string;
+            action: string;
+            subjectType: string;
+            subjectId: string;
+            before?: {
+                [key: string]: unknown;
+            };
+            after?: {
+                [key: string]: unknown;
+            };
+            reason?: string;
+        };
+        AuditPage: {
+            items: components["schemas"]["AuditEntry"][];
+            /** @description Send as `before` for the next page; absent on the last one */
+            next?: number;
+        };
+        UndeliveredMessage: {
+            id: string;
+            /** @description Topic, such as mail */
+            kind: string;
+            /**
+             * @description dead: given up, until somebody asks for another attempt
+             * @enum {string}
+             */
+            state: "pending" | "dead";
+            attempts: number;
+            /** @description ISO 8601 */
+            createdAt: string;
+            /** @description ISO 8601 */
+            nextAttemptAt: string;
+            lastError?: string;
+        };
+        UndeliveredMessages: {
+            /** @description The oldest 200 */
+            items: components["schemas"]["UndeliveredMessage"][];
+        };
+        MailSummary: {
+            id: string;
+            from: string;
+            to: string;
+            subject: string;
+            /** @description ISO 8601; empty when the letter says none */
+            date: string;
+        };
+        MailList: {
+            /** @description False where a mail server is configured, so that no letter stays here */
+            kept: boolean;
+            total: number;
+            items: components["schemas"]["MailSummary"][];
+        };
+        MailLetter: {
+            id: string;
+            from: string;
+            to: string;
+            subject: string;
+            /** @description ISO 8601; empty when the letter says none */
+            date: string;
+            text: string;
+            /** @description Addresses found in the text */
+            links: string[];
+        };
+        UserDetails: {
+            id: number;
+            email: string;
+            name: string;
+            roles: components["schemas"]["Role"][];
+            /** @enum {string} */
+            state: "active" | "deactivated";
+            /** @description Send it back with a change; an older one is refused as stale */
+            version: number;
+            /** @description ISO 8601 */
+            createdAt: string;
+            /** @description ISO 8601; absent where the person has never signed in */
+            lastSeenAt?: string;
+        };
+        UserList: {
+            items: components["schemas"]["UserDetails"][];
+        };
+        NewRoles: {
+            roles: components["schemas"]["Role"][];
+            version: number;
+        };
+        ReasonedChange: {
+            reason: string;
+            version: number;
+        };
+        InvitationDetails: {
+            id: string;
+            email: string;
+            roles: components["schemas"]["Role"][];
+            /** @description Name of the administrator who sent it */
+            invitedBy: string;
+            /** @description ISO 8601 */
+            createdAt: string;
+            /** @description ISO 8601 */
+            expiresAt: string;
+            /** @enum {string} */
+            state: "open" | "expired";
+        };
+        InvitationList: {
+            items: components["schemas"]["InvitationDetails"][];
+        };
+        NewInvitation: {
+            email: string;
+            roles: components["schemas"]["Role"][];
+        };
+        InvitationCreated: {
+            id: string;
+        };
+        InvitationToken: {
+            /** @description From the link in the letter */
+            token: string;
+        };
+        InvitationPreview: {
+            email: string;
+            roles: components["schemas"]["Role"][];
+            /** @description ISO 8601 */
+            expiresAt: string;
+        };
+        InvitationAcceptanceForm: {
+            /** @description From the link in the letter */
+            token: string;
+            name: string;
+            password: string;
+        };
+        OwnName: {
+            name: string;
+        };
+        OwnPassword: {
+            currentPassword: string;
+            newPassword: string;
+        };
+        OwnSession: {
+            id: string;
+            /** @description What the browser says of itself */
+            userAgent: string;
+            /** @description Network address at sign-in */
+            address: string;
+            /** @description ISO 8601 */
+            createdAt: string;
+            /** @description ISO 8601 */
+            lastUsedAt: string;
+            /** @description Whether this very request belongs to it */
+            current: boolean;
+        };
+        OwnSessions: {
+            items: components["schemas"]["OwnSession"][];
+        };
+        BackupDetails: {
+            /** @example 2026-12-01T02-30-00Z-4f1c */
+            name: string;
+            /** @description ISO 8601 */
+            createdAt: string;
+            /** @enum {string} */
+            reason: "nightly" | "on-demand";
+            /** @description The newest migration in it */
+            schema: string;
+            files: number;
+            bytes: number;
+        };
+        ListedBackupDetails: {
+            /** @example 2026-12-01T02-30-00Z-4f1c */
+            name: string;
+            /** @description Absent where the backup is damaged so that it cannot say */
+            details?: components["schemas"]["BackupDetails"];
+        };
+        BackupList: {
+            items: components["schemas"]["ListedBackupDetails"][];
+        };
+        BackupCheck: {
+            /** @description Whether it can be restored */
+            sound: boolean;
+            /** @description What is wrong with it */
+            faults: string[];
+        };
+        ManufacturerDto: {
+            id: number;
+            code: string;
+            name: string;
+            country?: string;
+            note?: string;
+            /** @description Number of families */
+            families: number;
+            /** @description Number of parts */
+            parts: number;
+        };
+        ManufacturerList: {
+            items: components["schemas"]["ManufacturerDto"][];
+        };
+        NamedDto: {
+            id: number;
+            code: string;
+            name: string;
+        };
+        CurrentRevisionRefDto: {
+            number: number;
+            /** @description ISO 8601 */
+            publishedAt: string;
+        };
+        FamilySummaryDto: {
+            id: number;
+            code: string;
+            name: string;
+            manufacturer: components["schemas"]["NamedDto"];
+            /** @enum {string} */
+            technology: "thick-film" | "thin-film" | "metal-film" | "carbon-film" | "metal-oxide" | "wirewound" | "metal-strip" | "metal-foil" | "carbon-composition" | "ceramic-composition";
+            /** @description Absent before the first publication */
+            revision?: components["schemas"]["CurrentRevisionRefDto"];
+            /** @description Number of sizes */
+            sizes: number;
+            /** @description Number of parts */
+            parts: number;
+            /** @description Number of parts by approval, every approval named */
+            approvals: {
+                [key: string]: number;
+            };
+        };
+        FamilyListDto: {
+            items: components["schemas"]["FamilySummaryDto"][];
+        };
+        PersonRefDto: {
+            id: number;
+            name: string;
+        };
+        DatasheetDto: {
+            id: number;
+            documentNumber: string;
+            /** @description As the manufacturer numbers it */
+            revision: string;
+            title: string;
+            /** @description Day, ISO 8601 */
+            issuedOn: string;
+            pageCount: number;
+        };
+        OrderingCodeExampleDto: {
+            code: string;
+            /** @description Code of the size */
+            size: string;
+            /** @description Ω; 0 for a zero-ohm link */
+            resistance: number;
+            /** @description Fraction */
+            tolerance?: number;
+            /** @description 1/K */
+            tcr?: number;
+            /** @description Code of the packaging; absent where it is left open */
+            packaging?: string;
+        };
+        SizeRefDto: {
+            id: number;
+            /** @description Inch code of a chip, or the trade’s code of the body */
+            code: string;
+            /** @description Metric code of a chip */
+            metricCode?: string;
+        };
+        BodySizeDto: {
+            /** @description m */
+            length: number;
+            /** @description m */
+            width: number;
+            /** @description m */
+            height: number;
+        };
+        DeratingDto: {
+            /** @enum {string} */
+            axis: "ambient" | "terminal" | "case";
+            /** @description Curve [[°C, fraction of the rated dissipation], …], rising in °C */
+            points: number[][];
+        };
+        IntervalDto: {
+            /** @description Smallest */
+            min: number;
+            /** @description Largest */
+            max: number;
+        };
+        PulseRatingsDto: {
+            /** @description Single pulses [[s, W], …] */
+            single?: number[][];
+            /** @description Number of pulses the single curve is stated for */
+            singleCount?: number;
+            /** @description Repeated pulses [[s, W], …] */
+            continuous?: number[][];
+            /** @description Pulse voltage [[s, V], …] or V */
+            voltage?: number[][] | number;
+            /** @description Energy limit, J */
+            energy?: number;
+            /** @description Shift by pulses, fraction */
+            shift?: number;
+        };
+        DriftLawDto: {
+            /** @description Exponent of time */
+            exponent: number;
+            /** @description K per doubling */
+            doubling: number;
+        };
+        DriftDto: {
+            /** @description ΔR/R after the test, fraction */
+            fraction: number;
+            /** @description Duration of the test, h */
+            hours: number;
+            /** @description Temperature of the element in the test, °C */
+            temperature: number;
+            law?: components["schemas"]["DriftLawDto"];
+        };
+        BodyDto: {
+            /** @description Length, m */
+            length: number;
+            /** @description Width, m */
+            width: number;
+            /** @description Height, m */
+            height: number;
+        };
+        LinkRatingsDto: {
+            /** @description Rated current, A */
+            ratedCurrent?: number;
+            /** @description Largest residual resistance, Ω */
+            residualResistance?: number;
+        };
+        SizeRatingsDto: {
+            /** @enum {string} */
+            technology: "thick-film" | "thin-film" | "metal-film" | "carbon-film" | "metal-oxide" | "wirewound" | "metal-strip" | "metal-foil" | "carbon-composition" | "ceramic-composition";
+            /** @description Temperature the TCR refers to, °C; default 20 */
+            referenceTemperature?: number;
+            /** @description Rated dissipation, W */
+            ratedDissipation?: number;
+            derating?: components["schemas"]["DeratingDto"];
+            /** @description Limiting element voltage, V */
+            limitingElementVoltage?: number;
+            /** @description Maximum overload voltage, V */
+            overloadVoltage?: number;
+            /** @description Insulation voltage, V */
+            insulationVoltage?: number;
+            category?: components["schemas"]["IntervalDto"];
+            /** @description Maximum element temperature, °C */
+            maxElementTemperature?: number;
+            /** @description Thermal resistance element to axis, K/W; 0 is a value */
+            thermalResistance?: number;
+            /** @description Voltage coefficient, magnitude, 1/V */
+            voltageCoefficient?: number;
+            /** @description Current-noise index, dB */
+            noiseIndex?: number;
+            /** @description Inductance, H */
+            inductance?: number;
+            /** @description Capacitance, F */
+            capacitance?: number;
+            pulses?: components["schemas"]["PulseRatingsDto"];
+            drift?: components["schemas"]["DriftDto"];
+            /** @description Shift by soldering, fraction */
+            solderShift?: number;
+            /** @description Shift by humidity, fraction */
+            humidityShift?: number;
+            body?: components["schemas"]["BodyDto"];
+            /** @enum {string} */
+            mounting?: "surface" | "through-hole" | "chassis";
+            features?: ("automotive" | "sulphur-resistant" | "pulse-proof" | "flameproof" | "fusible" | "low-inductance" | "non-magnetic")[];
+            /** @description Style of the handbook's or an agency's table */
+            failureRateStyle?: string;
+            link?: components["schemas"]["LinkRatingsDto"];
+        };
+        OperatingModeDto: {
+            name: string;
+            ratings: components["schemas"]["SizeRatingsDto"];
+        };
+        FamilySizeDto: {
+            size: components["schemas"]["SizeRefDto"];
+            /** @enum {string} */
+            bodyStyle: "chip" | "melf" | "axial" | "cemented" | "housed" | "strip" | "radial";
+            body?: components["schemas"]["BodySizeDto"];
+            /** @enum {string} */
+            mounting?: "surface" | "through-hole" | "chassis";
+            landPattern?: string;
+            termination?: string;
+            soldering?: string;
+            /** @description Number of parts of this size */
+            parts: number;
+            /** @description At least one; never mixed with one another */
+            modes: components["schemas"]["OperatingModeDto"][];
+        };
+        RangeDto: {
+            size: components["schemas"]["SizeRefDto"];
+            /** @description Fraction */
+            tolerance: number;
+            /** @description 1/K; absent where the datasheet states none */
+            tcr?: number;
+            /** @description Lowest resistance, Ω */
+            min: number;
+            /** @description Highest resistance, Ω */
+            max: number;
+            series: ("E3" | "E6" | "E12" | "E24" | "E48" | "E96" | "E192")[];
+        };
+        PackagingDto: {
+            size: components["schemas"]["SizeRefDto"];
+            code: string;
+            description: string;
+            /** @description Pieces */
+            quantity: number;
+        };
+        DatasheetRefDto: {
+            id: number;
+            documentNumber: string;
+            /** @description As the manufacturer numbers it */
+            revision: string;
+        };
+        CitationDto: {
+            /** @description Field of the ratings */
+            field: string;
+            /** @description Absent where it stands for every size */
+            size?: components["schemas"]["SizeRefDto"];
+            datasheet: components["schemas"]["DatasheetRefDto"];
+            page: number;
+            note?: string;
+        };
+        FamilyRevisionDto: {
+            number: number;
+            /** @enum {string} */
+            state: "draft" | "published";
+            /** @description Its ratings are in force */
+            current: boolean;
+            description: string;
+            enteredBy: components["schemas"]["PersonRefDto"];
+            /** @description ISO 8601 */
+            enteredAt: string;
+            publishedBy?: components["schemas"]["PersonRefDto"];
+            /** @description ISO 8601 */
+            publishedAt?: string;
+            datasheet?: components["schemas"]["DatasheetDto"];
+            /** @description °C; 20 °C per IEC 60115-1 where it is absent */
+            referenceTemperature?: number;
+            /** @description Style in the failure-rate handbook's table */
+            failureRateStyle?: string;
+            features: ("automotive" | "sulphur-resistant" | "pulse-proof" | "flameproof" | "fusible" | "low-inductance" | "non-magnetic")[];
+            orderingCodeTemplate: string;
+            orderingCodeExamples: components["schemas"]["OrderingCodeExampleDto"][];
+            sizes: components["schemas"]["FamilySizeDto"][];
+            ranges: components["schemas"]["RangeDto"][];
+            packagings: components["schemas"]["PackagingDto"][];
+            citations: components["schemas"]["CitationDto"][];
+        };
+        RevisionRefDto: {
+            number: number;
+            /** @enum {string} */
+            state: "draft" | "published";
+            /** @description Its ratings are in force */
+            current: boolean;
+            description: string;
+            enteredBy: components["schemas"]["PersonRefDto"];
+            /** @description ISO 8601 */
+            enteredAt: string;
+            publishedBy?: components["schemas"]["PersonRefDto"];
+            /** @description ISO 8601 */
+            publishedAt?: string;
+        };
+        DeclarationDto: {
+            /** @enum {string} */
+            kind: "RoHS" | "REACH";
+            /** @description Day, ISO 8601 */
+            datedOn: string;
+            exemption?: string;
+            statement: string;
+        };
+        CertificateDto: {
+            /** @enum {string} */
+            kind: "safety" | "automotive";
+            standard: string;
+            number: string;
+            /** @description Absent where it covers every size */
+            size?: components["schemas"]["SizeRefDto"];
+            /** @description Day, ISO 8601 */
+            issuedOn: string;
+            /** @description Last day on which it is valid; absent where it does not expire */
+            expiresOn?: string;
+            /** @description Its last day has passed */
+            expired: boolean;
+        };
+        FamilyDetailsDto: {
+            id: number;
+            code: string;
+            name: string;
+            manufacturer: components["schemas"]["NamedDto"];
+            /** @enum {string} */
+            technology: "thick-film" | "thin-film" | "metal-film" | "carbon-film" | "metal-oxide" | "wirewound" | "metal-strip" | "metal-foil" | "carbon-composition" | "ceramic-composition";
+            enteredBy: components["schemas"]["PersonRefDto"];
+            /** @description ISO 8601 */
+            enteredAt: string;
+            /** @description Number of parts */
+            parts: number;
+            /** @description Number of parts by approval, every approval named */
+            approvals: {
+                [key: string]: number;
+            };
+            /** @description Absent before the first publication */
+            revision?: components["schemas"]["FamilyRevisionDto"];
+            /** @description The newest first */
+            revisions: components["schemas"]["RevisionRefDto"][];
+            declarations: components["schemas"]["DeclarationDto"][];
+            certificates: components["schemas"]["CertificateDto"][];
+            datasheets: components["schemas"]["DatasheetDto"][];
+        };
+        CompanyNumberRefDto: {
+            id: number;
+            number: string;
+        };
+        RatingsRevisionDto: {
+            id: number;
+            number: number;
+            /** @description ISO 8601 */
+            publishedAt: string;
+            datasheet?: components["schemas"]["DatasheetRefDto"];
+        };
+        RatingsDto: {
+            /** @enum {string} */
+            technology: "thick-film" | "thin-film" | "metal-film" | "carbon-film" | "metal-oxide" | "wirewound" | "metal-strip" | "metal-foil" | "carbon-composition" | "ceramic-composition";
+            /** @description Nominal resistance, Ω; 0 for a zero-ohm link */
+            resistance: number;
+            /** @description Tolerance, fraction */
+            tolerance?: number;
+            /** @description Temperature coefficient, magnitude, 1/K */
+            tcr?: number;
+            /** @description Temperature the TCR refers to, °C; default 20 */
+            referenceTemperature?: number;
+            /** @description Rated dissipation, W */
+            ratedDissipation?: number;
+            derating?: components["schemas"]["DeratingDto"];
+            /** @description Limiting element voltage, V */
+            limitingElementVoltage?: number;
+            /** @description Maximum overload voltage, V */
+            overloadVoltage?: number;
+            /** @description Insulation voltage, V */
+            insulationVoltage?: number;
+            category?: components["schemas"]["IntervalDto"];
+            /** @description Maximum element temperature, °C */
+            maxElementTemperature?: number;
+            /** @description Thermal resistance element to axis, K/W; 0 is a value */
+            thermalResistance?: number;
+            /** @description Voltage coefficient, magnitude, 1/V */
+            voltageCoefficient?: number;
+            /** @description Current-noise index, dB */
+            noiseIndex?: number;
+            /** @description Inductance, H */
+            inductance?: number;
+            /** @description Capacitance, F */
+            capacitance?: number;
+            pulses?: components["schemas"]["PulseRatingsDto"];
+            drift?: components["schemas"]["DriftDto"];
+            /** @description Shift by soldering, fraction */
+            solderShift?: number;
+            /** @description Shift by humidity, fraction */
+            humidityShift?: number;
+            body?: components["schemas"]["BodyDto"];
+            /** @enum {string} */
+            mounting?: "surface" | "through-hole" | "chassis";
+            features?: ("automotive" | "sulphur-resistant" | "pulse-proof" | "flameproof" | "fusible" | "low-inductance" | "non-magnetic")[];
+            certificates?: string[];
+            /** @description Style of the handbook's or an agency's table */
+            failureRateStyle?: string;
+            link?: components["schemas"]["LinkRatingsDto"];
+        };
+        PartModeDto: {
+            /** @description Absent where the size has one operating mode only */
+            name?: string;
+            ratings: components["schemas"]["RatingsDto"];
+        };
+        OrderingCodeDto: {
+            /** @description Code of the packaging */
+            packaging: string;
+            description: string;
+            /** @description Pieces in one packaging */
+            quantity: number;
+            /** @description Absent where the template of the family cannot write it */
+            code?: string;
+        };
+        SourceDto: {
+            id: number;
+            manufacturerPartNumber: string;
+            manufacturer: components["schemas"]["NamedDto"];
+            family: components["schemas"]["NamedDto"];
+            /** @description Place in the approved manufacturer list, from 1 */
+            position: number;
+            /** @enum {string} */
+            approval: "draft" | "in-review" | "approved" | "preferred" | "restricted" | "withdrawn";
+            /** @enum {string} */
+            supply: "active" | "not-recommended" | "last-time-buy" | "discontinued";
+            /** @description Lowest unit price at 1000 pieces in force today, EUR */
+            unitPrice?: number;
+            /** @description Day, ISO 8601 */
+            lastOrderOn?: string;
+        };
+        PriceBreakDto: {
+            /** @description From so many pieces */
+            quantity: number;
+            /** @description A piece, in the currency of the offer */
+            unitPrice: number;
+        };
+        OfferDto: {
+            id: number;
+            supplier: components["schemas"]["NamedDto"];
+            /** @description Code of the packaging */
+            packaging: string;
+            /** @enum {string} */
+            currency: "EUR";
+            /** @description Pieces */
+            minimumOrder: number;
+            /** @description Pieces; orders are multiples of it */
+            orderMultiple: number;
+            leadTimeDays: number;
+            /** @description First day, ISO 8601 */
+            validFrom: string;
+            /** @description Last day, ISO 8601 */
+            validUntil: string;
+            /** @description Today lies between its first and its last day */
+            inForce: boolean;
+            priceBreaks: components["schemas"]["PriceBreakDto"][];
+            enteredBy: components["schemas"]["PersonRefDto"];
+            /** @description ISO 8601 */
+            enteredAt: string;
+        };
+        RestrictionDto: {
+            words: string;
+            /** @description Absent where it holds everywhere */
+            scope?: string;
+        };
+        ApprovalStepDto: {
+            reason: string;
+            changedBy: components["schemas"]["PersonRefDto"];
+            /** @description ISO 8601 */
+            changedAt: string;
+            /** @enum {string} */
+            from?: "draft" | "in-review" | "approved" | "preferred" | "restricted" | "withdrawn";
+            /** @enum {string} */
+            to: "draft" | "in-review" | "approved" | "preferred" | "restricted" | "withdrawn";
+            /** @description Of a restriction */
+            words?: string;
+            /** @description Of a restriction */
+            scope?: string;
+            /** @description Why a part without a second source was promoted all the same */
+            exception?: string;
+        };
+        SupplyStepDto: {
+            reason: string;
+            changedBy: components["schemas"]["PersonRefDto"];
+            /** @description ISO 8601 */
+            changedAt: string;
+            /** @enum {string} */
+            from?: "active" | "not-recommended" | "last-time-buy" | "discontinued";
+            /** @enum {string} */
+            to: "active" | "not-recommended" | "last-time-buy" | "discontinued";
+            /** @description Day, ISO 8601 */
+            lastOrderOn?: string;
+        };
+        OpenReviewDto: {
+            id: number;
+            /** @enum {string} */
+            cause: "left-active-supply" | "submitted";
+            words: string;
+            openedBy: components["schemas"]["PersonRefDto"];
+            /** @description ISO 8601 */
+            openedAt: string;
+        };
+        PartDetailsDto: {
+            id: number;
+            manufacturerPartNumber: string;
+            companyPartNumber?: components["schemas"]["CompanyNumberRefDto"];
+            manufacturer: components["schemas"]["NamedDto"];
+            family: components["schemas"]["NamedDto"];
+            /** @enum {string} */
+            technology: "thick-film" | "thin-film" | "metal-film" | "carbon-film" | "metal-oxide" | "wirewound" | "metal-strip" | "metal-foil" | "carbon-composition" | "ceramic-composition";
+            size: components["schemas"]["SizeRefDto"];
+            /** @enum {string} */
+            bodyStyle: "chip" | "melf" | "axial" | "cemented" | "housed" | "strip" | "radial";
+            body?: components["schemas"]["BodySizeDto"];
+            /** @enum {string} */
+            mounting?: "surface" | "through-hole" | "chassis";
+            /** @description Ω; 0 for a zero-ohm link */
+            resistance: number;
+            /** @description Fraction; absent for a link */
+            tolerance?: number;
+            /** @description 1/K; absent where the datasheet states none */
+            tcr?: number;
+            /** @description W, in the first operating mode */
+            ratedDissipation?: number;
+            /** @enum {string} */
+            approval: "draft" | "in-review" | "approved" | "preferred" | "restricted" | "withdrawn";
+            /** @enum {string} */
+            supply: "active" | "not-recommended" | "last-time-buy" | "discontinued";
+            /** @description Lowest unit price at 1000 pieces in force today, EUR; absent where no offer is in force */
+            unitPrice?: number;
+            /** @description Another manufacturer’s approved and active part stands under the same company part number */
+            secondSource: boolean;
+            /** @description Of the part’s standing; send it with a change */
+            version: number;
+            enteredBy: components["schemas"]["PersonRefDto"];
+            /** @description ISO 8601 */
+            enteredAt: string;
+            landPattern?: string;
+            termination?: string;
+            soldering?: string;
+            revision: components["schemas"]["RatingsRevisionDto"];
+            /** @description Operating modes, never mixed with one another */
+            modes: components["schemas"]["PartModeDto"][];
+            /** @description Where each rating stands */
+            citations: components["schemas"]["CitationDto"][];
+            /** @description Full ordering codes, one a packaging */
+            orderingCodes: components["schemas"]["OrderingCodeDto"][];
+            /** @description What may be bought under the company part number, this part included; empty without one */
+            sources: components["schemas"]["SourceDto"][];
+            /** @description Those in force first */
+            offers: components["schemas"]["OfferDto"][];
+            /** @description Of a restricted part */
+            restriction?: components["schemas"]["RestrictionDto"];
+            /** @description Day, ISO 8601 */
+            lastOrderOn?: string;
+            /** @description The newest first */
+            approvalHistory: components["schemas"]["ApprovalStepDto"][];
+            /** @description The newest first */
+            supplyHistory: components["schemas"]["SupplyStepDto"][];
+            openReviews: components["schemas"]["OpenReviewDto"][];
+            declarations: components["schemas"]["DeclarationDto"][];
+            /** @description Those that cover the size */
+            certificates: components["schemas"]["CertificateDto"][];
+        };
+        PartSummaryDto: {
+            id: number;
+            manufacturerPartNumber: string;
+            companyPartNumber?: components["schemas"]["CompanyNumberRefDto"];
+            manufacturer: components["schemas"]["NamedDto"];
+            family: components["schemas"]["NamedDto"];
+            /** @enum {string} */
+            technology: "thick-film" | "thin-film" | "metal-film" | "carbon-film" | "metal-oxide" | "wirewound" | "metal-strip" | "metal-foil" | "carbon-composition" | "ceramic-composition";
+            size: components["schemas"]["SizeRefDto"];
+            /** @enum {string} */
+            bodyStyle: "chip" | "melf" | "axial" | "cemented" | "housed" | "strip" | "radial";
+            body?: components["schemas"]["BodySizeDto"];
+            /** @enum {string} */
+            mounting?: "surface" | "through-hole" | "chassis";
+            /** @description Ω; 0 for a zero-ohm link */
+            resistance: number;
+            /** @description Fraction; absent for a link */
+            tolerance?: number;
+            /** @description 1/K; absent where the datasheet states none */
+            tcr?: number;
+            /** @description W, in the first operating mode */
+            ratedDissipation?: number;
+            /** @enum {string} */
+            approval: "draft" | "in-review" | "approved" | "preferred" | "restricted" | "withdrawn";
+            /** @enum {string} */
+            supply: "active" | "not-recommended" | "last-time-buy" | "discontinued";
+            /** @description Lowest unit price at 1000 pieces in force today, EUR; absent where no offer is in force */
+            unitPrice?: number;
+            /** @description Another manufacturer’s approved and active part stands under the same company part number */
+            secondSource: boolean;
+        };
+        DifferenceDto: {
+            /** @description Field of the ratings */
+            field: string;
+            /**
+             * @description unknown: one of the two does not state it
+             * @enum {string}
+             */
+            sense: "better" | "worse" | "different" | "unknown";
+            /** @description Of the part, with its unit; absent where it is not stated */
+            own?: string;
+            /** @description Of the alternate, with its unit; absent where it is not stated */
+            alternate?: string;
+        };
+        AlternateDto: {
+            part: components["schemas"]["PartSummaryDto"];
+            /** @description Stands under the same company part number */
+            sameCompanyPartNumber: boolean;
+            otherManufacturer: boolean;
+            /** @description Approved or preferred, and in active supply */
+            sound: boolean;
+            /** @description Operating mode of the alternate in which it is compared, where it has several */
+            mode?: string;
+            differences: components["schemas"]["DifferenceDto"][];
+        };
+        AlternatesDto: {
+            /** @description Number of all that there are */
+            total: number;
+            /** @description At most 100: those under the same company part number first, then other manufacturers’ */
+            items: components["schemas"]["AlternateDto"][];
+        };
+        ForbiddenByDto: {
+            /** @description Name of the rule, as in a refusal */
+            rule: string;
+            words: string;
+        };
+        DemandDto: {
+            /** @enum {string} */
+            name: "datasheet" | "second-source" | "active-supply" | "offer" | "words" | "scope" | "last-order-date";
+            met: boolean;
+            /** @description How it is, in a sentence */
+            words: string;
+            /**
+             * @description Field of the change that fulfils it; `to` where only the part itself can
+             * @enum {string}
+             */
+            field: "to" | "words" | "scope" | "exception" | "lastOrderDate";
+        };
+        ApprovalTransitionDto: {
+            /**
+             * @description What it is called in the table of rules
+             * @enum {string}
+             */
+            action: "read" | "compute" | "create" | "update" | "submit" | "approve" | "promote" | "restrict" | "withdraw" | "set-supply-status" | "set-last-order-date" | "invite" | "change-roles" | "deactivate" | "reactivate" | "manage";
+            /** @description The rules let the person who asks do this to this part */
+            allowed: boolean;
+            forbiddenBy?: components["schemas"]["ForbiddenByDto"];
+            /** @description As things stand, with nothing filled in */
+            demands: components["schemas"]["DemandDto"][];
+            /** @enum {string} */
+            to: "in-review" | "approved" | "preferred" | "restricted" | "withdrawn";
+        };
+        SupplyTransitionDto: {
+            /**
+             * @description What it is called in the table of rules
+             * @enum {string}
+             */
+            action: "read" | "compute" | "create" | "update" | "submit" | "approve" | "promote" | "restrict" | "withdraw" | "set-supply-status" | "set-last-order-date" | "invite" | "change-roles" | "deactivate" | "reactivate" | "manage";
+            /** @description The rules let the person who asks do this to this part */
+            allowed: boolean;
+            forbiddenBy?: components["schemas"]["ForbiddenByDto"];
+            /** @description As things stand, with nothing filled in */
+            demands: components["schemas"]["DemandDto"][];
+            /** @enum {string} */
+            to: "active" | "not-recommended" | "last-time-buy" | "discontinued";
+        };
+        TransitionsDto: {
+            /** @description Send it with a change */
+            version: number;
+            /** @enum {string} */
+            approval: "draft" | "in-review" | "approved" | "preferred" | "restricted" | "withdrawn";
+            /** @enum {string} */
+            supply: "active" | "not-recommended" | "last-time-buy" | "discontinued";
+            approvalTransitions: components["schemas"]["ApprovalTransitionDto"][];
+            supplyTransitions: components["schemas"]["SupplyTransitionDto"][];
+        };
+        ApprovalChangeForm: {
+            reason: string;
+            /** @description Version of the part that the change is made on */
+            version: number;
+            /** @enum {string} */
+            to: "in-review" | "approved" | "preferred" | "restricted" | "withdrawn";
+            /** @description Of a restriction: what the part may be used for */
+            words?: string;
+            /** @description Of a restriction: where it holds */
+            scope?: string;
+            /** @description Of a promotion: why one source will do */
+            exception?: string;
+        };
+        SupplyChangeForm: {
+            reason: string;
+            /** @description Version of the part that the change is made on */
+            version: number;
+            /** @enum {string} */
+            to: "active" | "not-recommended" | "last-time-buy" | "discontinued";
+            /** @description Day, ISO 8601; a last-time buy needs it */
+            lastOrderDate?: string;
+        };
+        CompanyPartNumberSummaryDto: {
+            id: number;
+            number: string;
+            description: string;
+            /** @description Number of parts that may be bought under it */
+            sources: number;
+            /** @description Of them, approved or preferred and in active supply */
+            soundSources: number;
+        };
+        CompanyPartNumberList: {
+            total: number;
+            items: components["schemas"]["CompanyPartNumberSummaryDto"][];
+        };
+        ApprovedSourceDto: {
+            /** @description From 1 */
+            position: number;
+            addedBy: components["schemas"]["PersonRefDto"];
+            /** @description ISO 8601 */
+            addedAt: string;
+            part: components["schemas"]["PartSummaryDto"];
+        };
+        CompanyPartNumberDto: {
+            id: number;
+            number: string;
+            description: string;
+            enteredBy: components["schemas"]["PersonRefDto"];
+            /** @description ISO 8601 */
+            enteredAt: string;
+            /** @description The approved manufacturer list, in its order */
+            sources: components["schemas"]["ApprovedSourceDto"][];
+        };
+        ManufacturerFacet: {
+            id: number;
+            code: string;
+            name: string;
+            /** @description Number of parts that the filter lets through */
+            parts: number;
+        };
+        FamilyFacet: {
+            id: number;
+            code: string;
+            name: string;
+            /** @description Number of parts that the filter lets through */
+            parts: number;
+            manufacturerId: number;
+        };
+        TechnologyFacet: {
+            /** @description Number of parts that the filter lets through */
+            parts: number;
+            /** @enum {string} */
+            value: "thick-film" | "thin-film" | "metal-film" | "carbon-film" | "metal-oxide" | "wirewound" | "metal-strip" | "metal-foil" | "carbon-composition" | "ceramic-composition";
+        };
+        SizeFacet: {
+            /** @description Number of parts that the filter lets through */
+            parts: number;
+            /** @description Inch code of a chip, or the trade’s code of the body */
+            code: string;
+            /** @description Metric codes of the sizes that bear the code; empty for none */
+            metricCodes: string[];
+        };
+        SeriesFacet: {
+            /** @description Number of parts that the filter lets through */
+            parts: number;
+            /** @enum {string} */
+            value: "E3" | "E6" | "E12" | "E24" | "E48" | "E96" | "E192";
+        };
+        NumberFacet: {
+            /** @description Number of parts that the filter lets through */
+            parts: number;
+            value: number;
+        };
+        MountingFacet: {
+            /** @description Number of parts that the filter lets through */
+            parts: number;
+            /** @enum {string} */
+            value: "surface" | "through-hole" | "chassis";
+        };
+        FacetsDto: {
+            manufacturers: components["schemas"]["ManufacturerFacet"][];
+            families: components["schemas"]["FamilyFacet"][];
+            technologies: components["schemas"]["TechnologyFacet"][];
+            sizes: components["schemas"]["SizeFacet"][];
+            /** @description A part can be in several */
+            series: components["schemas"]["SeriesFacet"][];
+            /** @description Fractions */
+            tolerances: components["schemas"]["NumberFacet"][];
+            /** @description 1/K */
+            tcrs: components["schemas"]["NumberFacet"][];
+            mountings: components["schemas"]["MountingFacet"][];
+        };
+        PartHits: {
+            /** @description Number of all that were found */
+            total: number;
+            items: components["schemas"]["PartSummaryDto"][];
+        };
+        FamilyHitDto: {
+            id: number;
+            code: string;
+            name: string;
+            manufacturer: components["schemas"]["NamedDto"];
+            /** @enum {string} */
+            technology: "thick-film" | "thin-film" | "metal-film" | "carbon-film" | "metal-oxide" | "wirewound" | "metal-strip" | "metal-foil" | "carbon-composition" | "ceramic-composition";
+        };
+        FamilyHits: {
+            /** @description Number of all that were found */
+            total: number;
+            items: components["schemas"]["FamilyHitDto"][];
+        };
+        ManufacturerHits: {
+            /** @description Number of all that were found */
+            total: number;
+            items: components["schemas"]["NamedDto"][];
+        };
+        TextSearchResult: {
+            parts: components["schemas"]["PartHits"];
+            families: components["schemas"]["FamilyHits"];
+            manufacturers: components["schemas"]["ManufacturerHits"];
+        };
+        ReviewDto: {
+            id: number;
+            /** @enum {string} */
+            cause: "left-active-supply" | "submitted";
+            words: string;
+            openedBy: components["schemas"]["PersonRefDto"];
+            /** @description ISO 8601 */
+            openedAt: string;
+            part: components["schemas"]["PartSummaryDto"];
+            /** @enum {string} */
+            state: "open" | "closed";
+            closedBy?: components["schemas"]["PersonRefDto"];
+            /** @description ISO 8601 */
+            closedAt?: string;
+            /**
+             * @description Approval that closed it
+             * @enum {string}
+             */
+            outcome?: "draft" | "in-review" | "approved" | "preferred" | "restricted" | "withdrawn";
+        };
+        ReviewList: {
+            total: number;
+            /** @description Open ones the oldest first, closed ones the newest first */
+            items: components["schemas"]["ReviewDto"][];
+        };
+        PolicyDto: {
+            /** @description Id of the version */
+            id: number;
+            name: string;
+            /** @description Number of the version within its policy */
+            version: number;
+            /** @enum {string} */
+            origin: "company" | "agency";
+            /** @description Where its figures come from */
+            source: string;
+            /** @description Whether it is the company's policy in force */
+            inForce: boolean;
+            note: string;
+            publishedAt?: string;
+            /** @description Absent for an agency's table, which comes with the program */
+            publishedBy?: string;
+        };
+        PolicyList: {
+            items: components["schemas"]["PolicyDto"][];
+        };
+        PolicyMatchDto: {
+            /** @description One technology or several */
+            technology?: ("thick-film" | "thin-film" | "metal-film" | "carbon-film" | "metal-oxide" | "wirewound" | "metal-strip" | "metal-foil" | "carbon-composition" | "ceramic-composition")[];
+            /** @enum {string} */
+            mounting?: "surface" | "through-hole" | "chassis";
+            /** @description Style of the handbook's or the agency's table */
+            style?: string;
+            /** @description Largest tolerance the entry covers, fraction */
+            tolerance?: number;
+        };
+        PolicyEntryDto: {
+            match: components["schemas"]["PolicyMatchDto"];
+            /** @description Share of the rated dissipation */
+            powerRatio: number;
+            /** @enum {string} */
+            reading: "parallel" | "multiplied";
+            /** @description Parallel line full up to, °C */
+            from?: number;
+            /** @description Parallel line zero at, °C */
+            zero?: number;
+            /** @description Share of the limiting element voltage */
+            voltageRatio: number;
+            /** @description Share of the pulse rating */
+            pulseRatio?: number;
+            /** @description Never passed, even unloaded, °C */
+            maxTemperature?: number;
+            /** @description Kept below the maximum element temperature, K */
+            reserve?: number;
+            /** @description Altitude factors [[m, factor], …], rising */
+            altitude?: number[][];
+        };
+        PolicyVersionDto: {
+            /** @description Id of the version */
+            id: number;
+            name: string;
+            /** @description Number of the version within its policy */
+            version: number;
+            /** @enum {string} */
+            origin: "company" | "agency";
+            /** @description Where its figures come from */
+            source: string;
+            /** @description Whether it is the company's policy in force */
+            inForce: boolean;
+            note: string;
+            publishedAt?: string;
+            /** @description Absent for an agency's table, which comes with the program */
+            publishedBy?: string;
+            entries: components["schemas"]["PolicyEntryDto"][];
+        };
+        NotationDto: {
+            /** @description SI */
+            value: number;
+            /** @description As it is printed, e.g. 4.7 kΩ */
+            text: string;
+            /** @description Fraction, where the text of a resistance carries one */
+            tolerance?: number;
+        };
+        PreferredValuesDto: {
+            /** @description Ω, rising, both ends included */
+            values: number[];
+        };
+        MarkingReadingDto: {
+            kind: string;
+            /** @description Ω */
+            resistance: number;
+            /** @description Fraction */
+            tolerance?: number;
+            /** @description 1/K */
+            tcr?: number;
+        };
+        MarkingFormDto: {
+            kind: string;
+            text?: string;
+            bands?: string[];
+        };
+        MarkingDto: {
+            /** @description Everything the text can mean */
+            readings?: components["schemas"]["MarkingReadingDto"][];
+            /** @description The forms a resistance can bear */
+            forms?: components["schemas"]["MarkingFormDto"][];
+        };
+        PolicyVersionRefDto: {
+            /** @description Id of the version */
+            id: number;
+            /** @description Number of the version within its policy */
+            version: number;
+            /** @description Name of the policy */
+            name: string;
+        };
+        WindowDto: {
+            /** @description Lowest resistance over life, Ω; 0 asks for a zero-ohm link */
+            lower: number;
+            /** @description Highest resistance over life, Ω */
+            upper: number;
+            /** @description Nominal resistance the circuit was drawn with, Ω */
+            nominal?: number;
+        };
+        LimitsDto: {
+            voltage: components["schemas"]["IntervalDto"];
+            current: components["schemas"]["IntervalDto"];
+        };
+        PowerDto: {
+            /** @description Largest power, W */
+            max: number;
+        };
+        LoadDto: {
+            voltage?: components["schemas"]["IntervalDto"];
+            current?: components["schemas"]["IntervalDto"];
+            power?: components["schemas"]["PowerDto"];
+        };
+        PulseDto: {
+            /** @enum {string} */
+            shape: "rectangular" | "triangular" | "half-sine" | "exponential" | "capacitor-discharge" | "surge-1.2/50" | "surge-10/700" | "waveform";
+            /** @description Peak voltage, V; the open-circuit setting of a surge */
+            voltage?: number;
+            /** @description Peak current, A */
+            current?: number;
+            /** @description Peak power, W */
+            power?: number;
+            /** @description Duration or time constant, s */
+            duration?: number;
+            /** @description Period, s */
+            period?: number;
+            /** @description Number over life, where not periodic */
+            count?: number;
+            /** @description Capacitance, F */
+            capacitance?: number;
+            /** @description Source resistance, Ω */
+            sourceResistance?: number;
+            /** @description Samples [s, V or A] */
+            samples?: number[][];
+        };
+        AmbientDto: {
+            /** @description Smallest */
+            min: number;
+            /** @description Largest */
+            max: number;
+            /** @description Rise inside the enclosure, K */
+            enclosureRise?: number;
+            /** @description Hottest terminal, °C */
+            terminal?: number;
+            /** @description Hottest case, °C */
+            case?: number;
+            /** @description Altitude, m */
+            altitude?: number;
+        };
+        LifeDto: {
+            /** @description Life, h */
+            hours: number;
+        };
+        NoiseDto: {
+            /** @description Lower end of the band, Hz */
+            from: number;
+            /** @description Upper end of the band, Hz */
+            to: number;
+            /** @description Largest noise, V rms */
+            limit: number;
+            /** @description Direct voltage across the part, V */
+            bias?: number;
+        };
+        FrequencyDto: {
+            /** @description Frequency, Hz */
+            at: number;
+            /** @description Allowed change of |Z| against R, fraction */
+            within: number;
+        };
+        InsulationDto: {
+            /** @description Voltage between the element and what it may touch, V */
+            voltage: number;
+        };
+        BodyLimitDto: {
+            /** @description Largest length, m */
+            length?: number;
+            /** @description Largest width, m */
+            width?: number;
+            /** @description Largest height, m */
+            height?: number;
+        };
+        SafetyDto: {
+            /** @description Connected to the mains */
+            mains?: boolean;
+            /** @description Has a safety function */
+            function?: boolean;
+        };
+        DutyDto: {
+            window?: components["schemas"]["WindowDto"];
+            limits?: components["schemas"]["LimitsDto"];
+            load?: components["schemas"]["LoadDto"];
+            pulses?: components["schemas"]["PulseDto"][];
+            ambient?: components["schemas"]["AmbientDto"];
+            life?: components["schemas"]["LifeDto"];
+            /**
+             * @description How deviations add; default worst-case
+             * @enum {string}
+             */
+            deviation?: "worst-case" | "root-sum-square";
+            noise?: components["schemas"]["NoiseDto"];
+            frequency?: components["schemas"]["FrequencyDto"];
+            insulation?: components["schemas"]["InsulationDto"];
+            /** @enum {string} */
+            mounting?: "surface" | "through-hole" | "chassis";
+            body?: components["schemas"]["BodyLimitDto"];
+            features?: ("automotive" | "sulphur-resistant" | "pulse-proof" | "flameproof" | "fusible" | "low-inductance" | "non-magnetic")[];
+            safety?: components["schemas"]["SafetyDto"];
+            /** @description Asks for a second source */
+            secondSource?: boolean;
+            /** @description Absent: approved and preferred */
+            approvals?: ("draft" | "in-review" | "approved" | "preferred" | "restricted" | "withdrawn")[];
+            /** @description Absent: active */
+            supply?: ("active" | "not-recommended" | "last-time-buy" | "discontinued")[];
+        };
+        RequirementRequest: {
+            duty: components["schemas"]["DutyDto"];
+        };
+        ImpliedWindowDto: {
+            /** @description Ω */
+            lower: number;
+            /** @description Ω; absent where nothing bounds it */
+            upper?: number;
+            /** @description Ω */
+            nominal?: number;
+        };
+        ImpliedIntervalDto: {
+            min: number;
+            /** @description Absent where nothing bounds it */
+            max?: number;
+        };
+        RequirementDto: {
+            window?: components["schemas"]["ImpliedWindowDto"];
+            /** @description V */
+            voltage?: components["schemas"]["ImpliedIntervalDto"];
+            /** @description A */
+            current?: components["schemas"]["ImpliedIntervalDto"];
+            /** @description Largest dissipation over the window, W */
+            dissipation?: number;
+        };
+        AssessRatingsRequest: {
+            /** @description A version's id, 'none', or one entry inline; absent = the company's published policy */
+            policy?: number | "none" | components["schemas"]["PolicyEntryDto"];
+            ratings: components["schemas"]["RatingsDto"];
+            duty: components["schemas"]["DutyDto"];
+        };
+        BasisInputDto: {
+            name: string;
+            symbol?: string;
+            value: number | string;
+            unit?: string;
+            /** @enum {string} */
+            from: "duty" | "ratings" | "policy" | "derived" | "catalogue";
+            /** @description Field of the ratings, the duty or the policy */
+            field?: string;
+            citation?: components["schemas"]["CitationDto"];
+        };
+        BasisDto: {
+            words: string;
+            formula?: string;
+            inputs: components["schemas"]["BasisInputDto"][];
+            source: string;
+            notes: string[];
+        };
+        CheckResultDto: {
+            /** @enum {string} */
+            check: "value" | "dissipation" | "element-temperature" | "voltage" | "single-pulse" | "repeated-pulse" | "pulse-voltage" | "insulation" | "category-temperature" | "noise" | "frequency" | "link-current" | "link-resistance" | "body" | "mounting" | "features" | "certificate" | "approval" | "supply" | "second-source";
+            /** @description In the unit; null for yes-or-no checks and where not known */
+            demand: number | null;
+            allowance: number | null;
+            /**
+             * @description '1' is a fraction, '' a yes-or-no check
+             * @enum {string}
+             */
+            unit: "1" | "W" | "V" | "°C" | "A" | "Ω" | "m" | "";
+            /** @description allowance / demand − 1 */
+            margin: number | null;
+            /** @enum {string} */
+            status: "met" | "unmet" | "unrated";
+            /** @description Data that are missing for a full answer */
+            missing: string[];
+            basis: components["schemas"]["BasisDto"];
+        };
+        BudgetLineDto: {
+            /** @enum {string} */
+            contribution: "tolerance" | "temperature" | "voltage" | "soldering" | "humidity" | "pulse" | "drift";
+            /** @description Fraction of the nominal; null where data are missing */
+            amount: number | null;
+            basis: string;
+            missing: string[];
+        };
+        PermittedDto: {
+            /** @description W */
+            dissipation: number | null;
+            /** @description V */
+            voltage: number | null;
+            /** @description A */
+            current: number | null;
+        };
+        CautionDto: {
+            kind: string;
+            title: string;
+            text: string;
+        };
+        OperatingDto: {
+            /** @description Lowest resistance over life, Ω */
+            low: number;
+            /** @description Highest resistance over life, Ω */
+            high: number;
+            /** @description W */
+            dissipation: number;
+            /** @description Hottest element, °C; null where not known */
+            elementTemperature: number | null;
+            /** @description Steps of the iteration */
+            steps: number;
+        };
+        AssessmentDto: {
+            /** @enum {string} */
+            verdict: "met" | "unmet" | "unrated";
+            checks: components["schemas"]["CheckResultDto"][];
+            budget: components["schemas"]["BudgetLineDto"][];
+            permitted: components["schemas"]["PermittedDto"];
+            /** @description By check, how many times its rating passes its demand */
+            excess: {
+                [key: string]: number;
+            };
+            cautions: components["schemas"]["CautionDto"][];
+            /** @description Absent for a link and where nothing settles */
+            operating?: components["schemas"]["OperatingDto"];
+            /** @description Operating mode used, where the size has several */
+            mode?: string;
+            policy: components["schemas"]["PolicyVersionRefDto"] | ("none" | "inline");
+            /** @description What stands on every result */
+            notice: string;
+        };
+        FiltersDto: {
+            /** @description Words in part numbers, families and manufacturers */
+            text?: string;
+            manufacturers?: number[];
+            families?: number[];
+            technologies?: ("thick-film" | "thin-film" | "metal-film" | "carbon-film" | "metal-oxide" | "wirewound" | "metal-strip" | "metal-foil" | "carbon-composition" | "ceramic-composition")[];
+            /** @description Size codes */
+            sizes?: string[];
+            /** @description Series of preferred values; E48, E96 and E192 accept E24 values too, which families offer at 1 % */
+            series?: ("E3" | "E6" | "E12" | "E24" | "E48" | "E96" | "E192")[];
+            /** @description Fractions */
+            tolerances?: number[];
+            /** @description 1/K */
+            tcrs?: number[];
+            /** @description Has a safety certificate in date */
+            certificate?: boolean;
+            approvals?: ("draft" | "in-review" | "approved" | "preferred" | "restricted" | "withdrawn")[];
+            supply?: ("active" | "not-recommended" | "last-time-buy" | "discontinued")[];
+            /** @description Stands under a company part number */
+            companyPartNumber?: boolean;
+            /** @description Has an offer in force at 1000 pieces */
+            offer?: boolean;
+        };
+        SearchRequest: {
+            /** @description A version's id, 'none', or one entry inline; absent = the company's published policy */
+            policy?: number | "none" | components["schemas"]["PolicyEntryDto"];
+            duty?: components["schemas"]["DutyDto"];
+            filters?: components["schemas"]["FiltersDto"];
+            /**
+             * @default met
+             * @enum {string}
+             */
+            show: "met" | "met-and-unrated";
+            /**
+             * @description Group by company part number, judged by its worst approved source
+             * @enum {string}
+             */
+            group?: "company";
+            /**
+             * @description Column to sort by, with a minus before it for falling order; default preference, price, least excess, id
+             * @enum {string}
+             */
+            sort?: "preference" | "-preference" | "part-number" | "-part-number" | "company-part-number" | "-company-part-number" | "manufacturer" | "-manufacturer" | "family" | "-family" | "size" | "-size" | "resistance" | "-resistance" | "tolerance" | "-tolerance" | "tcr" | "-tcr" | "dissipation" | "-dissipation" | "margin" | "-margin" | "excess" | "-excess" | "approval" | "-approval" | "supply" | "-supply" | "price" | "-price";
+            /** @default 1 */
+            page: number;
+            /** @default 50 */
+            pageSize: number;
+        };
+        AssessedPartDto: {
+            part: components["schemas"]["PartSummaryDto"];
+            assessment: components["schemas"]["AssessmentDto"];
+        };
+        SearchItemDto: {
+            part: components["schemas"]["PartSummaryDto"];
+            assessment: components["schemas"]["AssessmentDto"];
+            /** @description The company part number the row stands for, when grouped */
+            companyPartNumber?: components["schemas"]["CompanyNumberRefDto"];
+            /** @description Every judged source, when grouped */
+            sources?: components["schemas"]["AssessedPartDto"][];
+            /** @description Over-specification, named */
+            overSpecification: string[];
+        };
+        KnockoutDto: {
+            /** @enum {string} */
+            check: "value" | "dissipation" | "element-temperature" | "voltage" | "single-pulse" | "repeated-pulse" | "pulse-voltage" | "insulation" | "category-temperature" | "noise" | "frequency" | "link-current" | "link-resistance" | "body" | "mounting" | "features" | "certificate" | "approval" | "supply" | "second-source";
+            /** @description Unmet at this check; value counts over all, the others over what value leaves */
+            removes: number;
+            /** @description Unmet at this check and at no other */
+            removesAlone: number;
+        };
+        RelaxationDto: {
+            /** @description JSON pointer into the duty */
+            field: string;
+            to: number | string | boolean | string[];
+            /** @description Searching again with it gives the total and these */
+            gains: number;
+        };
+        SearchResultDto: {
+            total: number;
+            /** @description Neither met nor unmet: data are missing */
+            unrated: number;
+            /** @description The total by approval */
+            byApproval: {
+                [key: string]: number;
+            };
+            items: components["schemas"]["SearchItemDto"][];
+            knockouts: components["schemas"]["KnockoutDto"][];
+            relaxations: components["schemas"]["RelaxationDto"][];
+            page: number;
+            pageSize: number;
+        };
+        AssessPartRequest: {
+            /** @description A version's id, 'none', or one entry inline; absent = the company's published policy */
+            policy?: number | "none" | components["schemas"]["PolicyEntryDto"];
+            duty: components["schemas"]["DutyDto"];
+        };
+        Health: {
+            /** @enum {string} */
+            status: "ok";
+            /** @description The newest migration of the database */
+            schema: string;
+        };
     };
-    /** @enum {string} */
-    Role: 'administrator' | 'librarian' | 'component-engineer' | 'designer' | 'purchasing';
-    SignedInUser: {
-      id: number;
-      email: string;
-      name: string;
-      roles: components['schemas']['Role'][];
-    };
-    SignedIn: {
-      user: components['schemas']['SignedInUser'];
-      /** @description The rules of this person, packed by @casl/ability; unpack with unpackRules of @casl/ability/extra */
-      rules: unknown[][];
-      /** @description Goes into the Authorization header as a bearer token; good for ten minutes */
-      accessToken: string;
-    };
-    FieldErrorDocument: {
-      /** @description JSON pointer (RFC 6901) to the faulty field */
-      pointer: string;
-      message: string;
-    };
-    ProblemDocument: {
-      /** @example urn:resistry:problem:malformed */
-      type: string;
-      title: string;
-      status: number;
-      detail: string;
-      /** @description Identifies this request in the log */
-      instance: string;
-      errors?: components['schemas']['FieldErrorDocument'][];
-      /** @description The rule that forbids */
-      rule?: string;
-      /** @description Seconds after which another attempt makes sense */
-      retryAfter?: number;
-    };
-    Me: {
-      user: components['schemas']['SignedInUser'];
-      /** @description The rules of this person, packed by @casl/ability; unpack with unpackRules of @casl/ability/extra */
-      rules: unknown[][];
-    };
-    PasswordResetRequest: {
-      email: string;
-    };
-    PasswordResetTaken: {
-      /** @description The same words whether or not the address has an account */
-      message: string;
-    };
-    NewPassword: {
-      /** @description From the link in the letter */
-      token: string;
-      password: string;
-    };
-    /** @enum {string} */
-    Action:
-      | 'read'
-      | 'compute'
-      | 'create'
-      | 'update'
-      | 'submit'
-      | 'approve'
-      | 'promote'
-      | 'restrict'
-      | 'withdraw'
-      | 'set-supply-status'
-      | 'set-last-order-date'
-      | 'invite'
-      | 'change-roles'
-      | 'deactivate'
-      | 'reactivate'
-      | 'manage';
-    /** @enum {string} */
-    Subject:
-      | 'Account'
-      | 'Search'
-      | 'Part'
-      | 'Family'
-      | 'Manufacturer'
-      | 'CompanyPartNumber'
-      | 'Offer'
-      | 'Policy'
-      | 'User'
-      | 'Permission'
-      | 'AuditEntry'
-      | 'Mail'
-      | 'OutboxMessage'
-      | 'Backup';
-    PermissionRow: {
-      role: components['schemas']['Role'];
-      action: components['schemas']['Action'];
-      subject: components['schemas']['Subject'];
-      /** @description True where it also depends on the thing itself; the sentence says how */
-      conditional: boolean;
-      sentence: string;
-    };
-    PermissionTable: {
-      roles: components['schemas']['Role'][];
-      actions: components['schemas']['Action'][];
-      subjects: components['schemas']['Subject'][];
-      rows: components['schemas']['PermissionRow'][];
-    };
-    AuditEntry: {
-      id: number;
-      /** @description ISO 8601 */
-      recordedAt: string;
-      /** @description Absent where no person acted */
-      actorId?: number;
-      actorName: string;
-      action: string;
-      subjectType: string;
-      subjectId: string;
-      before?: {
-        [key: string]: unknown;
-      };
-      after?: {
-        [key: string]: unknown;
-      };
-      reason?: string;
-    };
-    AuditPage: {
-      items: components['schemas']['AuditEntry'][];
-      /** @description Send as `before` for the next page; absent on the last one */
-      next?: number;
-    };
-    UndeliveredMessage: {
-      id: string;
-      /** @description Topic, such as mail */
-      kind: string;
-      /**
-       * @description dead: given up, until somebody asks for another attempt
-       * @enum {string}
-       */
-      state: 'pending' | 'dead';
-      attempts: number;
-      /** @description ISO 8601 */
-      createdAt: string;
-      /** @description ISO 8601 */
-      nextAttemptAt: string;
-      lastError?: string;
-    };
-    UndeliveredMessages: {
-      /** @description The oldest 200 */
-      items: components['schemas']['UndeliveredMessage'][];
-    };
-    MailSummary: {
-      id: string;
-      from: string;
-      to: string;
-      subject: string;
-      /** @description ISO 8601; empty when the letter says none */
-      date: string;
-    };
-    MailList: {
-      /** @description False where a mail server is configured, so that no letter stays here */
-      kept: boolean;
-      total: number;
-      items: components['schemas']['MailSummary'][];
-    };
-    MailLetter: {
-      id: string;
-      from: string;
-      to: string;
-      subject: string;
-      /** @description ISO 8601; empty when the letter says none */
-      date: string;
-      text: string;
-      /** @description Addresses found in the text */
-      links: string[];
-    };
-    UserDetails: {
-      id: number;
-      email: string;
-      name: string;
-      roles: components['schemas']['Role'][];
-      /** @enum {string} */
-      state: 'active' | 'deactivated';
-      /** @description Send it back with a change; an older one is refused as stale */
-      version: number;
-      /** @description ISO 8601 */
-      createdAt: string;
-      /** @description ISO 8601; absent where the person has never signed in */
-      lastSeenAt?: string;
-    };
-    UserList: {
-      items: components['schemas']['UserDetails'][];
-    };
-    NewRoles: {
-      roles: components['schemas']['Role'][];
-      version: number;
-    };
-    ReasonedChange: {
-      reason: string;
-      version: number;
-    };
-    InvitationDetails: {
-      id: string;
-      email: string;
-      roles: components['schemas']['Role'][];
-      /** @description Name of the administrator who sent it */
-      invitedBy: string;
-      /** @description ISO 8601 */
-      createdAt: string;
-      /** @description ISO 8601 */
-      expiresAt: string;
-      /** @enum {string} */
-      state: 'open' | 'expired';
-    };
-    InvitationList: {
-      items: components['schemas']['InvitationDetails'][];
-    };
-    NewInvitation: {
-      email: string;
-      roles: components['schemas']['Role'][];
-    };
-    InvitationCreated: {
-      id: string;
-    };
-    InvitationToken: {
-      /** @description From the link in the letter */
-      token: string;
-    };
-    InvitationPreview: {
-      email: string;
-      roles: components['schemas']['Role'][];
-      /** @description ISO 8601 */
-      expiresAt: string;
-    };
-    InvitationAcceptanceForm: {
-      /** @description From the link in the letter */
-      token: string;
-      name: string;
-      password: string;
-    };
-    OwnName: {
-      name: string;
-    };
-    OwnPassword: {
-      currentPassword: string;
-      newPassword: string;
-    };
-    OwnSession: {
-      id: string;
-      /** @description What the browser says of itself */
-      userAgent: string;
-      /** @description Network address at sign-in */
-      address: string;
-      /** @description ISO 8601 */
-      createdAt: string;
-      /** @description ISO 8601 */
-      lastUsedAt: string;
-      /** @description Whether this very request belongs to it */
-      current: boolean;
-    };
-    OwnSessions: {
-      items: components['schemas']['OwnSession'][];
-    };
-    BackupDetails: {
-      /** @example 2026-12-01T02-30-00Z-4f1c */
-      name: string;
-      /** @description ISO 8601 */
-      createdAt: string;
-      /** @enum {string} */
-      reason: 'nightly' | 'on-demand';
-      /** @description The newest migration in it */
-      schema: string;
-      files: number;
-      bytes: number;
-    };
-    ListedBackupDetails: {
-      /** @example 2026-12-01T02-30-00Z-4f1c */
-      name: string;
-      /** @description Absent where the backup is damaged so that it cannot say */
-      details?: components['schemas']['BackupDetails'];
-    };
-    BackupList: {
-      items: components['schemas']['ListedBackupDetails'][];
-    };
-    BackupCheck: {
-      /** @description Whether it can be restored */
-      sound: boolean;
-      /** @description What is wrong with it */
-      faults: string[];
-    };
-    Health: {
-      /** @enum {string} */
-      status: 'ok';
-      /** @description The newest migration of the database */
-      schema: string;
-    };
-  };
-  responses: never;
-  parameters: never;
-  requestBodies: never;
-  headers: never;
-  pathItems: never;
+    responses: never;
+    parameters: never;
+    requestBodies: never;
+    headers: never;
+    pathItems: never;
 }
 export type $defs = Record<string, never>;
 export interface operations {
-  signIn: {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
-    };
-    requestBody: {
-      content: {
-        'application/json': components['schemas']['SignIn'];
-      };
-    };
-    responses: {
-      200: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['SignedIn'];
-        };
-      };
-      401: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ProblemDocument'];
-        };
-      };
-      429: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ProblemDocument'];
-        };
-      };
-    };
-  };
-  refreshSignIn: {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
-    };
-    requestBody?: never;
-    responses: {
-      200: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['SignedIn'];
-        };
-      };
-      401: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ProblemDocument'];
-        };
-      };
-      403: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ProblemDocument'];
-        };
-      };
-    };
-  };
-  signOut: {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
-    };
-    requestBody?: never;
-    responses: {
-      204: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content?: never;
-      };
-      403: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ProblemDocument'];
-        };
-      };
-    };
-  };
-  signOutEverywhere: {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
-    };
-    requestBody?: never;
-    responses: {
-      204: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content?: never;
-      };
-      401: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ProblemDocument'];
-        };
-      };
-      403: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ProblemDocument'];
-        };
-      };
-    };
-  };
-  readMe: {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
-    };
-    requestBody?: never;
-    responses: {
-      200: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['Me'];
-        };
-      };
-      401: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ProblemDocument'];
-        };
-      };
-      403: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ProblemDocument'];
-        };
-      };
-    };
-  };
-  requestPasswordReset: {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
-    };
-    requestBody: {
-      content: {
-        'application/json': components['schemas']['PasswordResetRequest'];
-      };
-    };
-    responses: {
-      202: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['PasswordResetTaken'];
-        };
-      };
-      429: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ProblemDocument'];
-        };
-      };
-    };
-  };
-  resetPassword: {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
-    };
-    requestBody: {
-      content: {
-        'application/json': components['schemas']['NewPassword'];
-      };
-    };
-    responses: {
-      204: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content?: never;
-      };
-      422: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ProblemDocument'];
-        };
-      };
-    };
-  };
-  readPermissions: {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
-    };
-    requestBody?: never;
-    responses: {
-      200: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['PermissionTable'];
-        };
-      };
-      401: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ProblemDocument'];
-        };
-      };
-      403: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ProblemDocument'];
-        };
-      };
-    };
-  };
-  listAuditEntries: {
-    parameters: {
-      query?: {
-        /** @description Kind of thing, such as Part */
-        subjectType?: string;
-        subjectId?: string;
-        /** @description Id of the person who acted */
-        actor?: number;
-        action?: string;
-        /** @description Found in the reason, the name of the actor or the changed fields */
-        text?: string;
-        /** @description ISO 8601, inclusive */
-        from?: string;
-        /** @description ISO 8601, exclusive */
-        to?: string;
-        /** @description The `next` of the page before */
-        before?: number;
-        limit?: number;
-      };
-      header?: never;
-      path?: never;
-      cookie?: never;
-    };
-    requestBody?: never;
-    responses: {
-      200: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['AuditPage'];
-        };
-      };
-      401: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ProblemDocument'];
-        };
-      };
-      403: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ProblemDocument'];
-        };
-      };
-    };
-  };
-  listUndelivered: {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
-    };
-    requestBody?: never;
-    responses: {
-      200: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['UndeliveredMessages'];
-        };
-      };
-      401: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ProblemDocument'];
-        };
-      };
-      403: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ProblemDocument'];
-        };
-      };
-    };
-  };
-  retryDelivery: {
-    parameters: {
-      query?: never;
-      header?: never;
-      path: {
-        id: string;
-      };
-      cookie?: never;
-    };
-    requestBody?: never;
-    responses: {
-      202: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content?: never;
-      };
-      401: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ProblemDocument'];
-        };
-      };
-      403: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ProblemDocument'];
-        };
-      };
-      404: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ProblemDocument'];
-        };
-      };
-    };
-  };
-  listMail: {
-    parameters: {
-      query?: {
-        offset?: number;
-        limit?: number;
-      };
-      header?: never;
-      path?: never;
-      cookie?: never;
-    };
-    requestBody?: never;
-    responses: {
-      200: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['MailList'];
-        };
-      };
-      401: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ProblemDocument'];
-        };
-      };
-      403: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ProblemDocument'];
-        };
-      };
-    };
-  };
-  readMail: {
-    parameters: {
-      query?: never;
-      header?: never;
-      path: {
-        id: string;
-      };
-      cookie?: never;
-    };
-    requestBody?: never;
-    responses: {
-      200: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['MailLetter'];
-        };
-      };
-      401: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ProblemDocument'];
-        };
-      };
-      403: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ProblemDocument'];
-        };
-      };
-      404: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ProblemDocument'];
-        };
-      };
-    };
-  };
-  listUsers: {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
-    };
-    requestBody?: never;
-    responses: {
-      200: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['UserList'];
-        };
-      };
-      401: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ProblemDocument'];
-        };
-      };
-      403: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ProblemDocument'];
-        };
-      };
-    };
-  };
-  readUser: {
-    parameters: {
-      query?: never;
-      header?: never;
-      path: {
-        id: number;
-      };
-      cookie?: never;
-    };
-    requestBody?: never;
-    responses: {
-      200: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['UserDetails'];
-        };
-      };
-      401: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ProblemDocument'];
-        };
-      };
-      403: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ProblemDocument'];
-        };
-      };
-      404: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ProblemDocument'];
-        };
-      };
-    };
-  };
-  changeUserRoles: {
-    parameters: {
-      query?: never;
-      header?: never;
-      path: {
-        id: number;
-      };
-      cookie?: never;
-    };
-    requestBody: {
-      content: {
-        'application/json': components['schemas']['NewRoles'];
-      };
-    };
-    responses: {
-      200: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['UserDetails'];
-        };
-      };
-      401: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ProblemDocument'];
-        };
-      };
-      403: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ProblemDocument'];
-        };
-      };
-      404: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ProblemDocument'];
-        };
-      };
-      409: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ProblemDocument'];
-        };
-      };
-      422: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ProblemDocument'];
-        };
-      };
-    };
-  };
-  deactivateUser: {
-    parameters: {
-      query?: never;
-      header?: never;
-      path: {
-        id: number;
-      };
-      cookie?: never;
-    };
-    requestBody: {
-      content: {
-        'application/json': components['schemas']['ReasonedChange'];
-      };
-    };
-    responses: {
-      200: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['UserDetails'];
-        };
-      };
-      401: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ProblemDocument'];
-        };
-      };
-      403: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ProblemDocument'];
-        };
-      };
-      404: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ProblemDocument'];
-        };
-      };
-      409: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ProblemDocument'];
-        };
-      };
-      422: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ProblemDocument'];
-        };
-      };
-    };
-  };
-  reactivateUser: {
-    parameters: {
-      query?: never;
-      header?: never;
-      path: {
-        id: number;
-      };
-      cookie?: never;
-    };
-    requestBody: {
-      content: {
-        'application/json': components['schemas']['ReasonedChange'];
-      };
-    };
-    responses: {
-      200: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['UserDetails'];
-        };
-      };
-      401: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ProblemDocument'];
-        };
-      };
-      403: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ProblemDocument'];
-        };
-      };
-      404: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ProblemDocument'];
-        };
-      };
-      409: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ProblemDocument'];
-        };
-      };
-      422: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ProblemDocument'];
-        };
-      };
-    };
-  };
-  listInvitations: {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
-    };
-    requestBody?: never;
-    responses: {
-      200: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['InvitationList'];
-        };
-      };
-      401: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ProblemDocument'];
-        };
-      };
-      403: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ProblemDocument'];
-        };
-      };
-    };
-  };
-  invite: {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
-    };
-    requestBody: {
-      content: {
-        'application/json': components['schemas']['NewInvitation'];
-      };
-    };
-    responses: {
-      201: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['InvitationCreated'];
-        };
-      };
-      401: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ProblemDocument'];
-        };
-      };
-      403: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ProblemDocument'];
-        };
-      };
-      409: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ProblemDocument'];
-        };
-      };
-    };
-  };
-  withdrawInvitation: {
-    parameters: {
-      query?: never;
-      header?: never;
-      path: {
-        id: string;
-      };
-      cookie?: never;
-    };
-    requestBody?: never;
-    responses: {
-      204: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content?: never;
-      };
-      401: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ProblemDocument'];
-        };
-      };
-      403: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ProblemDocument'];
-        };
-      };
-      404: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ProblemDocument'];
-        };
-      };
-    };
-  };
-  previewInvitation: {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
-    };
-    requestBody: {
-      content: {
-        'application/json': components['schemas']['InvitationToken'];
-      };
-    };
-    responses: {
-      200: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['InvitationPreview'];
-        };
-      };
-      422: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ProblemDocument'];
-        };
-      };
-    };
-  };
-  acceptInvitation: {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
-    };
-    requestBody: {
-      content: {
-        'application/json': components['schemas']['InvitationAcceptanceForm'];
-      };
-    };
-    responses: {
-      204: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content?: never;
-      };
-      422: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ProblemDocument'];
-        };
-      };
-    };
-  };
-  changeOwnName: {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
-    };
-    requestBody: {
-      content: {
-        'application/json': components['schemas']['OwnName'];
-      };
-    };
-    responses: {
-      204: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content?: never;
-      };
-      401: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ProblemDocument'];
-        };
-      };
-      403: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ProblemDocument'];
-        };
-      };
-    };
-  };
-  changeOwnPassword: {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
-    };
-    requestBody: {
-      content: {
-        'application/json': components['schemas']['OwnPassword'];
-      };
-    };
-    responses: {
-      204: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content?: never;
-      };
-      401: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ProblemDocument'];
-        };
-      };
-      403: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ProblemDocument'];
-        };
-      };
-      422: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ProblemDocument'];
-        };
-      };
-      429: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ProblemDocument'];
-        };
-      };
-    };
-  };
-  listOwnSessions: {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
-    };
-    requestBody?: never;
-    responses: {
-      200: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['OwnSessions'];
-        };
-      };
-      401: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ProblemDocument'];
-        };
-      };
-      403: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ProblemDocument'];
-        };
-      };
-    };
-  };
-  endOwnSession: {
-    parameters: {
-      query?: never;
-      header?: never;
-      path: {
-        id: string;
-      };
-      cookie?: never;
-    };
-    requestBody?: never;
-    responses: {
-      204: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content?: never;
-      };
-      401: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ProblemDocument'];
-        };
-      };
-      403: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ProblemDocument'];
-        };
-      };
-      404: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ProblemDocument'];
-        };
-      };
-    };
-  };
-  listBackups: {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
-    };
-    requestBody?: never;
-    responses: {
-      200: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['BackupList'];
-        };
-      };
-      401: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ProblemDocument'];
-        };
-      };
-      403: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ProblemDocument'];
-        };
-      };
-    };
-  };
-  takeBackup: {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
-    };
-    requestBody?: never;
-    responses: {
-      201: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['BackupDetails'];
-        };
-      };
-      401: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ProblemDocument'];
-        };
-      };
-      403: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ProblemDocument'];
-        };
-      };
-      409: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ProblemDocument'];
-        };
-      };
-    };
-  };
-  checkBackup: {
-    parameters: {
-      query?: never;
-      header?: never;
-      path: {
-        name: string;
-      };
-      cookie?: never;
-    };
-    requestBody?: never;
-    responses: {
-      200: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['BackupCheck'];
-        };
-      };
-      401: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ProblemDocument'];
-        };
-      };
-      403: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ProblemDocument'];
-        };
-      };
-      404: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ProblemDocument'];
-        };
-      };
-    };
-  };
-  readHealth: {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
-    };
-    requestBody?: never;
-    responses: {
-      200: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['Health'];
-        };
-      };
-    };
-  };
+    signIn: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["SignIn"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["SignedIn"];
+                };
+            };
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            429: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+        };
+    };
+    refreshSignIn: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["SignedIn"];
+                };
+            };
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+        };
+    };
+    signOut: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+        };
+    };
+    signOutEverywhere: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+        };
+    };
+    readMe: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["Me"];
+                };
+            };
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+        };
+    };
+    requestPasswordReset: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["PasswordResetRequest"];
+            };
+        };
+        responses: {
+            202: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["PasswordResetTaken"];
+                };
+            };
+            429: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+        };
+    };
+    resetPassword: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["NewPassword"];
+            };
+        };
+        responses: {
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            422: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+        };
+    };
+    readPermissions: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["PermissionTable"];
+                };
+            };
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+        };
+    };
+    listAuditEntries: {
+        parameters: {
+            query?: {
+                /** @description Kind of thing, such as Part */
+                subjectType?: string;
+                subjectId?: string;
+                /** @description Id of the person who acted */
+                actor?: number;
+                action?: string;
+                /** @description Found in the reason, the name of the actor or the changed fields */
+                text?: string;
+                /** @description ISO 8601, inclusive */
+                from?: string;
+                /** @description ISO 8601, exclusive */
+                to?: string;
+                /** @description The `next` of the page before */
+                before?: number;
+                limit?: number;
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["AuditPage"];
+                };
+            };
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+        };
+    };
+    listUndelivered: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["UndeliveredMessages"];
+                };
+            };
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+        };
+    };
+    retryDelivery: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            202: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+        };
+    };
+    listMail: {
+        parameters: {
+            query?: {
+                offset?: number;
+                limit?: number;
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["MailList"];
+                };
+            };
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+        };
+    };
+    readMail: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["MailLetter"];
+                };
+            };
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+        };
+    };
+    listUsers: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["UserList"];
+                };
+            };
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+        };
+    };
+    readUser: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: number;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["UserDetails"];
+                };
+            };
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+        };
+    };
+    changeUserRoles: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: number;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["NewRoles"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["UserDetails"];
+                };
+            };
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            409: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            422: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+        };
+    };
+    deactivateUser: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: number;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["ReasonedChange"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["UserDetails"];
+                };
+            };
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            409: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            422: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+        };
+    };
+    reactivateUser: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: number;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["ReasonedChange"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["UserDetails"];
+                };
+            };
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            409: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            422: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+        };
+    };
+    listInvitations: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["InvitationList"];
+                };
+            };
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+        };
+    };
+    invite: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["NewInvitation"];
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["InvitationCreated"];
+                };
+            };
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            409: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+        };
+    };
+    withdrawInvitation: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+        };
+    };
+    previewInvitation: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["InvitationToken"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["InvitationPreview"];
+                };
+            };
+            422: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+        };
+    };
+    acceptInvitation: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["InvitationAcceptanceForm"];
+            };
+        };
+        responses: {
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            422: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+        };
+    };
+    changeOwnName: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["OwnName"];
+            };
+        };
+        responses: {
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+        };
+    };
+    changeOwnPassword: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["OwnPassword"];
+            };
+        };
+        responses: {
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            422: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            429: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+        };
+    };
+    listOwnSessions: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["OwnSessions"];
+                };
+            };
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+        };
+    };
+    endOwnSession: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+        };
+    };
+    listBackups: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["BackupList"];
+                };
+            };
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+        };
+    };
+    takeBackup: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["BackupDetails"];
+                };
+            };
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            409: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+        };
+    };
+    checkBackup: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                name: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["BackupCheck"];
+                };
+            };
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+        };
+    };
+    listManufacturers: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ManufacturerList"];
+                };
+            };
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+        };
+    };
+    listFamilies: {
+        parameters: {
+            query?: {
+                /** @description Words that code, name and manufacturer together must all contain */
+                q?: string;
+                technology?: "thick-film" | "thin-film" | "metal-film" | "carbon-film" | "metal-oxide" | "wirewound" | "metal-strip" | "metal-foil" | "carbon-composition" | "ceramic-composition";
+                /** @description Id of the manufacturer */
+                manufacturer?: number;
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["FamilyListDto"];
+                };
+            };
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+        };
+    };
+    readFamily: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: number;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["FamilyDetailsDto"];
+                };
+            };
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+        };
+    };
+    readFamilyRevision: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: number;
+                number: number;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["FamilyRevisionDto"];
+                };
+            };
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+        };
+    };
+    readPart: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: number;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["PartDetailsDto"];
+                };
+            };
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+        };
+    };
+    listAlternates: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: number;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["AlternatesDto"];
+                };
+            };
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+        };
+    };
+    readTransitions: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: number;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["TransitionsDto"];
+                };
+            };
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+        };
+    };
+    changeApproval: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: number;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["ApprovalChangeForm"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["PartDetailsDto"];
+                };
+            };
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            409: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            422: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+        };
+    };
+    changeSupply: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: number;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["SupplyChangeForm"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["PartDetailsDto"];
+                };
+            };
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            409: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            422: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+        };
+    };
+    listCompanyPartNumbers: {
+        parameters: {
+            query?: {
+                page?: number;
+                pageSize?: number;
+                /** @description Words that number and description together must all contain */
+                q?: string;
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["CompanyPartNumberList"];
+                };
+            };
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+        };
+    };
+    readCompanyPartNumber: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                number: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["CompanyPartNumberDto"];
+                };
+            };
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+        };
+    };
+    readFacets: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["FacetsDto"];
+                };
+            };
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+        };
+    };
+    searchText: {
+        parameters: {
+            query: {
+                /** @description Words, all of which must be found; every character means itself */
+                q: string;
+                /** @description Most items of each kind */
+                limit?: number;
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["TextSearchResult"];
+                };
+            };
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+        };
+    };
+    listReviews: {
+        parameters: {
+            query?: {
+                page?: number;
+                pageSize?: number;
+                state?: "open" | "closed";
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ReviewList"];
+                };
+            };
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+        };
+    };
+    listPolicies: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["PolicyList"];
+                };
+            };
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+        };
+    };
+    readPolicy: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: number;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["PolicyVersionDto"];
+                };
+            };
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+        };
+    };
+    readNotation: {
+        parameters: {
+            query: {
+                /** @description As typed, e.g. 4k7 */
+                text: string;
+                quantity: "resistance" | "voltage" | "current" | "power" | "energy" | "time" | "temperature" | "temperature-difference" | "temperature-coefficient" | "voltage-coefficient" | "thermal-resistance" | "tolerance" | "fraction" | "ratio" | "noise-index" | "frequency" | "length" | "altitude" | "capacitance" | "inductance";
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["NotationDto"];
+                };
+            };
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            422: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+        };
+    };
+    listPreferredValues: {
+        parameters: {
+            query: {
+                series: "E3" | "E6" | "E12" | "E24" | "E48" | "E96" | "E192";
+                /** @description Ω */
+                from: number;
+                /** @description Ω */
+                to: number;
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["PreferredValuesDto"];
+                };
+            };
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            422: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+        };
+    };
+    readMarking: {
+        parameters: {
+            query?: {
+                /** @description Characters on the body */
+                text?: string;
+                /** @description Ω */
+                resistance?: number;
+                /** @description Fraction */
+                tolerance?: number;
+                /** @description 1/K */
+                tcr?: number;
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["MarkingDto"];
+                };
+            };
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            422: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+        };
+    };
+    deriveRequirement: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["RequirementRequest"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["RequirementDto"];
+                };
+            };
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            422: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+        };
+    };
+    assessRatings: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["AssessRatingsRequest"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["AssessmentDto"];
+                };
+            };
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            422: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+        };
+    };
+    searchParts: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["SearchRequest"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["SearchResultDto"];
+                };
+            };
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            422: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+        };
+    };
+    assessPart: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: number;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["AssessPartRequest"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["AssessmentDto"];
+                };
+            };
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            422: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+        };
+    };
+    readHealth: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["Health"];
+                };
+            };
+        };
+    };
 }
