@@ -24,6 +24,8 @@ export class StrictValidationPipe extends ValidationPipe {
     if (metadata.type === 'custom') return value;
     const errors = unusableValues(value);
     if (errors.length > 0) throw new MalformedProblem(errors);
+    // The route's own pipe reads a parameter of the path; the parent would take 0x1 and 1e0 for numbers before it does.
+    if (metadata.type === 'param' && metadata.data !== undefined) return value;
     if (metadata.type !== 'body' || metadata.metatype === undefined || metadata.metatype === Object) {
       return super.transform(value, metadata);
     }
