@@ -16,6 +16,7 @@ import {
 } from './access-tokens';
 import { AuthController } from './auth.controller';
 import { AuthenticationGuard } from './authentication.guard';
+import { FirstAdministrator } from './first-administrator';
 import { PasswordResetModel } from './models/password-reset.model';
 import { PasswordResetRequestModel } from './models/password-reset-request.model';
 import { PasswordResetDelivery } from './password-reset-delivery';
@@ -51,6 +52,7 @@ import { SignInService } from './sign-in.service';
     AccessTokenStrategy,
     People,
     SignInService,
+    FirstAdministrator,
     PasswordResets,
     PasswordResetDelivery,
     { provide: APP_GUARD, useClass: AuthenticationGuard },
