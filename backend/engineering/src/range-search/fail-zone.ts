@@ -19,6 +19,9 @@ const guard = 1e-6;
 /** Deviation (fraction) from which a part counts as running away. */
 const runaway = 1e5;
 
+/** Deviation (fraction) up to which a resistance stays above 0, so that a voltage across it has a bounded current. */
+const settlesBelow = 0.9;
+
 export const nowhere: FailZone = {
   certainFrom: Infinity,
   certainTo: 0,
@@ -80,21 +83,17 @@ export function temperatureZone(conditions: Conditions, celsius: number): FailZo
 
 /** Rises of the element, K, tried in turn as a bound inside which self-heating certainly settles. */
 const boundingRises = [1000, 300, 100, 30];
+/** Voltages, V, tried in turn as a bound inside which a voltage coefficient certainly settles. */
+const boundingVoltages = [1e5, 1e4, 1e3, 100];
 
 /** Where a part possibly has no operating point; nothing else can fail a check that has no allowance to hold it to. */
 export function withoutSettling(conditions: Conditions): FailZone {
   const { load, thermal, axis } = conditions;
   if (load === undefined) return nowhere;
-  const heats = axis.known && (thermal?.value ?? 0) > 0;
-  if (!heats) {
-    const settlesAnyway =
-      conditions.voltageCoefficient === 0 &&
-      deviationAt(conditions, axis.known ? axis.celsius : NaN, 0) < 0.9;
-    return settlesAnyway ? nowhere : undecided;
-  }
-  for (const rise of boundingRises) {
-    const watt = rise / (thermal?.value ?? 1);
-    const possible = possiblyAbove(conditions, load, watt);
+  const heats = axis.known && thermal !== undefined && thermal.value > 0;
+  const bounds = heats ? boundingRises.map((rise) => rise / thermal.value) : [Infinity];
+  for (const watt of bounds) {
+    const possible = heats ? possiblyAbove(conditions, load, watt) : unheatedPossibly(conditions, load);
     if (possible.from > 0 || possible.to < Infinity) {
       return { ...nowhere, possibleFrom: possible.from, possibleTo: possible.to };
     }
@@ -102,11 +101,29 @@ export function withoutSettling(conditions: Conditions): FailZone {
   return undecided;
 }
 
-function possiblyAbove(conditions: Conditions, load: SteadyLoad, watt: number): { from: number; to: number } {
-  if (conditions.voltageCoefficient > 0 && load.voltageMax === Infinity) return { from: 0, to: Infinity };
+/** Without heat only the voltage coefficient feeds back: R grows with its own voltage where a current is kept. */
+function unheatedPossibly(conditions: Conditions, load: SteadyLoad): { from: number; to: number } {
   const axis = conditions.axis.known ? conditions.axis.celsius : NaN;
-  const voltage = load.voltageMax === Infinity ? 0 : load.voltageMax;
+  if (conditions.voltageCoefficient === 0 || load.voltageMax < Infinity) {
+    const deviation = deviationAt(conditions, axis, Math.min(load.voltageMax, Number.MAX_VALUE));
+    return deviation < settlesBelow ? { from: Infinity, to: 0 } : { from: 0, to: Infinity };
+  }
+  if (load.currentMax === Infinity) return { from: 0, to: Infinity };
+  for (const volt of boundingVoltages) {
+    const deviation = deviationAt(conditions, axis, volt);
+    if (deviation < settlesBelow) return { from: volt / (load.currentMax * (1 + deviation)), to: Infinity };
+  }
+  return { from: 0, to: Infinity };
+}
+
+function possiblyAbove(conditions: Conditions, load: SteadyLoad, watt: number): { from: number; to: number } {
   const most = Math.min(watt, load.powerMax, load.voltageMax * load.currentMax);
+  // Where I²·R stays inside the bound, I·R stays inside watt / I.
+  const voltage = Math.min(load.voltageMax, watt / load.currentMax);
+  const bounded =
+    load.voltageMax < Infinity || load.currentMax < Infinity || conditions.voltageCoefficient === 0;
+  if (!bounded) return { from: 0, to: Infinity };
+  const axis = conditions.axis.known ? conditions.axis.celsius : NaN;
   const heated = deviationAt(conditions, axis + (conditions.thermal?.value ?? 0) * most, voltage);
   // A deviation without end even inside the bound: whether such a part settles at all is to be seen one by one.
   return heated < runaway ? dissipationAbove(load, watt, heated) : { from: 0, to: Infinity };

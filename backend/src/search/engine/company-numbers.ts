@@ -1,6 +1,5 @@
 import { approvals } from '@resistry/engineering/ratings/technology';
 import type { CatalogueIndex } from '../index/catalogue-index';
-import type { Evaluation } from './evaluation';
 
 const approvedCodes = new Set([approvals.indexOf('approved'), approvals.indexOf('preferred')]);
 
@@ -13,18 +12,4 @@ export function judgedSources(index: CatalogueIndex, number: number): number[] {
   const sources = [...source.subarray(sourceFrom[number] ?? 0, sourceFrom[number + 1] ?? 0)];
   const approved = sources.filter((position) => approvedCodes.has(index.columns.approval[position] ?? 0));
   return approved.length > 0 ? approved : sources;
-}
-
-/** The worst of its sources speaks for a company part number: its masks are those of all of them together. */
-export function masksOfNumber(
-  { masks }: Evaluation,
-  sources: readonly number[],
-): { unmet: number; unrated: number } {
-  let unmet = 0;
-  let unrated = 0;
-  for (const position of sources) {
-    unmet |= masks.unmet[position] ?? 0;
-    unrated |= masks.unrated[position] ?? 0;
-  }
-  return { unmet, unrated };
 }

@@ -1,17 +1,15 @@
 import { approvals } from '@resistry/engineering/ratings/technology';
 import { requirementOf } from '@resistry/engineering/duty/requirement';
 import type { CatalogueIndex } from '../index/catalogue-index';
-import { judgedSources, masksOfNumber } from './company-numbers';
+import { judgedSources } from './company-numbers';
 import { evaluateRows, type Evaluation, type Scratch } from './evaluation';
-import { partFilter } from './part-filter';
 import { PartOrder } from './part-order';
-import { rowFilter } from './row-filter';
+import { Scope } from './scope';
 import type { FoundItem, SearchPlan, SearchResult } from './search-plan';
 import { orderOfNumbers, orderOfParts } from './unit-order';
 import { selectFirst } from './select-first';
 import { Tally } from './tally';
 import { relaxationsOf } from './relaxation/relaxations';
-import type { Miss } from './relaxation/near-misses';
 
 /** Scratch for the search itself and for trying loosened duties beside it. */
 export interface SearchScratch {
@@ -30,67 +28,42 @@ export function searchCatalogue(
   scratch: SearchScratch,
 ): SearchResult {
   const requirement = requirementOf(plan.duty);
-  const inRow = rowFilter(index, plan.filters);
-  const rows = index.rows.filter(inRow);
+  const scope = new Scope(index, plan);
   // The sources of a company part number can stand in rows that the filters leave out.
-  const evaluated = plan.byCompanyNumber ? index.rows : rows;
-  const evaluation = evaluateRows(index, evaluated, requirement, plan.policy, scratch.main);
-  const seen = collect(index, plan, rows, evaluation);
+  const rows = plan.byCompanyNumber ? index.rows : scope.rows;
+  const evaluation = evaluateRows(index, rows, requirement, plan.policy, scratch.main);
+  const tally = count(scope, evaluation);
   const order = new PartOrder(index, evaluation);
   const compare = plan.byCompanyNumber
     ? orderOfNumbers(index, order, plan.sort)
     : orderOfParts(index, order, plan.sort);
-  const { met, unrated } = seen.tally;
+  const { met, unrated } = tally;
+  const exact = evaluation.masks.exact;
   return {
     total: met.length,
     unrated: unrated.length,
-    items: page(plan, met, unrated, compare).map((position) => itemOf(index, plan, evaluation, position)),
-    knockouts: seen.tally.knockouts(),
-    relaxations: plan.relaxations
-      ? relaxationsOf(index, evaluation, plan.duty, seen.misses, scratch.retrial)
-      : [],
-    byApproval: countByApproval(index, plan, met),
-    exact: evaluation.masks.exact,
+    items: page(plan, met, unrated, compare).map((unit) => itemOf(index, plan, evaluation, unit)),
+    knockouts: tally.knockouts(),
+    relaxations: plan.relaxations ? relaxationsOf(index, scope, evaluation, scratch.retrial) : [],
+    byApproval: countByApproval(index, scope, met),
+    exact,
   };
 }
 
-/** Runs over everything the filters accept: parts, or company part numbers with at least one accepted source. */
-function collect(
-  index: CatalogueIndex,
-  plan: SearchPlan,
-  rows: CatalogueIndex['rows'],
-  evaluation: Evaluation,
-): { tally: Tally; misses: Miss[] } {
+/** The worst of its positions speaks for a unit: its masks are those of all of them together. */
+function count(scope: Scope, evaluation: Evaluation): Tally {
   const tally = new Tally(evaluation.checks);
-  const accepts = partFilter(index, plan.filters);
-  const misses: Miss[] = [];
-  const { unmetInEveryMode } = evaluation;
   const { unmet, unrated } = evaluation.masks;
-  const numbers = new Set<number>();
-  for (const { from, to } of rows) {
-    for (let position = from; position < to; position += 1) {
-      if (accepts !== undefined && !accepts(position)) continue;
-      if (plan.byCompanyNumber) {
-        const number = index.columns.company[position] ?? -1;
-        if (number >= 0) numbers.add(number);
-        continue;
-      }
-      const mask = unmet[position] ?? 0;
-      const lacks = unrated[position] ?? 0;
-      tally.add(position, mask, lacks);
-      if (plan.relaxations && (mask | lacks) !== 0)
-        misses.push({ unit: [position], unmet: unmetInEveryMode[position] ?? 0 });
+  scope.forEach((unit) => {
+    let unmetMask = 0;
+    let unratedMask = 0;
+    for (const position of scope.positionsOf(unit)) {
+      unmetMask |= unmet[position] ?? 0;
+      unratedMask |= unrated[position] ?? 0;
     }
-  }
-  for (const number of numbers) {
-    const unit = judgedSources(index, number);
-    const masks = masksOfNumber(evaluation, unit);
-    tally.add(number, masks.unmet, masks.unrated);
-    if (!plan.relaxations || (masks.unmet | masks.unrated) === 0) continue;
-    const common = unit.reduce((bits, position) => bits | (unmetInEveryMode[position] ?? 0), 0);
-    misses.push({ unit, unmet: common });
-  }
-  return { tally, misses };
+    tally.add(unit, unmetMask, unratedMask);
+  });
+  return tally;
 }
 
 /** The page: by preference what is met comes before what is unrated; by any other column they stand mixed. */
@@ -127,15 +100,14 @@ function itemOf(
 
 function countByApproval(
   index: CatalogueIndex,
-  plan: SearchPlan,
+  scope: Scope,
   met: readonly number[],
 ): SearchResult['byApproval'] {
   const counts: SearchResult['byApproval'] = {};
-  for (const position of met) {
+  const preferred = approvals.indexOf('preferred');
+  for (const unit of met) {
     // A company part number counts as preferred where any of its sources is.
-    const parts = plan.byCompanyNumber ? judgedSources(index, position) : [position];
-    const codes = parts.map((part) => index.columns.approval[part] ?? 0);
-    const preferred = approvals.indexOf('preferred');
+    const codes = scope.positionsOf(unit).map((position) => index.columns.approval[position] ?? 0);
     const name = approvals[codes.includes(preferred) ? preferred : (codes[0] ?? 0)];
     if (name !== undefined) counts[name] = (counts[name] ?? 0) + 1;
   }

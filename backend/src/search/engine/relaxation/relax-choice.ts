@@ -1,10 +1,9 @@
 import { wantedApprovals } from '@resistry/engineering/checks/approval';
 import { wantedSupply } from '@resistry/engineering/checks/supply';
-import type { Duty } from '@resistry/engineering/duty/duty';
 import type { Requirement } from '@resistry/engineering/duty/requirement';
 import type { Relaxation } from '../search-plan';
 import { withValueAt } from './relaxable-fields';
-import type { Retrial, Unit } from './retrial';
+import type { Retrial } from './retrial';
 
 /** Loosened choices in the order in which they are offered: the first that brings a unit back is the smallest change. */
 export interface Choice {
@@ -47,14 +46,14 @@ export function choicesOf(requirement: Requirement): Choice[] {
 
 /** The first of the loosened choices that brings units back, and how many. */
 export function relaxChoice(
-  duty: Duty,
+  requirement: Requirement,
   choice: Choice,
-  units: readonly Unit[],
+  units: readonly number[],
   retrial: Retrial,
 ): Relaxation | undefined {
   if (units.length === 0) return undefined;
   for (const to of choice.values) {
-    const gains = retrial.count(withValueAt(duty, choice.pointer, to), units);
+    const gains = retrial.met(withValueAt(requirement.duty, choice.pointer, to), units).length;
     if (gains > 0) return { field: choice.pointer, to, gains };
   }
   return undefined;

@@ -1,19 +1,24 @@
 import type { Duty } from '@resistry/engineering/duty/duty';
 import type { Relaxation } from '../search-plan';
 import { numberAt, roundedOutward, withValueAt, type RelaxableField } from './relaxable-fields';
-import type { Retrial, Unit } from './retrial';
+import type { Retrial } from './retrial';
 
 /** Halvings of a bisection: a thousandth of the way from the stated value to the loosest. */
 const halvings = 12;
 
+/** Units that are tried for the smallest change: those that come nearest to being met. */
+const tried = 24;
+
 /**
- * The smallest change of one number that brings a unit back, and how many units come back with it. Among many units the
- * ones that come back first are found by halving the way for all of them together.
+ * The smallest change of one number that brings a unit back, and how many units come back with it. The nearest misses are
+ * halved towards together; the gains are counted over all.
+ * @param nearness larger the nearer a unit comes to being met
  */
 export function relaxNumber(
   duty: Duty,
   field: RelaxableField,
-  units: readonly Unit[],
+  units: readonly number[],
+  nearness: (unit: number) => number,
   retrial: Retrial,
 ): Relaxation | undefined {
   const loosest = field.loosest(duty);
@@ -21,21 +26,34 @@ export function relaxNumber(
   const stated = numberAt(duty, field.pointer);
   if (stated === loosest) return undefined;
   const at = (value: number): Duty => withValueAt(duty, field.pointer, value);
-  let held = units.filter((unit) => unit.length > 0);
-  if (retrial.count(at(loosest), held) === 0) return undefined;
+  let held = retrial.met(at(loosest), nearestOf(units, nearness));
+  if (held.length === 0) return undefined;
   let tight = stated;
   let loose = loosest;
   for (let step = 0; step < halvings; step += 1) {
     const middle = between(field, tight, loose);
-    if (middle === tight || middle === loose) break;
-    if (retrial.count(at(middle), held) > 0) {
+    const met = retrial.met(at(middle), held);
+    if (met.length > 0) {
       loose = middle;
-      if (held.length > 16) held = held.filter((unit) => retrial.meets(at(middle), unit));
+      held = met;
     } else tight = middle;
   }
   const rounded = roundedOutward(field, loose, loosest);
-  const to = retrial.count(at(rounded), held) > 0 ? rounded : loose;
-  return { field: field.pointer, to, gains: retrial.count(at(to), units) };
+  const to = retrial.met(at(rounded), held).length > 0 ? rounded : loose;
+  return { field: field.pointer, to, gains: retrial.met(at(to), units).length };
+}
+
+function nearestOf(units: readonly number[], nearness: (unit: number) => number): number[] {
+  if (units.length <= tried) return [...units];
+  // Of very many misses an even sample is looked at: the smallest change among them stands for all.
+  const step = Math.ceil(units.length / 2000);
+  const sample = units
+    .filter((_, place) => place % step === 0)
+    .map((unit) => ({ unit, near: nearness(unit) }));
+  return sample
+    .sort((first, second) => second.near - first.near || first.unit - second.unit)
+    .slice(0, tried)
+    .map(({ unit }) => unit);
 }
 
 /** Halfway: in degrees between the two, else their geometric mean where both are above 0. */

@@ -1,50 +1,53 @@
 import type { Duty } from '@resistry/engineering/duty/duty';
 import type { Relaxation } from '../search-plan';
 import { roundedOutward, withValueAt } from './relaxable-fields';
-import type { Retrial, Unit } from './retrial';
+import type { Retrial } from './retrial';
 
-/** Interval that a unit's resistance takes over life, Ω. */
-export type LifeInterval = (unit: Unit) => { low: number; high: number };
-
-/** Units that are tried for the edge of the window nearest to them. */
-const tried = 64;
+/** Resistance of a unit, and the narrowest interval it takes over life, Ω. */
+export interface Reach {
+  /** Ends over the positions of the unit, at delivery. */
+  nominal(unit: number): { low: number; high: number };
+  /** Ends over life. */
+  life(unit: number): { low: number; high: number };
+}
 
 /**
- * The smallest widening of the window at one edge that brings a unit back: the nearest resistance over life that only
- * that edge keeps out.
+ * The smallest widening of the window at one edge that brings a unit back. A unit needs at least its nominal resistance
+ * inside, so units are looked at from the edge outwards, and no farther than the best found so far.
+ * @param units those that only the value check removes
  */
 export function relaxWindow(
   duty: Duty,
   edge: 'lower' | 'upper',
-  units: readonly Unit[],
-  lifeOf: LifeInterval,
+  units: readonly number[],
+  reach: Reach,
   retrial: Retrial,
 ): Relaxation | undefined {
   const window = duty.window;
   if (window === undefined || window.lower === 0) return undefined;
+  const sign = edge === 'upper' ? 1 : -1;
+  const outer = (ends: { low: number; high: number }): number => (edge === 'upper' ? ends.high : ends.low);
+  const byNominal = units
+    .map((unit) => ({ unit, nominal: reach.nominal(unit) }))
+    .filter(({ nominal }) => (edge === 'upper' ? nominal.low >= window.lower : nominal.high <= window.upper))
+    .map(({ unit, nominal }) => ({ unit, nominal: outer(nominal) }))
+    .sort((first, second) => sign * (first.nominal - second.nominal));
   const field = { direction: edge === 'upper' ? 'up' : 'down', scale: 'digits' } as const;
-  const needed = units
-    .map((unit) => ({ unit, life: lifeOf(unit) }))
-    .filter(({ life }) => (edge === 'upper' ? life.low >= window.lower : life.high <= window.upper))
-    .map(({ unit, life }) => ({ unit, value: edge === 'upper' ? life.high : life.low }))
-    .filter(({ value }) => (edge === 'upper' ? value > window.upper : value > 0 && value < window.lower))
-    .sort((first, second) => (edge === 'upper' ? first.value - second.value : second.value - first.value));
   const pointer = `/window/${edge}`;
-  for (const { unit, value } of needed.slice(0, tried)) {
-    const to = roundedOutward(field, value, edge === 'upper' ? Infinity : Number.MIN_VALUE);
-    const loosened = withValueAt(duty, pointer, to);
-    if (!retrial.meets(loosened, unit)) continue;
-    const within = needed.filter((other) =>
-      edge === 'upper' ? other.value <= to * (1 + 1e-6) : other.value >= to * (1 - 1e-6),
-    );
-    return {
-      field: pointer,
-      to,
-      gains: retrial.count(
-        loosened,
-        within.map((other) => other.unit),
-      ),
-    };
+  let best: number | undefined;
+  for (const { unit, nominal } of byNominal) {
+    if (best !== undefined && sign * (nominal - best) > 0) break;
+    const life = reach.life(unit);
+    const keptByOther = edge === 'upper' ? life.low < window.lower : life.high > window.upper;
+    const needed = outer(life);
+    if (keptByOther || !Number.isFinite(needed) || needed <= 0 || sign * (needed - window[edge]) <= 0)
+      continue;
+    const to = roundedOutward(field, needed, edge === 'upper' ? Infinity : Number.MIN_VALUE);
+    if (best !== undefined && sign * (to - best) >= 0) continue;
+    if (retrial.met(withValueAt(duty, pointer, to), [unit]).length === 1) best = to;
   }
-  return undefined;
+  if (best === undefined) return undefined;
+  const to = best;
+  const within = byNominal.filter(({ nominal }) => sign * (nominal - to) <= 0).map(({ unit }) => unit);
+  return { field: pointer, to, gains: retrial.met(withValueAt(duty, pointer, to), within).length };
 }

@@ -1,83 +1,106 @@
+import { judge } from '@resistry/engineering/assessment/judge';
 import { settle } from '@resistry/engineering/operating/settle';
-import type { Duty } from '@resistry/engineering/duty/duty';
 import type { CatalogueIndex } from '../../index/catalogue-index';
-import type { Evaluation, Scratch } from '../evaluation';
-import { conditionsOfRow } from '../evaluation';
+import { candidateAt } from '../candidate-at';
+import { conditionsOfRow, type Evaluation, type Scratch } from '../evaluation';
 import { rowOfPosition } from '../row-of-position';
+import type { Scope } from '../scope';
 import type { Relaxation } from '../search-plan';
-import { bitsDependingOn, missesDependingOn, type Miss } from './near-misses';
+import { bitsDependingOn, NearMisses } from './near-misses';
 import { choicesOf, relaxChoice } from './relax-choice';
 import { relaxNumber } from './relax-number';
-import { relaxWindow, type LifeInterval } from './relax-window';
+import { relaxWindow, type Reach } from './relax-window';
 import { relaxableFields } from './relaxable-fields';
-import { Retrial, type Unit } from './retrial';
+import { Retrial } from './retrial';
 
 /**
- * For each demand that keeps parts out by itself, the smallest change that brings some back and how many: searching
+ * For each demand that keeps units out by itself, the smallest change that brings some back and how many: searching
  * again with it gives the total and these.
  */
 export function relaxationsOf(
   index: CatalogueIndex,
+  scope: Scope,
   evaluation: Evaluation,
-  duty: Duty,
-  misses: readonly Miss[],
   scratch: Scratch,
 ): Relaxation[] {
-  const retrial = new Retrial(index, evaluation, scratch);
   const { checks, requirement } = evaluation;
+  const { duty, window } = requirement;
+  const retrial = new Retrial(index, scope, evaluation, scratch);
   const valueBit = checks.find(({ definition }) => definition.name === 'value')?.bit ?? 0;
-  const inWindow = misses.filter(({ unit }) =>
-    unit.every((position) => isInside(requirement.window, index.columns.resistance[position] ?? NaN)),
-  );
-  const unitsFor = (pointer: string): Unit[] =>
-    missesDependingOn(pointer.startsWith('/limits') ? misses : inWindow, bitsDependingOn(checks, pointer));
+  // Only a change of the window itself, or of the limits it follows from, brings back what lies outside it.
+  const everywhere = valueBit === 0 ? undefined : new NearMisses(scope, evaluation);
+  const inWindow = new NearMisses(scope, evaluation, window);
+  const nearness = nearnessOf(index, scope, evaluation);
   const found: (Relaxation | undefined)[] = [];
-  if (valueBit !== 0 && !requirement.link) {
-    const kept = misses
-      .filter(({ unmet }) => unmet !== 0 && (unmet & ~valueBit) === 0)
-      .map(({ unit }) => unit);
-    const lifeOf = lifeIntervals(index, evaluation);
+  if (everywhere !== undefined && !requirement.link) {
+    const units = everywhere.removedOnlyBy(valueBit);
+    const reach = reachOf(index, scope, evaluation);
     found.push(
-      relaxWindow(duty, 'lower', kept, lifeOf, retrial),
-      relaxWindow(duty, 'upper', kept, lifeOf, retrial),
+      relaxWindow(duty, 'lower', units, reach, retrial),
+      relaxWindow(duty, 'upper', units, reach, retrial),
     );
   }
   for (const field of relaxableFields) {
-    if (field.loosest(duty) !== undefined)
-      found.push(relaxNumber(duty, field, unitsFor(field.pointer), retrial));
+    if (field.loosest(duty) === undefined) continue;
+    const misses = field.pointer.startsWith('/limits') && everywhere !== undefined ? everywhere : inWindow;
+    found.push(
+      relaxNumber(duty, field, misses.within(bitsDependingOn(checks, field.pointer)), nearness, retrial),
+    );
   }
-  for (const choice of choicesOf(requirement))
-    found.push(relaxChoice(duty, choice, unitsFor(choice.pointer), retrial));
+  for (const choice of choicesOf(requirement)) {
+    found.push(
+      relaxChoice(requirement, choice, inWindow.within(bitsDependingOn(checks, choice.pointer)), retrial),
+    );
+  }
   return found.filter(
     (relaxation): relaxation is Relaxation => relaxation !== undefined && relaxation.gains > 0,
   );
 }
 
-function isInside(window: { lower: number; upper: number } | undefined, resistance: number): boolean {
-  return window === undefined || (resistance >= window.lower && resistance <= window.upper);
+/** The least margin among the unmet checks of a unit: the larger, the nearer it comes to being met. */
+function nearnessOf(
+  index: CatalogueIndex,
+  scope: Scope,
+  { requirement, policy }: Evaluation,
+): (unit: number) => number {
+  const known = new Map<number, number>();
+  return (unit) => {
+    let least = known.get(unit);
+    if (least !== undefined) return least;
+    least = Infinity;
+    for (const position of scope.positionsOf(unit)) {
+      for (const { finding } of judge(candidateAt(index, position), requirement, policy).findings) {
+        if (finding.status === 'unmet') least = Math.min(least, finding.margin ?? -1);
+      }
+    }
+    known.set(unit, least);
+    return least;
+  };
 }
 
-/**
- * The narrowest interval over life that each position of a unit has in any operating mode, all positions together: no
- * narrower window can hold the unit.
- */
-function lifeIntervals(index: CatalogueIndex, { requirement, policy }: Evaluation): LifeInterval {
+/** How far units reach, each position in the operating mode that reaches least: no narrower window can hold the unit. */
+function reachOf(index: CatalogueIndex, scope: Scope, { requirement, policy }: Evaluation): Reach {
   const conditions = new Map<number, ReturnType<typeof conditionsOfRow>>();
-  return (unit) => {
-    let low = Infinity;
-    let high = 0;
-    for (const position of unit) {
-      const row = rowOfPosition(index.rows, position);
-      if (row.isLink) return { low: 0, high: Infinity };
-      const modes = conditions.get(row.from) ?? conditionsOfRow(index, row, requirement, policy);
-      conditions.set(row.from, modes);
-      const resistance = index.columns.resistance[position] ?? NaN;
-      const states = modes
-        .map((mode) => settle(mode, resistance, resistance))
-        .filter(({ settled }) => settled);
-      low = Math.min(low, Math.max(0, ...states.map((state) => state.low)));
-      high = Math.max(high, Math.min(Infinity, ...states.map((state) => state.high)));
-    }
-    return { low, high };
+  const { resistance } = index.columns;
+  return {
+    nominal(unit) {
+      const ohms = scope.positionsOf(unit).map((position) => resistance[position] ?? NaN);
+      return { low: Math.min(...ohms), high: Math.max(...ohms) };
+    },
+    life(unit) {
+      let low = Infinity;
+      let high = 0;
+      for (const position of scope.positionsOf(unit)) {
+        const row = rowOfPosition(index.rows, position);
+        if (row.isLink) return { low: 0, high: Infinity };
+        const modes = conditions.get(row.from) ?? conditionsOfRow(index, row, requirement, policy);
+        conditions.set(row.from, modes);
+        const ohm = resistance[position] ?? NaN;
+        const states = modes.map((mode) => settle(mode, ohm, ohm)).filter(({ settled }) => settled);
+        low = Math.min(low, Math.max(0, ...states.map((state) => state.low)));
+        high = Math.max(high, Math.min(Infinity, ...states.map((state) => state.high)));
+      }
+      return { low, high };
+    },
   };
 }
