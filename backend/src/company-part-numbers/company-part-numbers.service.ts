@@ -57,7 +57,7 @@ export class CompanyPartNumbersService {
   /** By number. */
   async list(query: CompanyPartNumberQuery): Promise<CompanyPartNumberList> {
     const words = wordsOf(query.q ?? '');
-    const counted = await this.readers.lookUp<{ total: number }>(`SELECT count(*) AS total ${MATCHING}`, {
+    const [counted] = await this.readers.select<{ total: number }>(`SELECT count(*) AS total ${MATCHING}`, {
       words,
     });
     const rows = await this.readers.select<SummaryRow>(SUMMARIES, { words, ...rowsOfPage(query) });

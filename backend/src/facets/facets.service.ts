@@ -40,12 +40,33 @@ const RESISTANCES = `
     JOIN size_ratings AS r ON r.size_id = p.size_id AND r.revision_id = f.current_revision_id
   WHERE p.resistance_ohm > 0 GROUP BY 1`;
 
-/** Counts what a search can be narrowed to. */
+/**
+ * All that the counts follow from: a part never goes and never changes what it is, so the newest one stands for all; what
+ * families and manufacturers are called and which revisions are current is read whole.
+ */
+const STAMP = `
+  SELECT (SELECT max(id) FROM parts) AS newest_part,
+    (SELECT json_group_array(json_array(f.id, f.code, f.name, f.technology, f.current_revision_id, m.code, m.name))
+      FROM families AS f JOIN manufacturers AS m ON m.id = f.manufacturer_id) AS families`;
+
+/** Counts what a search can be narrowed to, anew only where something has come to the catalogue. */
 @Injectable()
 export class FacetsService {
+  private counted?: { stamp: string; facets: Promise<FacetsDto> };
+
   constructor(private readonly readers: Readers) {}
 
   async count(): Promise<FacetsDto> {
+    const stamp = JSON.stringify(await this.readers.lookUp(STAMP));
+    if (this.counted?.stamp !== stamp) {
+      this.counted = { stamp, facets: this.countAnew() };
+      // A failed count is not kept: the next caller tries again.
+      this.counted.facets.catch(() => (this.counted = undefined));
+    }
+    return this.counted.facets;
+  }
+
+  private async countAnew(): Promise<FacetsDto> {
     const [rows, series] = await Promise.all([this.readers.select<GroupRow>(GROUPS), this.series()]);
     const rising = (one: { value: number }, other: { value: number }): number => one.value - other.value;
     return {

@@ -37,7 +37,7 @@ export class ReviewsService {
 
   async list(query: ReviewQuery): Promise<ReviewList> {
     const state = query.state ?? 'open';
-    const counted = await this.readers.lookUp<{ total: number }>(
+    const [counted] = await this.readers.select<{ total: number }>(
       'SELECT count(*) AS total FROM reviews WHERE state = $state',
       { state },
     );

@@ -18,11 +18,8 @@ const chip: Ratings = {
   limitingElementVoltage: 75,
   category: { min: -55, max: 155 },
 };
-const without = (field: keyof Ratings): Ratings => {
-  const rest: Partial<Ratings> = { ...chip };
-  delete rest[field];
-  return { technology: chip.technology, resistance: chip.resistance, ...rest };
-};
+const without = (field: keyof Ratings): Ratings =>
+  Object.fromEntries(Object.entries(chip).filter(([name]) => name !== field)) as unknown as Ratings;
 const equal = (own: Ratings, other: Ratings): boolean =>
   equalMode([{ ratings: own }], [{ ratings: other }]) !== undefined;
 
