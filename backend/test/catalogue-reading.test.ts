@@ -205,6 +205,12 @@ describe('reading the catalogue', () => {
     });
   });
 
+  it('counts anew when a part has come', async () => {
+    await catalogue.part({ family: teal, number: 'TEAL0603F1001', resistance: 1000 });
+    const { technologies } = (await read('/api/facets')) as { technologies: object[] };
+    expect(technologies).toContainEqual({ value: 'thin-film', parts: 2 });
+  });
+
   it('finds company part numbers and shows their approved manufacturer lists', async () => {
     const list = await read('/api/company-part-numbers?q=bw%20%25');
     expect(list).toMatchObject({ total: 1, items: [{ number: 'BW-R-1/2 %', sources: 2, soundSources: 2 }] });
