@@ -24,6 +24,8 @@ async function main(): Promise<void> {
   };
   process.once('SIGTERM', stop);
   process.once('SIGINT', stop);
+  // Fills an empty database when asked to: only then is there a catalogue to read.
+  await application.init();
   // The first search would otherwise wait until the catalogue is in memory.
   await application.get(SearchIndex).ready();
   await application.listen(environment.port, environment.host);
