@@ -18,7 +18,7 @@ export async function build(names = STEPS.map((step) => step.name)) {
   return true;
 }
 
-async function take({ name, words, cwd, inputs, result }) {
+async function take({ name, words, cwd, inputs, result, finish }) {
   const stampName = `build-${name}`;
   const stamp = hashFiles(inputs);
   if (readStamp(stampName) === stamp && existsSync(result)) return true;
@@ -30,6 +30,7 @@ async function take({ name, words, cwd, inputs, result }) {
     say(`Building ${name} failed`);
     return false;
   }
+  finish?.();
   writeStamp(stampName, stamp);
   say(`Built ${name} in ${secondsSince(start)}`);
   return true;

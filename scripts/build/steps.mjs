@@ -1,8 +1,9 @@
 import { inRepository, TOOLS } from '../repository.mjs';
+import { compressPages } from './compress-pages.mjs';
 
 const paths = (...names) => names.map((name) => inRepository(name));
 
-const EVERYWHERE = paths('package-lock.json', 'tsconfig.base.json', 'scripts/build/steps.mjs');
+const EVERYWHERE = paths('package-lock.json', 'tsconfig.base.json', 'scripts/build');
 const ENGINEERING = paths(
   'backend/engineering/src',
   'backend/engineering/package.json',
@@ -26,7 +27,8 @@ const FRONTEND = paths(
 
 /**
  * What is built, in order: each with the files it is made from and one file that is there when it was made. The browser
- * takes the engineering core as source, so its step has that among its inputs and not its build.
+ * takes the engineering core as source, so its step has that among its inputs and not its build. `finish` is what is left
+ * to do when the tool has ended well.
  */
 export const STEPS = [
   {
@@ -49,5 +51,6 @@ export const STEPS = [
     cwd: inRepository('frontend'),
     inputs: [...EVERYWHERE, ...ENGINEERING, ...FRONTEND],
     result: inRepository('frontend/dist/index.html'),
+    finish: () => compressPages(inRepository('frontend/dist')),
   },
 ];
