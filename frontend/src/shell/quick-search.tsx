@@ -1,5 +1,5 @@
 import { chakra } from '@chakra-ui/react';
-import { type SyntheticEvent, useRef } from 'react';
+import { type SyntheticEvent, useEffect, useRef } from 'react';
 import { useLocation, useNavigate } from 'react-router-dom';
 
 const Field = chakra('input', {
@@ -17,11 +17,28 @@ const Field = chakra('input', {
   },
 });
 
+const takesText = (target: EventTarget | null): boolean =>
+  target instanceof HTMLElement && target.closest('input, select, textarea, [contenteditable]') !== null;
+
 /** Looks for a part number, family or manufacturer in Find; a duty that is already stated there stays. */
 export function QuickSearch({ onSearched }: { onSearched?: () => void }) {
   const navigate = useNavigate();
   const location = useLocation();
   const inputRef = useRef<HTMLInputElement>(null);
+
+  useEffect(() => {
+    const press = (event: KeyboardEvent): void => {
+      if (event.key !== '/' || event.ctrlKey || event.metaKey || event.altKey) return;
+      // A field that is hidden (the bar on a narrow screen) takes no focus, and the key stays with the page.
+      if (event.defaultPrevented || takesText(event.target) || inputRef.current === null) return;
+      inputRef.current.focus();
+      if (document.activeElement !== inputRef.current) return;
+      inputRef.current.select();
+      event.preventDefault();
+    };
+    document.addEventListener('keydown', press);
+    return () => document.removeEventListener('keydown', press);
+  }, []);
 
   const search = (event: SyntheticEvent): void => {
     event.preventDefault();
@@ -43,6 +60,8 @@ export function QuickSearch({ onSearched }: { onSearched?: () => void }) {
         name="text"
         defaultValue={shown}
         aria-label="Part number, family or manufacturer"
+        aria-keyshortcuts="/"
+        title="Press / to search from anywhere"
         placeholder="Part number, family, manufacturer"
         autoComplete="off"
         spellCheck={false}

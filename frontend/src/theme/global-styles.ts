@@ -32,6 +32,7 @@ export const globalStyles = defineGlobalStyles({
   'h1, h2, h3, h4': { fontSize: 'inherit', fontWeight: 'semibold', lineHeight: 'tight' },
   'a:not([class])': { color: 'accent' },
   'button, input, select, textarea': { font: 'inherit', color: 'inherit', letterSpacing: 'inherit' },
+  sub: { lineHeight: 0 },
   button: { background: 'none', border: 0, padding: 0, cursor: 'pointer' },
   'nav, [data-screen-only]': { _print: { display: 'none !important' } },
   svg: { display: 'block', flexShrink: 0 },

@@ -2,6 +2,7 @@ import { chakra } from '@chakra-ui/react';
 import type { BasisInput } from '@resistry/engineering/checks/basis';
 import type { AnsweredBasis, AnsweredInput } from './answered-assessment';
 import { unitWords } from './basis-units';
+import { Formula } from './formula';
 
 const fromWords: Record<BasisInput['from'], string> = {
   duty: 'the duty',
@@ -33,7 +34,11 @@ export interface BasisViewProps {
 export function BasisView({ basis, missing = [] }: BasisViewProps) {
   return (
     <chakra.div bg="bg.basis" px={3} py={2.5} fontSize="xs" lineHeight={1.45}>
-      {basis.formula !== undefined && <chakra.p fontWeight="semibold">{basis.formula}</chakra.p>}
+      {basis.formula !== undefined && (
+        <chakra.p fontWeight="semibold">
+          <Formula text={basis.formula} />
+        </chakra.p>
+      )}
       <p>{basis.words}</p>
       {missing.length > 0 && (
         <chakra.p color="unrated" fontWeight="semibold" mt={1}>
@@ -64,7 +69,11 @@ function InputLine({ input }: { input: AnsweredInput }) {
   return (
     <>
       <dt>
-        {input.symbol !== undefined && <chakra.b fontWeight="semibold">{input.symbol} </chakra.b>}
+        {input.symbol !== undefined && (
+          <chakra.b fontWeight="semibold">
+            <Formula text={input.symbol} />{' '}
+          </chakra.b>
+        )}
         {input.name}
       </dt>
       <dd>{unitWords(input.value, input.unit)}</dd>

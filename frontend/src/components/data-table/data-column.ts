@@ -10,6 +10,10 @@ export interface DataColumn<Row> {
   plainHeader: string;
   cell: (row: Row) => ReactNode;
   plain: (row: Row) => PlainCell;
+  /** The whole of what a narrow cell may cut off; shown when one rests on it. */
+  hint?: (row: Row) => string;
+  /** Holds the button that unfolds a row, where rows can be unfolded. */
+  unfolds?: boolean;
   /** CSS width; the table is as wide as its columns ask, or as its place. */
   width: string;
   align?: 'start' | 'end';

@@ -12,6 +12,7 @@ import {
 import type { DataColumn, Sort } from './data-column';
 import { tabSeparated } from './delimited-text';
 import { type GridPosition, nextPosition } from './grid-position';
+import type { RowTree } from './row-tree';
 import { TableHead } from './table-head';
 import { TableRow, cellId } from './table-row';
 import { TableFrame } from './table-styles';
@@ -25,15 +26,17 @@ export interface DataTableProps<Row extends object> {
   rowCount: number;
   /** The row at an index, or undefined while it is on its way. */
   rowAt: (index: number) => Row | undefined;
-  /** Tells which rows are in sight, so that they can be asked for. */
   /** What a row is, so that it stays itself when its place changes. */
   rowKey?: (row: Row) => string | number;
+  /** Tells which rows are in sight, so that they can be asked for. */
   onVisible?: (first: number, last: number) => void;
   rowHeight?: number;
   sort?: Sort;
   onSortBy: (columnId: string) => void;
   selectedIndex?: number;
   onOpen: (index: number) => void;
+  /** Where rows unfold; space does it by keyboard. */
+  tree?: RowTree;
   /** What scrolls: a column of the page, or the page itself. */
   scrollRef: RefObject<HTMLElement | null>;
 }
@@ -50,8 +53,20 @@ export function DataTable<Row extends object>(props: DataTableProps<Row>) {
 }
 
 function VirtualTable<Row extends object>(props: DataTableProps<Row> & { rowHeight: number }) {
-  const { label, columns, rowCount, rowAt, rowKey, onVisible, rowHeight, sort, onSortBy, onOpen, scrollRef } =
-    props;
+  const {
+    label,
+    columns,
+    rowCount,
+    rowAt,
+    rowKey,
+    onVisible,
+    rowHeight,
+    sort,
+    onSortBy,
+    onOpen,
+    tree,
+    scrollRef,
+  } = props;
   const gridId = useId();
   const bodyRef = useRef<HTMLTableSectionElement>(null);
   const [active, setActive] = useState<GridPosition>({ row: 0, column: 0 });
@@ -77,11 +92,12 @@ function VirtualTable<Row extends object>(props: DataTableProps<Row> & { rowHeig
   }, [first, last, onVisible]);
 
   // Rows keep one handler for ever: a new one with each page of data would draw all of them again.
-  const openRef = useRef(onOpen);
+  const handlers = useRef({ onOpen, tree });
   useEffect(() => {
-    openRef.current = onOpen;
-  }, [onOpen]);
-  const open = useCallback((index: number) => openRef.current(index), []);
+    handlers.current = { onOpen, tree };
+  }, [onOpen, tree]);
+  const open = useCallback((index: number) => handlers.current.onOpen(index), []);
+  const toggle = useCallback((index: number) => handlers.current.tree?.toggle(index), []);
 
   const point = useCallback(
     (atRow: number, atColumn: number) => setActive({ row: atRow, column: atColumn }),
@@ -92,6 +108,11 @@ function VirtualTable<Row extends object>(props: DataTableProps<Row> & { rowHeig
     if (event.target !== event.currentTarget || event.altKey) return;
     if (event.key === 'Enter') {
       onOpen(row);
+      event.preventDefault();
+      return;
+    }
+    if (event.key === ' ' && tree?.openAt(row) !== undefined) {
+      tree.toggle(row);
       event.preventDefault();
       return;
     }
@@ -146,8 +167,11 @@ function VirtualTable<Row extends object>(props: DataTableProps<Row> & { rowHeig
             gridId={gridId}
             activeColumn={index === row ? column : -1}
             selected={index === props.selectedIndex}
+            level={tree?.levelAt(index)}
+            unfolded={tree?.openAt(index)}
             onOpen={open}
             onPoint={point}
+            onToggle={toggle}
           />
         ))}
         <Spacer height={after} span={columns.length} />

@@ -10,8 +10,13 @@ export interface TableRowProps<Row> {
   /** The column that has the keyboard; −1 in all rows but one. */
   activeColumn: number;
   selected: boolean;
+  /** Its depth in a tree of rows; absent in a plain table. */
+  level?: 1 | 2;
+  /** Whether it is unfolded; absent for a row with nothing beneath it. */
+  unfolded?: boolean;
   onOpen: (index: number) => void;
   onPoint: (row: number, column: number) => void;
+  onToggle: (index: number) => void;
 }
 
 export const cellId = (gridId: string, row: number, column: number): string => `${gridId}-${row}-${column}`;
@@ -23,8 +28,11 @@ function Row<Data>({
   gridId,
   activeColumn,
   selected,
+  level,
+  unfolded,
   onOpen,
   onPoint,
+  onToggle,
 }: TableRowProps<Data>) {
   return (
     // The grid takes the keyboard for all its rows (aria-activedescendant); a click is the same as Enter there.
@@ -32,6 +40,7 @@ function Row<Data>({
       role="row"
       aria-rowindex={index + 2}
       aria-selected={selected}
+      data-level={level}
       data-active={activeColumn >= 0 ? '' : undefined}
       onClick={() => onOpen(index)}
     >
@@ -43,9 +52,27 @@ function Row<Data>({
           aria-colindex={at + 1}
           data-align={column.align ?? 'start'}
           data-active={at === activeColumn ? '' : undefined}
+          title={row === undefined ? undefined : column.hint?.(row)}
           onPointerDown={() => onPoint(index, at)}
         >
-          {row === undefined ? <span data-waiting="" aria-hidden="true" /> : column.cell(row)}
+          {row === undefined ? (
+            <span data-waiting="" aria-hidden="true" />
+          ) : column.unfolds === true && unfolded !== undefined ? (
+            <button
+              type="button"
+              tabIndex={-1}
+              data-unfold=""
+              aria-expanded={unfolded}
+              onClick={(event) => {
+                event.stopPropagation();
+                onToggle(index);
+              }}
+            >
+              {column.cell(row)}
+            </button>
+          ) : (
+            column.cell(row)
+          )}
         </td>
       ))}
     </tr>

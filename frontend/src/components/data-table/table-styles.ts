@@ -39,7 +39,7 @@ export const TableFrame = chakra('div', {
     '& [data-align=end]': { textAlign: 'end' },
     '& tbody tr[aria-rowindex]': { cursor: 'pointer', height: 'var(--row-height)' },
     '& tbody tr[aria-rowindex]:hover': { bg: 'bg.hover' },
-    '& tbody tr[aria-selected=true]': { bg: 'bg.selected' },
+    '& tbody tr[aria-selected=true], & tbody tr[aria-selected=true]:hover': { bg: 'bg.selected' },
     '& table:focus-visible': { outline: 'none' },
     '& table:focus-visible tr[data-active] td': { borderBottomColor: 'accent' },
     '& table:focus-visible td[data-active]': {
@@ -54,6 +54,12 @@ export const TableFrame = chakra('div', {
       bg: 'border',
       borderRadius: 'sm',
     },
+    '& tr[data-level="2"] td': { bg: 'bg.hover' },
+    '& tr[data-level="2"][aria-selected=true] td': { bg: 'bg.selected' },
+    '& [data-unfold]': { color: 'accent', whiteSpace: 'nowrap', minHeight: 6 },
+    '& [data-unfold]::before': { content: '"▸"', display: 'inline-block', width: '1.1em' },
+    '& [data-unfold][aria-expanded=true]::before': { content: '"▾"' },
+    '& [data-unfold]:hover': { textDecoration: 'underline', textUnderlineOffset: '3px' },
     '& tr[data-spacer] td': { border: 0, p: 0 },
     '& [data-second]': {
       display: 'block',

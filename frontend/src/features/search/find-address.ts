@@ -15,14 +15,17 @@ export const filterNames = [
 ] as const;
 export type FilterName = (typeof filterNames)[number];
 
+/** Filters that are on or off: a safety certificate in date, a company part number, an offer in force. */
+export const flagNames = ['certificate', 'numbered', 'offered'] as const;
+export type FlagName = (typeof flagNames)[number];
+
 /** Everything Find shows, as its address holds it. */
 export interface FindState {
   duty: DutyText;
   /** Part number, family or manufacturer. */
   text: string;
   filters: Record<FilterName, string[]>;
-  /** Only parts with a safety certificate in date. */
-  certificate: boolean;
+  flags: Record<FlagName, boolean>;
   show: Show;
   grouped: boolean;
   sort?: Sort;
@@ -53,7 +56,11 @@ export function readFind(address: URLSearchParams): FindState {
       tolerance: split(address.get('tolerance')),
       tcr: split(address.get('tcr')),
     },
-    certificate: address.get('certificate') === 'yes',
+    flags: {
+      certificate: address.get('certificate') === 'yes',
+      numbered: address.get('numbered') === 'yes',
+      offered: address.get('offered') === 'yes',
+    },
     show: address.get('show') === 'met-and-unrated' ? 'met-and-unrated' : 'met',
     grouped: address.get('group') === 'company',
     sort: readSort(address.get('sort')),
@@ -68,7 +75,7 @@ export function writeFind(state: FindState): URLSearchParams {
   for (const name of filterNames) {
     if (state.filters[name].length > 0) address.set(name, state.filters[name].join(','));
   }
-  if (state.certificate) address.set('certificate', 'yes');
+  for (const name of flagNames) if (state.flags[name]) address.set(name, 'yes');
   if (state.show !== 'met') address.set('show', state.show);
   if (state.grouped) address.set('group', 'company');
   if (state.sort !== undefined)

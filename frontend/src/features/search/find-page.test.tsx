@@ -3,17 +3,31 @@ import userEvent from '@testing-library/user-event';
 import { endSession, startSession } from '../../api/session';
 import { exampleAssessment, examplePart } from '../../test-support/assessed-part';
 import { renderApplication } from '../../test-support/render-application';
-import { serve } from '../../test-support/serve';
+import { type Answer, serve } from '../../test-support/serve';
 import { sessionOf } from '../../test-support/session-of';
+import type { Facets } from './requests/get-facets';
 import type { SearchRequest } from './requests/search-request';
 
 const address = '/find?lower=4k5&upper=4k9&voltage=0..24&ambient=-20..70&life=10+years';
 
 type Asked = SearchRequest & { page: number; pageSize: number };
 let asked: Asked[] = [];
+let answerInstead: Answer | undefined;
+
+const facets: Facets = {
+  manufacturers: [{ id: 1, code: 'ODM', name: 'Oddmoor', parts: 10 }],
+  families: [{ id: 1, code: 'ODF', name: 'General purpose', manufacturerId: 1, parts: 10 }],
+  technologies: [{ value: 'thick-film', parts: 10 }],
+  sizes: [{ code: '1206', metricCodes: ['3216M'], parts: 10 }],
+  series: [{ value: 'E24', parts: 10 }],
+  tolerances: [{ value: 0.01, parts: 10 }],
+  tcrs: [{ value: 1e-4, parts: 10 }],
+  mountings: [{ value: 'surface', parts: 10 }],
+};
 
 beforeEach(() => {
   asked = [];
+  answerInstead = undefined;
   endSession();
   startSession(sessionOf(['designer'], [{ action: 'read', subject: ['Part', 'Family', 'Policy'] }]));
   serve((request) => {
@@ -29,9 +43,18 @@ beforeEach(() => {
       };
       return { status: 200, data: { items: [policy] } };
     }
+    if (request.url === '/facets') return { status: 200, data: facets };
     if (request.url === '/parts/search') {
-      asked.push(JSON.parse(String(request.data)) as Asked);
-      const items = [{ part: examplePart(), assessment: exampleAssessment(), overSpecification: [] }];
+      const question = JSON.parse(String(request.data)) as Asked;
+      asked.push(question);
+      if (answerInstead !== undefined) return answerInstead;
+      const item = { part: examplePart(), assessment: exampleAssessment(), overSpecification: [] };
+      const second = {
+        ...item,
+        part: examplePart({ id: 123, manufacturer: { id: 2, code: 'LKS', name: 'Larkstone' } }),
+      };
+      const group = { companyPartNumber: { id: 7, number: 'BW-R-00122' }, sources: [item, second] };
+      const items = [question.group === 'company' ? { ...item, ...group } : item];
       const knockouts = [{ check: 'value', removes: 41_208, removesAlone: 96 }];
       const relaxations = [{ field: '/window/upper', to: 5000, gains: 44 }];
       return {
@@ -111,5 +134,90 @@ describe('Find', () => {
     renderApplication(address);
     await userEvent.click(await screen.findByRole('button', { name: '6 more are unrated: show them' }));
     await waitFor(() => expect(asked.at(-1)?.show).toBe('met-and-unrated'));
+  });
+
+  it('narrows the list to a size, names it above the table, and takes it away again', async () => {
+    const { addressNow } = renderApplication(address);
+    await screen.findByRole('grid');
+    await userEvent.click(
+      within(screen.getByRole('region', { name: 'Only these parts' })).getAllByText('Size')[0] ??
+        document.body,
+    );
+    await userEvent.click(screen.getByRole('checkbox', { name: /^1206\/3216M/ }));
+    await waitFor(() => expect(asked.at(-1)?.filters?.sizes).toEqual(['1206']));
+    await waitFor(() => expect(addressNow()).toContain('size=1206'));
+    await userEvent.click(screen.getByRole('button', { name: 'Take away: size 1206/3216M' }));
+    await waitFor(() => expect(addressNow()).not.toContain('size='));
+    expect(screen.getByRole('checkbox', { name: /^1206\/3216M/ })).not.toBeChecked();
+  });
+
+  it('reads every filter from a link', async () => {
+    renderApplication(
+      `${address}&tolerance=1%25&tcr=100ppm/K&series=E24&numbered=yes&offered=yes&certificate=yes`,
+    );
+    await screen.findByRole('grid');
+    expect(asked[0]?.filters).toMatchObject({
+      series: ['E24'],
+      certificate: true,
+      companyPartNumber: true,
+      offer: true,
+    });
+    expect(asked[0]?.filters?.tolerances?.[0]).toBeCloseTo(0.01, 12);
+    expect(asked[0]?.filters?.tcrs?.[0]).toBeCloseTo(1e-4, 12);
+    expect(screen.getByRole('button', { name: 'Take away: tolerance ±1 %' })).toBeInTheDocument();
+  });
+
+  it('unfolds a company number to its judged sources', async () => {
+    renderApplication(`${address}&group=company`);
+    const unfold = await screen.findByRole('button', { name: '2 sources' });
+    expect(screen.getAllByRole('row')).toHaveLength(2);
+    await userEvent.click(unfold);
+    expect(screen.getByRole('button', { name: '2 sources', expanded: true })).toBeInTheDocument();
+    expect(screen.getAllByRole('row')).toHaveLength(4);
+    expect(screen.getAllByRole('row')[3]).toHaveTextContent('Larkstone');
+    screen.getByRole('grid').focus();
+    await userEvent.keyboard(' ');
+    expect(screen.getAllByRole('row')).toHaveLength(2);
+  });
+
+  it('puts a clash at the entry it is about, and says that nothing was searched', async () => {
+    const message = 'The smallest voltage is above the largest.';
+    answerInstead = {
+      status: 422,
+      data: {
+        type: 'urn:resistry:problem:clash',
+        title: 'The request contradicts itself or the data',
+        errors: ['min', 'max'].map((end) => ({ pointer: `/duty/load/voltage/${end}`, message })),
+      },
+    };
+    renderApplication(address);
+    expect(await screen.findByRole('heading', { name: 'The duty contradicts itself' })).toBeInTheDocument();
+    expect(screen.getByRole('textbox', { name: 'Voltage' })).toHaveAccessibleDescription(message);
+  });
+
+  it('says what stands in the way where nothing meets the duty, and loosens it', async () => {
+    const knockouts = [{ check: 'value', removes: 41_208, removesAlone: 96 }];
+    const relaxations = [{ field: '/window/upper', to: 5000, gains: 44 }];
+    answerInstead = {
+      status: 200,
+      data: { total: 0, unrated: 2, byApproval: {}, items: [], knockouts, relaxations },
+    };
+    renderApplication(address);
+    const title = await screen.findByRole('heading', { name: 'No part meets all of this' });
+    expect(title.parentElement).toHaveTextContent('96 parts fail it and nothing else');
+    await userEvent.click(
+      within(title.parentElement ?? document.body).getByRole('button', { name: '5 kΩ highest brings 44' }),
+    );
+    await waitFor(() => expect(asked.at(-1)?.duty.window?.upper).toBe(5000));
+  });
+
+  it('gives the quick search the keyboard at a slash, but not while one types', async () => {
+    renderApplication(address);
+    await screen.findByRole('grid');
+    await userEvent.type(screen.getByRole('textbox', { name: 'Highest' }), '/');
+    expect(screen.getByRole('textbox', { name: 'Highest' })).toHaveFocus();
+    screen.getByRole('grid').focus();
+    await userEvent.keyboard('/');
+    expect(screen.getAllByRole('searchbox', { hidden: true })).toContain(document.activeElement);
   });
 });

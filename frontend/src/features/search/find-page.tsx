@@ -1,11 +1,12 @@
 import { chakra } from '@chakra-ui/react';
 import { Suspense, lazy, useCallback, useMemo, useRef, useState } from 'react';
 import { Button } from '../../components/button';
-import { Failed, Loading } from '../../components/states';
+import { Loading } from '../../components/states';
 import { useElementWidth } from '../../components/use-element-width';
 import { usePolicies } from '../policies/requests/list-policies';
-import type { EntryName } from './duty/duty-entry';
 import { readDuty } from './duty/read-duty';
+import { FilterChips } from './filters/filter-chips';
+import { FilterPanel } from './filters/filter-panel';
 import { writeFind } from './find-address';
 import { Ledger } from './ledger/ledger';
 import type { ChangeDuty } from './panel/change-duty';
@@ -13,7 +14,9 @@ import { DutyPanel } from './panel/duty-panel';
 import { policyNameOf } from './policy-name';
 import { requestOf } from './request-of';
 import { useSearch } from './requests/use-search';
+import { NothingMeets } from './results/nothing-meets';
 import { Results } from './results/results';
+import { SearchFailed } from './results/search-failed';
 import { Sentence } from './sentence/sentence';
 import { withServerErrors } from './server-errors';
 import { useDebounced } from './use-debounced';
@@ -79,11 +82,6 @@ export function Component() {
     (update) => change((before) => ({ ...before, duty: update(before.duty) })),
     [change],
   );
-  const changeEntry = useCallback(
-    (name: EntryName, text: string) =>
-      changeDuty((before) => ({ ...before, entries: { ...before.entries, [name]: text } })),
-    [changeDuty],
-  );
   const open = useCallback((part: number) => change((before) => ({ ...before, part })), [change]);
   const close = useCallback(() => change((before) => ({ ...before, part: undefined })), [change]);
 
@@ -95,6 +93,7 @@ export function Component() {
           Show the parts
         </Button>
         <DutyPanel duty={state.duty} read={shownRead} onChange={changeDuty} policies={policies.data ?? []} />
+        <FilterPanel state={state} onChange={change} />
       </Panel>
       <chakra.div
         ref={scrollRef}
@@ -107,9 +106,9 @@ export function Component() {
         <div>
           <Sentence
             duty={state.duty}
-            policyName={policyName}
+            policies={policies.data ?? []}
             errors={shownRead.errors}
-            onText={changeEntry}
+            onChange={changeDuty}
             onGoTo={() => setPanelOpen(true)}
           />
           <Button
@@ -120,7 +119,9 @@ export function Component() {
           >
             Change the duty
           </Button>
-          {search.error !== null && !search.waiting && <Failed error={search.error} onRetry={search.retry} />}
+          {search.error !== null && !search.waiting && (
+            <SearchFailed error={search.error} onRetry={search.retry} />
+          )}
           {search.answer === undefined && search.error === null && (
             <Loading label="Searching the catalogue" lines={12} />
           )}
@@ -143,7 +144,24 @@ export function Component() {
                 onShow={(show) => change((before) => ({ ...before, show }))}
                 onGrouped={(grouped) => change((before) => ({ ...before, grouped }))}
                 onOpen={open}
-                ledger={<Ledger answer={search.answer} duty={state.duty} onChange={changeDuty} />}
+                address={() =>
+                  `${window.location.origin}/find?${writeFind({ ...state, part: undefined }).toString()}`
+                }
+                nothing={
+                  <NothingMeets
+                    answer={search.answer}
+                    duty={state.duty}
+                    narrowed={search.answered?.filters !== undefined}
+                    onChange={changeDuty}
+                    onShowUnrated={() => change((before) => ({ ...before, show: 'met-and-unrated' }))}
+                  />
+                }
+                ledger={
+                  <>
+                    <Ledger answer={search.answer} duty={state.duty} onChange={changeDuty} />
+                    <FilterChips state={state} onChange={change} />
+                  </>
+                }
               />
             </chakra.div>
           )}

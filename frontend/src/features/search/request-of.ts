@@ -16,7 +16,7 @@ const figures = (texts: string[], quantity: 'tolerance' | 'temperature-coefficie
   });
 
 /** The filters as the server takes them. */
-export function filtersOf({ text, filters, certificate }: FindState): Filters {
+export function filtersOf({ text, filters, flags }: FindState): Filters {
   return {
     text: text === '' ? undefined : text,
     manufacturers: some(ids(filters.manufacturer)),
@@ -26,7 +26,9 @@ export function filtersOf({ text, filters, certificate }: FindState): Filters {
     series: some(filters.series),
     tolerances: some(figures(filters.tolerance, 'tolerance')),
     tcrs: some(figures(filters.tcr, 'temperature-coefficient')),
-    certificate: certificate ? true : undefined,
+    certificate: flags.certificate ? true : undefined,
+    companyPartNumber: flags.numbered ? true : undefined,
+    offer: flags.offered ? true : undefined,
   };
 }
 

@@ -1,4 +1,5 @@
 import { chakra } from '@chakra-ui/react';
+import { useState } from 'react';
 import { checkWords } from '../../../wording/check-words';
 import type { DutyText } from '../duty/duty-text';
 import type { ChangeDuty } from '../panel/change-duty';
@@ -24,6 +25,7 @@ const Strip = chakra('ul', {
 const Relax = chakra('button', {
   base: {
     color: 'accent',
+    display: 'block',
     textAlign: 'start',
     minHeight: 6,
     _hover: { textDecoration: 'underline', textUnderlineOffset: '3px' },
@@ -41,11 +43,6 @@ export function Ledger({ answer, duty, onChange }: LedgerProps) {
   const relaxations = readyRelaxations(answer.relaxations, duty);
   const removing = answer.knockouts.filter((knockout) => knockout.removes > 0);
   const homeless = relaxations.filter((each) => !removing.some((knockout) => knockout.check === each.under));
-  const offer = (relaxation: ReadyRelaxation) => (
-    <Relax key={relaxation.words} type="button" onClick={() => onChange(relaxation.relaxed)}>
-      {relaxation.words} brings {count.format(relaxation.gains)}
-    </Relax>
-  );
   if (removing.length === 0 && homeless.length === 0) return null;
   return (
     <Strip aria-label="What removes parts">
@@ -58,7 +55,7 @@ export function Ledger({ answer, duty, onChange }: LedgerProps) {
             </chakra.b>{' '}
             {count.format(removesAlone)} alone
           </chakra.span>
-          {relaxations.filter((each) => each.under === check).map(offer)}
+          <Offers offers={relaxations.filter((each) => each.under === check)} onChange={onChange} />
         </li>
       ))}
       {homeless.length > 0 && (
@@ -66,9 +63,32 @@ export function Ledger({ answer, duty, onChange }: LedgerProps) {
           <chakra.span color="fg.muted" display="block">
             asking less
           </chakra.span>
-          {homeless.map(offer)}
+          <Offers offers={homeless} onChange={onChange} />
         </li>
       )}
     </Strip>
+  );
+}
+
+/** How many are shown before one asks for the rest, so that the ledger stays a strip. */
+const shownAtFirst = 1;
+
+function Offers({ offers, onChange }: { offers: readonly ReadyRelaxation[]; onChange: ChangeDuty }) {
+  const [all, setAll] = useState(false);
+  const sorted = [...offers].sort((first, second) => second.gains - first.gains);
+  const rest = sorted.length - shownAtFirst;
+  return (
+    <>
+      {(all ? sorted : sorted.slice(0, shownAtFirst)).map(({ words, gains, relaxed }) => (
+        <Relax key={words} type="button" onClick={() => onChange(relaxed)}>
+          {words} brings {count.format(gains)}
+        </Relax>
+      ))}
+      {rest > 0 && (
+        <Relax type="button" color="fg.muted" aria-expanded={all} onClick={() => setAll(!all)}>
+          {all ? 'fewer' : `${rest} more`}
+        </Relax>
+      )}
+    </>
   );
 }

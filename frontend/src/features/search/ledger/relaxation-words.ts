@@ -36,6 +36,10 @@ const checkOfField: Record<string, CheckName> = {
 };
 
 const secondsPerHour = 3600;
+const hoursPerYear = 8760;
+
+/** Rounded down, because no more than that is promised; the entry itself takes the exact hours. */
+const yearsWords = (hours: number): string => `${Math.floor((10 * hours) / hoursPerYear) / 10} years`;
 
 function withEntry(name: EntryName, text: string): (duty: DutyText) => DutyText {
   return (duty) => ({ ...duty, entries: { ...duty.entries, [name]: text } });
@@ -71,7 +75,8 @@ function changeOfNumber(field: string, to: number, duty: DutyText): Change | und
   if (name !== undefined) {
     const { quantity, label } = entryDefinitions[name];
     const text = formatQuantity(name === 'life' ? to * secondsPerHour : to, quantity);
-    return { words: `${text} ${label.toLowerCase()}`, relaxed: withEntry(name, text) };
+    const words = name === 'life' && to >= hoursPerYear ? yearsWords(to) : text;
+    return { words: `${words} ${label.toLowerCase()}`, relaxed: withEntry(name, text) };
   }
   const interval = endOf(field);
   if (interval === undefined) return undefined;

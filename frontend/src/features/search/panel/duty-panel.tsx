@@ -1,8 +1,10 @@
 import { chakra } from '@chakra-ui/react';
 import { deviationRules } from '@resistry/engineering/duty/duty';
 import { formatQuantity } from '@resistry/engineering/notation/format-quantity';
+import { Button } from '../../../components/button';
 import { SelectField } from '../../../components/select-field';
 import type { PolicySummary } from '../../policies/requests/list-policies';
+import { policyOptions } from '../policy-name';
 import type { EntryName } from '../duty/duty-entry';
 import { DutyEntryField } from './duty-entry-field';
 import {
@@ -26,18 +28,8 @@ const deviationOptions = deviationRules.map((value) => ({
   words: value === 'worst-case' ? 'worst case' : 'root sum of squares',
 }));
 
-/** Versions by name, the one in force first and chosen where nothing is. */
-function policyOptions(policies: readonly PolicySummary[]): { value: string; words: string }[] {
-  const inForce = policies.find((policy) => policy.inForce);
-  const words = (policy: PolicySummary): string => `${policy.name} ${policy.version}`;
-  return [
-    { value: '', words: inForce === undefined ? 'the company’s' : words(inForce) },
-    ...policies
-      .filter((policy) => policy !== inForce)
-      .map((policy) => ({ value: String(policy.id), words: words(policy) })),
-    { value: 'none', words: 'none, as rated' },
-  ];
-}
+/** What a link is asked for at first: the residual resistance that chips of all usual sizes stay within. */
+const linkResistance = '50m';
 
 /** The dissipation that a voltage leaves at the lowest resistance, as a hint in the empty power field. */
 function impliedPower({ read }: DutyGroupProps): string | undefined {
@@ -66,6 +58,21 @@ export function DutyPanel(props: DutyPanelProps) {
         {field('lower')}
         {field('nominal')}
         {field('upper')}
+        {duty.entries.lower?.trim() !== '0' && (
+          <Button
+            variant="plain"
+            justifySelf="start"
+            fontSize="xs"
+            onClick={() =>
+              onChange((before) => ({
+                ...before,
+                entries: { ...before.entries, lower: '0', nominal: '', upper: linkResistance },
+              }))
+            }
+          >
+            A zero-ohm link instead
+          </Button>
+        )}
       </OpenGroup>
       <OpenGroup title="Load" note="steady, r.m.s.">
         {field('voltage')}
@@ -113,6 +120,9 @@ export function DutyPanel(props: DutyPanelProps) {
             ? 'stated'
             : 'none'
         }
+        wrong={(['rise', 'terminal', 'case', 'altitude'] as const).some(
+          (name) => read.errors[name] !== undefined,
+        )}
       >
         {field('rise')}
         {field('terminal')}

@@ -20,6 +20,10 @@ export interface Filters {
   tcrs?: number[];
   /** Has a safety certificate in date. */
   certificate?: boolean;
+  /** Stands under a company part number. */
+  companyPartNumber?: boolean;
+  /** Has an offer in force at 1,000 pieces. */
+  offer?: boolean;
 }
 
 /** One question to the catalogue, without the page. */

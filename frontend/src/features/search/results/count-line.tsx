@@ -19,57 +19,60 @@ export interface CountLineProps {
   children: ReactNode;
 }
 
+const Actions = chakra('div', {
+  base: {
+    display: 'flex',
+    flexWrap: 'wrap',
+    alignItems: 'baseline',
+    columnGap: 4,
+    marginInlineStart: 'auto',
+    justifyContent: 'flex-end',
+  },
+});
+
+function countWords(total: number, grouped: boolean): string {
+  const things = grouped ? ['number meets', 'numbers meet'] : ['part meets', 'parts meet'];
+  return `${count.format(total)} ${total === 1 ? things[0] : things[1]} it`;
+}
+
+function approvalsWords(byApproval: CountLineProps['byApproval']): string {
+  return approvals
+    .filter((approval) => (byApproval[approval] ?? 0) > 0)
+    .reverse()
+    .map((approval) => `${count.format(byApproval[approval] ?? 0)} ${approvalWords[approval].toLowerCase()}`)
+    .join(', ');
+}
+
 /** How many meet the duty; how many cannot be told, and whether those are shown. */
-export function CountLine({
-  total,
-  unrated,
-  byApproval,
-  show,
-  grouped,
-  onShow,
-  onGrouped,
-  children,
-}: CountLineProps) {
-  const things = grouped
-    ? total === 1
-      ? 'number meets'
-      : 'numbers meet'
-    : total === 1
-      ? 'part meets'
-      : 'parts meet';
+export function CountLine(props: CountLineProps) {
+  const { total, unrated, byApproval, show, grouped, onShow, onGrouped, children } = props;
   return (
-    <chakra.div display="flex" flexWrap="wrap" alignItems="baseline" columnGap={4} rowGap={1} my={3}>
-      <chakra.h1 fontSize="xl">
-        <span role="status">
-          {count.format(total)} {things} it
-        </span>
-      </chakra.h1>
-      <chakra.span fontSize="sm" color="fg.muted">
-        {approvals
-          .filter((approval) => (byApproval[approval] ?? 0) > 0)
-          .reverse()
-          .map(
-            (approval) =>
-              `${count.format(byApproval[approval] ?? 0)} ${approvalWords[approval].toLowerCase()}`,
-          )
-          .join(', ')}
-      </chakra.span>
-      {unrated > 0 && (
-        <Button
-          variant="plain"
-          aria-pressed={show === 'met-and-unrated'}
-          onClick={() => onShow(show === 'met' ? 'met-and-unrated' : 'met')}
-        >
-          {show === 'met'
-            ? `${count.format(unrated)} more are unrated: show them`
-            : `${count.format(unrated)} unrated among them: hide them`}
+    <chakra.div my={3}>
+      <chakra.div display="flex" flexWrap="wrap" alignItems="baseline" columnGap={4}>
+        <chakra.h1 fontSize="xl">
+          <span role="status">{countWords(total, grouped)}</span>
+        </chakra.h1>
+        <chakra.span fontSize="sm" color="fg.muted">
+          {approvalsWords(byApproval)}
+        </chakra.span>
+        <Actions>{children}</Actions>
+      </chakra.div>
+      <chakra.div display="flex" flexWrap="wrap" columnGap={4} mt={0.5}>
+        <Button variant="plain" aria-pressed={grouped} onClick={() => onGrouped(!grouped)}>
+          {grouped ? 'By company number: show single parts' : 'Group by company number'}
         </Button>
-      )}
-      <chakra.div flex={1} />
-      <Button variant="plain" aria-pressed={grouped} onClick={() => onGrouped(!grouped)}>
-        {grouped ? 'One row a part' : 'One row a number'}
-      </Button>
-      {children}
+        {unrated > 0 && (
+          <Button
+            variant="plain"
+            aria-pressed={show === 'met-and-unrated'}
+            onClick={() => onShow(show === 'met' ? 'met-and-unrated' : 'met')}
+          >
+            {show === 'met'
+              ? `${count.format(unrated)} more are unrated: show them`
+              : `${count.format(unrated)} unrated among them: hide them`}
+          </Button>
+        )}
+      </chakra.div>
     </chakra.div>
   );
 }

@@ -1,12 +1,11 @@
 import { chakra } from '@chakra-ui/react';
-import type { AnsweredAssessment } from '../../../components/assessment/answered-assessment';
 import { DrawnPart } from '../../../components/drawn-part/drawn-part';
 import { MarginRule } from '../../../components/margin-rule';
 import { MarginWord } from '../../../components/margin-word';
 import { StatusWord } from '../../../components/status-word';
 import { checkWords } from '../../../wording/check-words';
+import type { SearchItem } from '../requests/search-parts';
 import { type SearchPart, leadingNumber, tightestCheck } from '../search-part';
-import { overSpecification } from './over-specification';
 import { bodyOfPart, priceWords, valueWords } from './part-figures';
 
 export function BodyCell({ part }: { part: SearchPart }) {
@@ -30,10 +29,10 @@ export function NumberCell({ part }: { part: SearchPart }) {
 }
 
 /** The tightest check as a rule, with its name and figure beneath, and what there is too much of. */
-export function MarginCell({ assessment }: { assessment: AnsweredAssessment }) {
+export function MarginCell({ assessment, overSpecification }: Omit<SearchItem, 'part'>) {
   const check = tightestCheck(assessment.checks);
   if (check === undefined) return <span data-second="">nothing asked</span>;
-  const excess = overSpecification(assessment.excess);
+  const [excess] = overSpecification;
   return (
     <>
       <MarginRule status={check.status} margin={check.margin} />
@@ -59,7 +58,7 @@ const NarrowFrame = chakra('div', {
 });
 
 /** One result on a narrow screen: what decides, in two lines. */
-export function NarrowResult({ part, assessment }: { part: SearchPart; assessment: AnsweredAssessment }) {
+export function NarrowResult({ part, ...item }: SearchItem) {
   return (
     <NarrowFrame>
       <div>
@@ -78,7 +77,7 @@ export function NarrowResult({ part, assessment }: { part: SearchPart; assessmen
         </chakra.span>
       </div>
       <div>
-        <MarginCell assessment={assessment} />
+        <MarginCell {...item} />
       </div>
     </NarrowFrame>
   );

@@ -22,7 +22,7 @@ const body: Column = {
   id: 'body',
   header: 'Body',
   plainHeader: 'Body',
-  width: '4.5rem',
+  width: '4.2rem',
   cell: ({ part }) => <BodyCell part={part} />,
   plain: ({ part }) => part.bodyStyle,
 };
@@ -31,10 +31,12 @@ const number: Column = {
   id: 'company-part-number',
   header: 'Part',
   plainHeader: 'Company part number',
-  width: '6.1rem',
+  width: '6.4rem',
   fixed: true,
   sortable: true,
   cell: ({ part }) => <NumberCell part={part} />,
+  hint: ({ part }) =>
+    [part.companyPartNumber?.number, part.manufacturerPartNumber].filter(Boolean).join(', '),
   plain: ({ part }) => part.companyPartNumber?.number ?? null,
 };
 
@@ -46,6 +48,7 @@ const manufacturerNumber: Column = {
   sortable: true,
   hiddenAtFirst: true,
   cell: ({ part }) => part.manufacturerPartNumber,
+  hint: ({ part }) => part.manufacturerPartNumber,
   plain: ({ part }) => part.manufacturerPartNumber,
 };
 
@@ -53,14 +56,15 @@ const family: Column = {
   id: 'family',
   header: 'Family',
   plainHeader: 'Manufacturer and family',
-  width: '4.8rem',
+  width: '5.2rem',
   sortable: true,
   cell: ({ part }) => (
     <>
-      {part.manufacturer.name}
-      <span data-second="">{part.family.code}</span>
+      {part.family.code}
+      <span data-second="">{part.manufacturer.name}</span>
     </>
   ),
+  hint: ({ part }) => `${part.manufacturer.name} ${part.family.code}, ${part.family.name}`,
   plain: ({ part }) => `${part.manufacturer.name} ${part.family.code}`,
 };
 
@@ -78,7 +82,7 @@ const size: Column = {
   id: 'size',
   header: 'Size',
   plainHeader: 'Size, inch/metric',
-  width: '3.4rem',
+  width: '3.3rem',
   sortable: true,
   cell: ({ part }) => (
     <>
@@ -93,7 +97,7 @@ const resistance: Column = {
   id: 'resistance',
   header: 'Value',
   plainHeader: 'Resistance, Ω',
-  width: '4.4rem',
+  width: '4.2rem',
   align: 'end',
   sortable: true,
   cell: ({ part }) => <Figure value={part.resistance} quantity="resistance" aligned />,
@@ -104,7 +108,7 @@ const tolerance: Column = {
   id: 'tolerance',
   header: 'Tol.',
   plainHeader: 'Tolerance, fraction',
-  width: '3.4rem',
+  width: '3.2rem',
   align: 'end',
   sortable: true,
   cell: ({ part }) => (part.resistance === 0 ? '' : <Figure value={part.tolerance} quantity="tolerance" />),
@@ -115,7 +119,7 @@ const tcr: Column = {
   id: 'tcr',
   header: 'ppm/K',
   plainHeader: 'TCR, 1/K',
-  width: '3.3rem',
+  width: '3.1rem',
   align: 'end',
   sortable: true,
   cell: ({ part }) => (part.resistance === 0 ? '' : <Ppm tcr={part.tcr} />),
@@ -126,9 +130,10 @@ const margin: Column = {
   id: 'margin',
   header: 'Tightest margin',
   plainHeader: 'Tightest margin, fraction',
-  width: '8rem',
+  width: '7.6rem',
   sortable: true,
-  cell: ({ assessment }) => <MarginCell assessment={assessment} />,
+  cell: (item) => <MarginCell {...item} />,
+  hint: ({ overSpecification }) => overSpecification.join(', '),
   plain: ({ assessment }) => tightestCheck(assessment.checks)?.margin ?? null,
 };
 
@@ -173,6 +178,7 @@ const excess: Column = {
   sortable: true,
   hiddenAtFirst: true,
   cell: ({ overSpecification }) => overSpecification.join(', '),
+  hint: ({ overSpecification }) => overSpecification.join(', '),
   plain: ({ overSpecification }) => overSpecification.join(', '),
 };
 
@@ -201,11 +207,24 @@ const price: Column = {
   id: 'price',
   header: '€/1,000',
   plainHeader: 'Unit price at 1,000, EUR',
-  width: '4rem',
+  width: '3.8rem',
   align: 'end',
   sortable: true,
   cell: ({ part }) => priceWords(part.unitPrice),
   plain: ({ part }) => part.unitPrice ?? null,
+};
+
+/** How many approved sources a number has; unfolds to each with its own assessment. */
+export const sourcesColumn: Column = {
+  id: 'sources',
+  header: 'Sources',
+  plainHeader: 'Approved sources',
+  width: '5.2rem',
+  fixed: true,
+  unfolds: true,
+  cell: ({ sources }) =>
+    sources === undefined ? '' : sources.length === 1 ? '1 source' : `${sources.length} sources`,
+  plain: ({ sources }) => sources?.length ?? null,
 };
 
 export const resultColumns: readonly Column[] = [
@@ -236,7 +255,7 @@ export const narrowColumns: readonly Column[] = [
     plainHeader: 'Part',
     width: '100%',
     fixed: true,
-    cell: ({ part, assessment }) => <NarrowResult part={part} assessment={assessment} />,
+    cell: (item) => <NarrowResult {...item} />,
     plain: ({ part }) => leadingNumber(part),
   },
 ];

@@ -1,9 +1,11 @@
-import { type RefObject, useState } from 'react';
+import { type RefObject, useCallback, useMemo, useState } from 'react';
 import type { DataColumn, Sort } from '../../../components/data-table/data-column';
 import { DataTable } from '../../../components/data-table/data-table';
+import type { RowTree } from '../../../components/data-table/row-tree';
 import type { SearchItem } from '../requests/search-parts';
 import type { SearchRequest } from '../requests/search-request';
 import { useSearchRows } from '../requests/use-search-rows';
+import { type Unfolded, countOfRows, rowAtPlace, rowOfSource } from './unfolded-rows';
 
 export interface ResultTableProps {
   /** The request whose answer is shown. */
@@ -19,27 +21,63 @@ export interface ResultTableProps {
   scrollRef: RefObject<HTMLElement | null>;
 }
 
-const keyOf = ({ part }: SearchItem): number => part.id;
+const keyOf = ({ part, sources, companyPartNumber }: SearchItem): string =>
+  sources === undefined ? `part ${part.id}` : `number ${companyPartNumber?.id ?? part.id}`;
+
+const noneUnfolded: Unfolded = new Map();
 
 /** The rows of a search. Scrolling through pages draws nothing but this. */
-export function ResultTable({ answered, openPart, onOpen, ...table }: ResultTableProps) {
+export function ResultTable({ answered, rowCount, openPart, onOpen, ...table }: ResultTableProps) {
   const { itemAt, showRange } = useSearchRows(answered);
-  const [openIndex, setOpenIndex] = useState<number>();
-  const open = (index: number): void => {
-    const item = itemAt(index);
-    if (item === undefined) return;
-    setOpenIndex(index);
-    onOpen(item.part.id);
+  const [openPlace, setOpenPlace] = useState<number>();
+  const [unfoldedOf, setUnfolded] = useState<{ answered?: SearchRequest; unfolded: Unfolded }>();
+  // Places mean something only within the answer they were unfolded in.
+  const unfolded = unfoldedOf?.answered === answered ? (unfoldedOf?.unfolded ?? noneUnfolded) : noneUnfolded;
+
+  const rowAt = (place: number): SearchItem | undefined => {
+    const { item, source } = rowAtPlace(place, unfolded);
+    const found = itemAt(item);
+    return source === undefined || found === undefined ? found : rowOfSource(found, source);
   };
-  const selected = openIndex !== undefined && itemAt(openIndex)?.part.id === openPart ? openIndex : undefined;
+  const open = (place: number): void => {
+    const row = rowAt(place);
+    if (row === undefined) return;
+    setOpenPlace(place);
+    onOpen(row.part.id);
+  };
+  const visible = useCallback(
+    (first: number, last: number) =>
+      showRange(rowAtPlace(first, unfolded).item, rowAtPlace(last, unfolded).item),
+    [showRange, unfolded],
+  );
+  const toggle = (place: number): void => {
+    const { item, source } = rowAtPlace(place, unfolded);
+    const sources = itemAt(item)?.sources?.length;
+    if (source !== undefined || sources === undefined) return;
+    const next = new Map(unfolded);
+    if (!next.delete(item)) next.set(item, sources);
+    setUnfolded({ answered, unfolded: next });
+  };
+  const tree: RowTree = {
+    levelAt: (place) => (rowAtPlace(place, unfolded).source === undefined ? 1 : 2),
+    openAt: (place) => {
+      const { item, source } = rowAtPlace(place, unfolded);
+      return source === undefined && itemAt(item)?.sources !== undefined ? unfolded.has(item) : undefined;
+    },
+    toggle,
+  };
+  const shownCount = useMemo(() => countOfRows(rowCount, unfolded), [rowCount, unfolded]);
+  const selected = openPlace !== undefined && rowAt(openPlace)?.part.id === openPart ? openPlace : undefined;
   return (
     <DataTable
       label="Parts that meet the duty"
-      rowAt={itemAt}
+      rowAt={rowAt}
+      rowCount={shownCount}
       rowKey={keyOf}
-      onVisible={showRange}
+      onVisible={visible}
       selectedIndex={selected}
       onOpen={open}
+      tree={answered?.group === 'company' ? tree : undefined}
       {...table}
     />
   );

@@ -2,11 +2,11 @@ import type { ReactNode, RefObject } from 'react';
 import { ColumnChooser } from '../../../components/data-table/column-chooser';
 import type { Sort } from '../../../components/data-table/data-column';
 import { useTableColumns } from '../../../components/data-table/use-table-columns';
-import { Empty } from '../../../components/states';
 import type { SearchRequest, Show } from '../requests/search-request';
 import type { Search } from '../requests/use-search';
 import { CountLine } from './count-line';
-import { narrowColumns, resultColumns } from './result-columns';
+import { CopyLink } from './copy-link';
+import { narrowColumns, resultColumns, sourcesColumn } from './result-columns';
 import { ResultTable } from './result-table';
 import { TableActions } from './table-actions';
 
@@ -26,18 +26,24 @@ export interface ResultsProps {
   onOpen: (partId: number) => void;
   /** What stands between the count and the rows. */
   ledger: ReactNode;
+  /** What stands in place of the rows where there are none. */
+  nothing: ReactNode;
+  /** The whole address of the search. */
+  address: () => string;
 }
 
 const rowHeights = { wide: 52, narrow: 112 };
 
 /** The parts that meet the duty, with how many they are and what can be done with the list. */
 export function Results(props: ResultsProps) {
-  const { search, request, show, grouped, sort, narrow, openPart, scrollRef, onSort, onOpen, ledger } = props;
+  const { search, request, show, grouped, sort, narrow, openPart, scrollRef, onSort, onOpen } = props;
   const table = useTableColumns('results', resultColumns, sort, onSort);
   const total = search.answer?.total ?? 0;
   const unrated = search.answer?.unrated ?? 0;
   // What was asked for when it was answered, not what the switch says by now.
   const rowCount = search.answered?.show === 'met-and-unrated' ? total + unrated : total;
+  const shown = narrow ? narrowColumns : table.visible;
+  const columns = search.answered?.group === 'company' ? [...shown, sourcesColumn] : shown;
   return (
     <>
       <CountLine
@@ -51,18 +57,16 @@ export function Results(props: ResultsProps) {
       >
         {!narrow && <ColumnChooser choices={table.choices} />}
         <TableActions request={request} rowCount={rowCount} columns={table.visible} />
+        <CopyLink address={props.address} />
       </CountLine>
-      {ledger}
+      {props.ledger}
       {rowCount === 0 ? (
-        <Empty title="No part meets all of this">
-          The ledger says what each demand removes; the sentence above can be loosened number by number.
-          {unrated > 0 && ' Some parts cannot be told for lack of data; they can be shown.'}
-        </Empty>
+        props.nothing
       ) : (
         <ResultTable
           answered={search.answered}
           rowCount={rowCount}
-          columns={narrow ? narrowColumns : table.visible}
+          columns={columns}
           rowHeight={narrow ? rowHeights.narrow : rowHeights.wide}
           sort={sort}
           onSortBy={table.sortBy}

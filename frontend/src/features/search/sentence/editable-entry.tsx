@@ -2,19 +2,7 @@ import { chakra } from '@chakra-ui/react';
 import { type KeyboardEvent, useEffect, useRef, useState } from 'react';
 import { type EntryName, entryDefinitions } from '../duty/duty-entry';
 import { entryWords } from '../duty/entry-words';
-
-const phrase = {
-  fontWeight: 'semibold',
-  textDecoration: 'underline 2px',
-  textDecorationColor: 'accent',
-  textUnderlineOffset: '5px',
-  display: 'inline',
-  lineHeight: 'inherit',
-  textAlign: 'start',
-  _hover: { color: 'accent' },
-} as const;
-
-export const PhraseButton = chakra('button', { base: phrase });
+import { PhraseButton, phrase } from './phrase';
 
 const PhraseInput = chakra('input', {
   base: {

@@ -9,7 +9,8 @@ import { type PanelPlace, panelPlaces } from '../panel/panel-places';
 export type Piece =
   | { kind: 'words'; words: string }
   | { kind: 'entry'; name: EntryName; words: string }
-  | { kind: 'choice'; place: PanelPlace; words: string };
+  | { kind: 'choice'; place: PanelPlace; words: string }
+  | { kind: 'policy'; words: string };
 
 type Draft = (string | Piece)[];
 
@@ -108,7 +109,7 @@ class Clauses {
   }
 
   terms(policyName: string): Draft {
-    const { approvals, supply, deviation } = this.duty;
+    const { approvals, supply, deviation, policy } = this.duty;
     const rule: Draft =
       deviation === 'worst-case'
         ? []
@@ -117,8 +118,8 @@ class Clauses {
             { kind: 'choice', place: panelPlaces.deviation, words: 'as root sum of squares' },
           ];
     return [
-      ', derated by ',
-      { kind: 'choice', place: panelPlaces.policy, words: policyName },
+      policy === 'none' ? ', by ' : ', derated by ',
+      { kind: 'policy', words: policyName },
       ...rule,
       '; ',
       {

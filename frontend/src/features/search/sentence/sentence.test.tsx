@@ -2,6 +2,7 @@ import { screen } from '@testing-library/react';
 import userEvent from '@testing-library/user-event';
 import { useState } from 'react';
 import { renderInTheme } from '../../../test-support/render-in-theme';
+import type { PolicySummary } from '../../policies/requests/list-policies';
 import type { DutyText } from '../duty/duty-text';
 import { emptyDutyText } from '../duty/duty-text';
 import { readDuty } from '../duty/read-duty';
@@ -13,6 +14,10 @@ const duty: DutyText = {
   entries: { lower: '4k5', upper: '4k9', life: '10 years', voltage: '0…24', ambient: '-20…70' },
 };
 
+const policies: PolicySummary[] = [
+  { id: 7, name: 'Brackwater', version: 3, origin: 'company', source: '', inForce: true, note: '' },
+];
+
 const inWords = (text: DutyText): string =>
   sentencePieces(text, 'Brackwater 3')
     .map((piece) => piece.words)
@@ -20,9 +25,7 @@ const inWords = (text: DutyText): string =>
 
 function Editable() {
   const [text, setText] = useState(duty);
-  const change = (name: string, typed: string): void =>
-    setText((before) => ({ ...before, entries: { ...before.entries, [name]: typed } }));
-  return <Sentence duty={text} policyName="Brackwater 3" errors={readDuty(text).errors} onText={change} />;
+  return <Sentence duty={text} policies={policies} errors={readDuty(text).errors} onChange={setText} />;
 }
 
 describe('the duty as a sentence', () => {
@@ -52,6 +55,13 @@ describe('the duty as a sentence', () => {
     await userEvent.clear(field);
     await userEvent.type(field, '5k1{Enter}');
     expect(screen.getByRole('button', { name: 'Highest: 5.1 kΩ. Change it' })).toBeInTheDocument();
+  });
+
+  it('lets the policy be chosen in place, down to the ratings as they are', async () => {
+    renderInTheme(<Editable />);
+    await userEvent.click(screen.getByRole('button', { name: 'Policy: Brackwater 3. Change it' }));
+    await userEvent.selectOptions(screen.getByRole('combobox', { name: 'Policy' }), 'none');
+    expect(screen.getByRole('paragraph')).toHaveTextContent(', by the manufacturer’s ratings as they are');
   });
 
   it('brings the old number back on Escape', async () => {

@@ -1,52 +1,93 @@
 import { chakra } from '@chakra-ui/react';
+import { Fragment } from 'react';
+import type { PolicySummary } from '../../policies/requests/list-policies';
 import type { EntryName } from '../duty/duty-entry';
 import type { DutyText } from '../duty/duty-text';
 import type { EntryErrors } from '../duty/entry-reader';
+import type { ChangeDuty } from '../panel/change-duty';
 import { goToPlace } from '../panel/panel-places';
-import { EditableEntry, PhraseButton } from './editable-entry';
-import { sentencePieces } from './sentence-pieces';
+import { policyNameOf, policyOptions } from '../policy-name';
+import { EditableEntry } from './editable-entry';
+import { PhraseButton } from './phrase';
+import { PolicyPhrase } from './policy-phrase';
+import { type Piece, sentencePieces } from './sentence-pieces';
 
 export interface SentenceProps {
   duty: DutyText;
-  policyName: string;
+  policies: readonly PolicySummary[];
   errors: EntryErrors;
-  onText: (name: EntryName, text: string) => void;
+  onChange: ChangeDuty;
   /** Called before leading to a control of the panel, which may be folded away. */
   onGoTo?: () => void;
 }
 
-/** The duty as one sentence. Its numbers are edited in place; its choices lead to where they are made. */
-export function Sentence({ duty, policyName, errors, onText, onGoTo }: SentenceProps) {
+/** The marks at the start of some words, which belong to what stands before them. */
+const leadingMarks = /^[,.;]*/;
+
+/** The duty as one sentence. Its numbers and its policy are edited in place; its other choices lead to where they are made. */
+export function Sentence({ duty, policies, errors, onChange, onGoTo }: SentenceProps) {
+  const pieces = sentencePieces(duty, policyNameOf(duty.policy, policies));
+  const setEntry = (name: EntryName, text: string): void =>
+    onChange((before) => ({ ...before, entries: { ...before.entries, [name]: text } }));
+
+  const phraseOf = (piece: Exclude<Piece, { kind: 'words' }>) => {
+    switch (piece.kind) {
+      case 'entry':
+        return (
+          <EditableEntry
+            name={piece.name}
+            text={duty.entries[piece.name] ?? ''}
+            error={errors[piece.name]}
+            onText={setEntry}
+          />
+        );
+      case 'policy':
+        return (
+          <PolicyPhrase
+            words={piece.words}
+            value={duty.policy ?? ''}
+            options={policyOptions(policies)}
+            onValue={(value) =>
+              onChange((before) => ({ ...before, policy: value === '' ? undefined : value }))
+            }
+          />
+        );
+      case 'choice':
+        return (
+          <PhraseButton
+            type="button"
+            onClick={() => {
+              onGoTo?.();
+              requestAnimationFrame(() => goToPlace(piece.place));
+            }}
+          >
+            {piece.words}
+          </PhraseButton>
+        );
+    }
+  };
+
   return (
     <chakra.p fontSize={{ base: 'md', md: 'lg' }} lineHeight={1.65} maxWidth="60rem">
-      {sentencePieces(duty, policyName).map((piece, index) => {
-        switch (piece.kind) {
-          case 'words':
-            return <span key={`words ${index}`}>{piece.words}</span>;
-          case 'entry':
-            return (
-              <EditableEntry
-                key={piece.name}
-                name={piece.name}
-                text={duty.entries[piece.name] ?? ''}
-                error={errors[piece.name]}
-                onText={onText}
-              />
-            );
-          case 'choice':
-            return (
-              <PhraseButton
-                key={piece.place}
-                type="button"
-                onClick={() => {
-                  onGoTo?.();
-                  requestAnimationFrame(() => goToPlace(piece.place));
-                }}
-              >
-                {piece.words}
-              </PhraseButton>
-            );
+      {pieces.map((piece, index) => {
+        const next = pieces[index + 1];
+        if (piece.kind === 'words') {
+          const marksShown = pieces[index - 1]?.kind !== undefined && pieces[index - 1]?.kind !== 'words';
+          return (
+            <Fragment key={index}>
+              {marksShown ? piece.words.replace(leadingMarks, '') : piece.words}
+            </Fragment>
+          );
         }
+        // Browsers break a line between a control and the comma behind it unless the two are held together.
+        const marks = next?.kind === 'words' ? leadingMarks.exec(next.words)?.[0] : '';
+        const key = piece.kind === 'entry' ? piece.name : piece.kind === 'choice' ? piece.place : 'policy';
+        return (
+          <chakra.span key={`${key} ${piece.kind === 'entry' ? '' : index}`} whiteSpace="nowrap">
+            {phraseOf(piece)}
+            {marks}
+          </chakra.span>
+        );
       })}
     </chakra.p>
   );

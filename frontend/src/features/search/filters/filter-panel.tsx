@@ -1,0 +1,62 @@
+import { chakra } from '@chakra-ui/react';
+import { Failed, Loading } from '../../../components/states';
+import { type FindState, filterNames, flagNames } from '../find-address';
+import { useFacets } from '../requests/get-facets';
+import type { ChangeFind } from '../use-find-state';
+import { filterChoices, filterWords, flagWords } from './filter-choices';
+import { FilterGroup } from './filter-group';
+
+/** What narrows the catalogue beside the duty; the numbers are those of the whole catalogue. */
+export function FilterPanel({ state, onChange }: { state: FindState; onChange: ChangeFind }) {
+  const facets = useFacets();
+  return (
+    <chakra.section mt={6} aria-label="Only these parts">
+      <chakra.div display="flex" justifyContent="space-between" mb={1.5} fontSize="2xs" color="fg.muted">
+        <chakra.h2 fontWeight="semibold">Only these parts</chakra.h2>
+        <span>in the catalogue</span>
+      </chakra.div>
+      {facets.isPending && <Loading label="Reading what can be chosen" lines={3} />}
+      {facets.isError && <Failed error={facets.error} onRetry={() => void facets.refetch()} />}
+      {facets.data !== undefined && <Filters facets={facets.data} state={state} onChange={onChange} />}
+      <chakra.div borderTop="1px solid" borderColor="border" py={1.5}>
+        {flagNames.map((name) => (
+          <chakra.label key={name} display="flex" gap={2} alignItems="center" minHeight={6} fontSize="sm">
+            <chakra.input
+              type="checkbox"
+              accentColor="accent"
+              checked={state.flags[name]}
+              onChange={() =>
+                onChange((before) => ({
+                  ...before,
+                  flags: { ...before.flags, [name]: !before.flags[name] },
+                }))
+              }
+            />
+            {flagWords[name]}
+          </chakra.label>
+        ))}
+      </chakra.div>
+    </chakra.section>
+  );
+}
+
+interface FiltersProps {
+  facets: Parameters<typeof filterChoices>[0];
+  state: FindState;
+  onChange: ChangeFind;
+}
+
+function Filters({ facets, state, onChange }: FiltersProps) {
+  const choices = filterChoices(facets, state.filters);
+  return filterNames.map((name) => (
+    <FilterGroup
+      key={name}
+      title={filterWords[name]}
+      choices={choices[name]}
+      chosen={state.filters[name]}
+      onChosen={(chosen) =>
+        onChange((before) => ({ ...before, filters: { ...before.filters, [name]: chosen } }))
+      }
+    />
+  ));
+}
