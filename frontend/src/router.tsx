@@ -19,6 +19,7 @@ export const routes: RouteObject[] = [
         children: [
           { index: true, element: <Navigate to="/find" replace /> },
           { path: '/find', lazy: () => import('./features/search/find-page') },
+          { path: '/account', lazy: () => import('./features/account/account-page') },
           { path: '*', element: <NotFoundPage /> },
         ],
       },
