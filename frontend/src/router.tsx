@@ -19,7 +19,10 @@ export const routes: RouteObject[] = [
         children: [
           { index: true, element: <Navigate to="/find" replace /> },
           { path: '/find', lazy: () => import('./features/search/find-page') },
+          { path: '/parts/:id', lazy: () => import('./features/parts/part-page') },
           { path: '/account', lazy: () => import('./features/account/account-page') },
+          { path: '/families', lazy: () => import('./features/families/families-page') },
+          { path: '/families/:id', lazy: () => import('./features/families/family-page') },
           { path: '*', element: <NotFoundPage /> },
         ],
       },

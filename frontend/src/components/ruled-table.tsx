@@ -32,7 +32,7 @@ export interface RuledTableProps {
 /** A table short enough to be read as a whole, with hairlines between its rows. */
 export function RuledTable({ label, children }: RuledTableProps) {
   return (
-    <Scroller role="region" aria-label={label} tabIndex={0}>
+    <Scroller role="group" aria-label={label} tabIndex={0}>
       <Table aria-label={label}>{children}</Table>
     </Scroller>
   );
