@@ -47,6 +47,11 @@ export function settle(conditions: Conditions, lowest: number, highest: number):
   let hot = axisCelsius;
   let steps = 0;
   let settled = false;
+  let change = Infinity;
+  const canRunAway =
+    load !== undefined &&
+    load.powerMax === Infinity &&
+    (load.voltageMax === Infinity || load.currentMax === Infinity);
   while (steps < largestStepCount) {
     steps += 1;
     if (load !== undefined) {
@@ -56,8 +61,11 @@ export function settle(conditions: Conditions, lowest: number, highest: number):
     }
     const next = deviationAt(conditions, hot, voltage);
     if (!Number.isFinite(next) || next > 1e6 || !Number.isFinite(dissipation)) break;
-    const change = Math.abs(next - deviation);
+    const before = change;
+    change = Math.abs(next - deviation);
     deviation = next;
+    // By voltage or by current alone every step is convex in the deviation: once steps grow they grow for ever.
+    if (canRunAway && change > before * (1 + 1e-9) && change > closeEnough) break;
     if (change <= closeEnough * (1 + next)) {
       settled = true;
       break;

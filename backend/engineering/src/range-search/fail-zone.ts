@@ -160,6 +160,8 @@ export function voltageZone(conditions: Conditions, allowance: number): FailZone
   if (worst === 0) return everywhere;
   const axis = conditions.axis.known ? conditions.axis.celsius : NaN;
   const edge = (worst * (1 + guard)) / (1 + deviationAt(conditions, axis, 0));
+  if (load.voltageMax === Infinity && load.powerMax === Infinity)
+    return zoneByCurrent(conditions, allowance, edge);
   const bound = settle(conditions, edge / 2, edge);
   const deviation = bound.settled && bound.deviation < 0.9 ? bound.deviation : Infinity;
   return {
@@ -168,4 +170,34 @@ export function voltageZone(conditions: Conditions, allowance: number): FailZone
     possibleFrom: (worst * (1 - guard)) / (1 + deviation),
     possibleTo: Infinity,
   };
+}
+
+/** Halvings of the logarithm of resistance; near the last resistance that settles each further one costs many steps. */
+const halvings = 6;
+
+/**
+ * Where a voltage that a current alone brings about passes an allowance (V). Voltage and heat both grow with resistance,
+ * so up to the last resistance that settles inside the allowance every part passes, and from the first that does not
+ * every part fails.
+ * @param edge Ω, from which even an unheated part fails
+ */
+function zoneByCurrent(conditions: Conditions, allowance: number, edge: number): FailZone {
+  const passes = (ohm: number, volt: number): boolean => {
+    const state = settle(conditions, ohm, ohm);
+    return state.settled && state.voltage <= volt;
+  };
+  let high = edge;
+  let low = edge / 2;
+  while (low > edge * 1e-6 && !passes(low, allowance * (1 - guard))) {
+    high = low;
+    low /= 10;
+  }
+  if (low <= edge * 1e-6)
+    return { certainFrom: high, certainTo: Infinity, possibleFrom: 0, possibleTo: Infinity };
+  for (let step = 0; step < halvings; step += 1) {
+    const middle = Math.sqrt(low * high);
+    if (passes(middle, allowance * (1 - guard))) low = middle;
+    else high = middle;
+  }
+  return { certainFrom: high * (1 + 3 * guard), certainTo: Infinity, possibleFrom: low, possibleTo: Infinity };
 }

@@ -4,7 +4,6 @@ import type { Requirement } from '@resistry/engineering/duty/requirement';
 import { askedChecks, type AskedCheck } from '@resistry/engineering/range-search/asked-checks';
 import { evaluateRow } from '@resistry/engineering/range-search/evaluate-row';
 import type { RowMasks } from '@resistry/engineering/range-search/row-masks';
-import type { Ratings } from '@resistry/engineering/ratings/ratings';
 import { approvals, supplyStatuses } from '@resistry/engineering/ratings/technology';
 import { wantedApprovals } from '@resistry/engineering/checks/approval';
 import { wantedSupply } from '@resistry/engineering/checks/supply';
@@ -38,30 +37,9 @@ export interface Evaluation {
   unmetInEveryMode: Uint32Array;
 }
 
-/** Ratings of a row in one of its modes, at a resistance that stands for all of them (1 Ω, or 0 for links). */
-export function ratingsOfCatalogueRow(index: CatalogueIndex, row: CatalogueRow, mode: number): Ratings {
-  const ratings = index.ratings.get(row.sizeId)?.modes[mode]?.ratings;
-  if (ratings === undefined) throw new Error(`Size ${String(row.sizeId)} of the index has no ratings.`);
-  return {
-    ...ratings,
-    resistance: row.isLink ? 0 : 1,
-    tolerance: row.tolerance ?? undefined,
-    tcr: row.tcr ?? undefined,
-    link: row.isLink ? ratings.link : undefined,
-  };
-}
-
 /** Conditions of each operating mode of a row. */
-export function conditionsOfRow(
-  index: CatalogueIndex,
-  row: CatalogueRow,
-  requirement: Requirement,
-  policy: Policy,
-): Conditions[] {
-  const count = index.ratings.get(row.sizeId)?.modes.length ?? 0;
-  return Array.from({ length: count }, (_, mode) =>
-    conditionsOf(ratingsOfCatalogueRow(index, row, mode), requirement, policy),
-  );
+export function conditionsOfRow(row: CatalogueRow, requirement: Requirement, policy: Policy): Conditions[] {
+  return row.modes.map((ratings) => conditionsOf(ratings, requirement, policy));
 }
 
 /** Holds every part of the given rows against a requirement; the standing checks are set last, from the columns. */
@@ -92,7 +70,7 @@ function evaluateModes(
 ): void {
   const { columns } = index;
   const { from, to } = row;
-  const modes = conditionsOfRow(index, row, requirement, policy);
+  const modes = conditionsOfRow(row, requirement, policy);
   modes.forEach((conditions, mode) => {
     const into = mode === 0 ? masks : other;
     evaluateRow(conditions, checks, columns.resistance, from, to, into);

@@ -1,6 +1,6 @@
 import { approvals, supplyStatuses } from '@resistry/engineering/ratings/technology';
 import type { Readers } from '../../database/readers';
-import type { SizeRatings } from '../../parts/ratings/size-ratings';
+import { modesOfPart, type SizeRatings } from '../../parts/ratings/size-ratings';
 import {
   allocateColumns,
   type CatalogueColumns,
@@ -31,10 +31,12 @@ export async function buildIndex(
   const parts = all.filter((part) => ratings.has(part.size_id));
   const companyPosition = new Map(numbers.map(({ id }, position) => [id, position]));
   const columns = allocateColumns(parts.length);
+  const bitsOf = remembered(seriesBits);
   const rows: CatalogueRow[] = [];
   for (const [position, part] of parts.entries()) {
     fill(columns, position, part, companyPosition);
-    extendRows(rows, position, part);
+    columns.series[position] = bitsOf(part.resistance_ohm);
+    extendRows(rows, position, part, ratings);
   }
   return {
     columns,
@@ -81,12 +83,29 @@ function fill(
   columns.resistance[position] = part.resistance_ohm;
   columns.company[position] =
     part.company_part_number_id === null ? -1 : (companyPosition.get(part.company_part_number_id) ?? -1);
-  columns.series[position] = seriesBits(part.resistance_ohm);
   columns.numberRank[position] = part.number_rank;
   fillStanding(columns, position, part);
 }
 
-function extendRows(rows: CatalogueRow[], position: number, part: PartColumnsRow): void {
+/** A function of a resistance that a catalogue asks for the same few thousand values again and again. */
+function remembered(compute: (resistance: number) => number): (resistance: number) => number {
+  const known = new Map<number, number>();
+  return (resistance) => {
+    let value = known.get(resistance);
+    if (value === undefined) {
+      value = compute(resistance);
+      known.set(resistance, value);
+    }
+    return value;
+  };
+}
+
+function extendRows(
+  rows: CatalogueRow[],
+  position: number,
+  part: PartColumnsRow,
+  ratings: ReadonlyMap<number, SizeRatings>,
+): void {
   const last = rows.at(-1);
   const isLink = part.resistance_ohm === 0;
   if (
@@ -99,6 +118,8 @@ function extendRows(rows: CatalogueRow[], position: number, part: PartColumnsRow
     last.to = position + 1;
     return;
   }
+  const size = ratings.get(part.size_id);
+  if (size === undefined) throw new Error(`Size ${String(part.size_id)} of the index has no ratings.`);
   rows.push({
     from: position,
     to: position + 1,
@@ -106,6 +127,12 @@ function extendRows(rows: CatalogueRow[], position: number, part: PartColumnsRow
     tolerance: part.tolerance_fraction,
     tcr: part.tcr_per_kelvin,
     isLink,
+    modes: modesOfPart(size, {
+      // One resistance stands for the whole row: what differs between its parts is asked for separately.
+      resistance: isLink ? 0 : 1,
+      tolerance: part.tolerance_fraction,
+      tcr: part.tcr_per_kelvin,
+    }).map((mode) => mode.ratings),
   });
 }
 

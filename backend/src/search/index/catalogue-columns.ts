@@ -1,3 +1,5 @@
+import type { Ratings } from '@resistry/engineering/ratings/ratings';
+
 /**
  * The catalogue as columns, one position a part, sorted by row (same size, tolerance and TCR) and within it by resistance.
  * Shared memory: the thread that serves requests writes a part's standing, the one that searches reads it.
@@ -31,6 +33,8 @@ export interface CatalogueRow {
   /** 1/K */
   tcr: number | null;
   isLink: boolean;
+  /** Ratings in each operating mode, at a resistance of 1 Ω (0 for links) that stands for the whole row. */
+  modes: readonly Ratings[];
 }
 
 /** What rows are filtered and sorted by, one a size. */

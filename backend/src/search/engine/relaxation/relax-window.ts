@@ -11,6 +11,9 @@ export interface Reach {
   life(unit: number): { low: number; high: number };
 }
 
+/** Units that are tried before the edge is given up: those nearest to it lack something else. */
+const tried = 64;
+
 /**
  * The smallest widening of the window at one edge that brings a unit back. A unit needs at least its nominal resistance
  * inside, so units are looked at from the edge outwards, and no farther than the best found so far.
@@ -35,8 +38,9 @@ export function relaxWindow(
   const field = { direction: edge === 'upper' ? 'up' : 'down', scale: 'digits' } as const;
   const pointer = `/window/${edge}`;
   let best: number | undefined;
+  let tries = 0;
   for (const { unit, nominal } of byNominal) {
-    if (best !== undefined && sign * (nominal - best) > 0) break;
+    if (tries >= tried || (best !== undefined && sign * (nominal - best) > 0)) break;
     const life = reach.life(unit);
     const keptByOther = edge === 'upper' ? life.low < window.lower : life.high > window.upper;
     const needed = outer(life);
@@ -44,6 +48,7 @@ export function relaxWindow(
       continue;
     const to = roundedOutward(field, needed, edge === 'upper' ? Infinity : Number.MIN_VALUE);
     if (best !== undefined && sign * (to - best) >= 0) continue;
+    tries += 1;
     if (retrial.met(withValueAt(duty, pointer, to), [unit]).length === 1) best = to;
   }
   if (best === undefined) return undefined;

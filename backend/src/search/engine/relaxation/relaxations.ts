@@ -93,7 +93,7 @@ function reachOf(index: CatalogueIndex, scope: Scope, { requirement, policy }: E
       for (const position of scope.positionsOf(unit)) {
         const row = rowOfPosition(index.rows, position);
         if (row.isLink) return { low: 0, high: Infinity };
-        const modes = conditions.get(row.from) ?? conditionsOfRow(index, row, requirement, policy);
+        const modes = conditions.get(row.from) ?? conditionsOfRow(row, requirement, policy);
         conditions.set(row.from, modes);
         const ohm = resistance[position] ?? NaN;
         const states = modes.map((mode) => settle(mode, ohm, ohm)).filter(({ settled }) => settled);
