@@ -1,12 +1,10 @@
 import type { AddressInfo } from 'node:net';
-import { buffer } from 'node:stream/consumers';
 import { Injectable, type OnModuleDestroy, type OnModuleInit } from '@nestjs/common';
 import { PinoLogger } from 'nestjs-pino';
-import { SMTPServer } from 'smtp-server';
+import type { SMTPServer } from 'smtp-server';
 import { Environment } from '../config/environment';
+import { closeMailServer, listenForMail } from './listen-for-mail';
 import { MailBox } from './mail-box';
-
-const LARGEST_LETTER_BYTES = 1_000_000;
 
 /** A mail server of our own for where none is configured: takes letters on the loopback and keeps them as files. */
 @Injectable()
@@ -33,27 +31,13 @@ export class MailCatcher implements OnModuleInit, OnModuleDestroy {
 
   async onModuleInit(): Promise<void> {
     if (!this.inUse) return;
-    const server = new SMTPServer({
-      disabledCommands: ['STARTTLS', 'AUTH'],
-      authOptional: true,
-      size: LARGEST_LETTER_BYTES,
-      onData: (stream, _session, done) => {
-        buffer(stream)
-          .then((source) => this.box.keep(source))
-          .then(
-            () => done(),
-            (error: unknown) => done(error instanceof Error ? error : new Error(String(error))),
-          );
-      },
-    });
-    server.on('error', (error) => this.logger.error({ err: error }, 'the local mail catcher failed'));
-    await new Promise<void>((resolve) => server.listen(0, '127.0.0.1', resolve));
-    this.server = server;
+    this.server = await listenForMail(this.box, 0, '127.0.0.1', (error) =>
+      this.logger.error({ err: error }, 'the local mail catcher failed'),
+    );
   }
 
   async onModuleDestroy(): Promise<void> {
-    const { server } = this;
-    if (server) await new Promise<void>((resolve) => server.close(resolve));
+    if (this.server) await closeMailServer(this.server);
   }
 }
 
