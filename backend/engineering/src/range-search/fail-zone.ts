@@ -118,13 +118,17 @@ function unheatedPossibly(conditions: Conditions, load: SteadyLoad): { from: num
 
 function possiblyAbove(conditions: Conditions, load: SteadyLoad, watt: number): { from: number; to: number } {
   const most = Math.min(watt, load.powerMax, load.voltageMax * load.currentMax);
-  // Where I²·R stays inside the bound, I·R stays inside watt / I.
-  const voltage = Math.min(load.voltageMax, watt / load.currentMax);
+  // By a current alone, where I²·R stays inside the bound, I·R stays inside watt / I.
+  const voltage = load.voltageMax < Infinity ? load.voltageMax : watt / load.currentMax;
   const bounded =
     load.voltageMax < Infinity || load.currentMax < Infinity || conditions.voltageCoefficient === 0;
   if (!bounded) return { from: 0, to: Infinity };
   const axis = conditions.axis.known ? conditions.axis.celsius : NaN;
-  const heated = deviationAt(conditions, axis + (conditions.thermal?.value ?? 0) * most, voltage);
+  const heated = deviationAt(
+    conditions,
+    axis + (conditions.thermal?.value ?? 0) * most,
+    Math.min(voltage, Number.MAX_VALUE),
+  );
   // A deviation without end even inside the bound: whether such a part settles at all is to be seen one by one.
   return heated < runaway ? dissipationAbove(load, watt, heated) : { from: 0, to: Infinity };
 }
@@ -199,5 +203,10 @@ function zoneByCurrent(conditions: Conditions, allowance: number, edge: number):
     if (passes(middle, allowance * (1 - guard))) low = middle;
     else high = middle;
   }
-  return { certainFrom: high * (1 + 3 * guard), certainTo: Infinity, possibleFrom: low, possibleTo: Infinity };
+  return {
+    certainFrom: high * (1 + 3 * guard),
+    certainTo: Infinity,
+    possibleFrom: low,
+    possibleTo: Infinity,
+  };
 }
