@@ -1,14 +1,16 @@
 import type { Ratings } from '@resistry/engineering/ratings/ratings';
 import { queryOptions, useQuery } from '@tanstack/react-query';
 import { client } from '../../../api/client';
-import type { SearchPart } from '../../search/search-part';
+import type { Schema } from '../../../api/schema';
 
-/** A part with everything the catalogue knows of its ratings. */
-export interface PartDetails extends SearchPart {
-  /** One set of ratings for each operating mode. */
-  modes: { name?: string | null; ratings: Ratings }[];
-  version: number;
+/** A set of ratings for an operating mode; without a name where the size has one mode only. */
+export interface PartMode {
+  name?: string;
+  ratings: Ratings;
 }
+
+/** Everything that the catalogue knows of a part. */
+export type PartDetails = Omit<Schema<'PartDetailsDto'>, 'modes'> & { modes: PartMode[] };
 
 export async function getPart(id: number, signal?: AbortSignal): Promise<PartDetails> {
   const { data } = await client.get<PartDetails>(`/parts/${id}`, { signal });

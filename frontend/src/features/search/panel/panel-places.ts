@@ -20,8 +20,8 @@ export const entryPlace = (name: EntryName): `duty-entry-${EntryName}` => `duty-
 /** Unfolds the group that holds a control and puts the keyboard there. */
 export function goToPlace(place: PanelPlace): void {
   const control = document.getElementById(place);
-  const group = control?.closest('details');
-  if (group) group.open = true;
+  for (let fold = control?.closest('details'); fold; fold = fold.parentElement?.closest('details'))
+    fold.open = true;
   const target = control?.matches('input, select, button')
     ? control
     : control?.querySelector<HTMLElement>('input, select, button');

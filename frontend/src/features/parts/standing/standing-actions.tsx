@@ -1,0 +1,86 @@
+import { chakra } from '@chakra-ui/react';
+import { useState } from 'react';
+import { Button } from '../../../components/button';
+import { Failed, Loading } from '../../../components/states';
+import type { PartDetails } from '../requests/get-part';
+import { type Transitions, useTransitions } from '../requests/get-transitions';
+import { Quiet, Section } from '../sections/section';
+import { DemandList } from './demand-list';
+import { TransitionDialog } from './transition-dialog';
+import { type Offered, approvalDeed, supplyDeed } from './transition-words';
+
+function offeredOf(transitions: Transitions): Offered[] {
+  return [
+    ...transitions.approvalTransitions.map((transition): Offered => ({
+      door: 'approval',
+      deed: approvalDeed(transitions.approval, transition.to),
+      transition,
+    })),
+    ...transitions.supplyTransitions.map((transition): Offered => ({
+      door: 'supply',
+      deed: supplyDeed(transition.to),
+      transition,
+    })),
+  ];
+}
+
+const Deeds = chakra('ul', {
+  base: {
+    fontSize: 'sm',
+    '& > li': { py: 2, borderBottom: '1px solid', borderColor: 'border' },
+    '& b': { fontWeight: 'semibold' },
+  },
+});
+
+/** What this person may do with the part, and, folded, what all changes demand and who may make them. */
+export function StandingActions({ part }: { part: PartDetails }) {
+  const transitions = useTransitions(part.id);
+  const [chosen, setChosen] = useState<Offered>();
+  if (transitions.isPending) return <Loading label="Reading what may become of it" lines={2} />;
+  if (transitions.isError)
+    return <Failed error={transitions.error} onRetry={() => void transitions.refetch()} />;
+  const all = offeredOf(transitions.data);
+  const allowed = all.filter(({ transition }) => transition.allowed);
+  return (
+    <Section title="What may become of it">
+      {allowed.length === 0 ? (
+        <Quiet>Nothing that your roles allow; below stands whose it is.</Quiet>
+      ) : (
+        <chakra.div display="flex" flexWrap="wrap" gap={2}>
+          {allowed.map((offered) => (
+            <Button key={offered.deed} onClick={() => setChosen(offered)}>
+              {offered.deed}
+            </Button>
+          ))}
+        </chakra.div>
+      )}
+      <chakra.details mt={2} fontSize="sm">
+        <chakra.summary cursor="pointer" py={1} color="fg.muted">
+          What each change demands, and whose it is
+        </chakra.summary>
+        <Deeds>
+          {all.map(({ deed, transition }) => (
+            <li key={deed}>
+              <b>{deed}</b>
+              {transition.forbiddenBy !== undefined && (
+                <Quiet>
+                  {transition.forbiddenBy.words} (rule: {transition.forbiddenBy.rule})
+                </Quiet>
+              )}
+              <DemandList demands={transition.demands} />
+              {transition.allowed && transition.demands.length === 0 && <Quiet>Only a reason.</Quiet>}
+            </li>
+          ))}
+        </Deeds>
+      </chakra.details>
+      {chosen !== undefined && (
+        <TransitionDialog
+          part={part}
+          offered={chosen}
+          version={transitions.data.version}
+          onClose={() => setChosen(undefined)}
+        />
+      )}
+    </Section>
+  );
+}
