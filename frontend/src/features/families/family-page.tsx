@@ -30,7 +30,11 @@ function Family({ family }: { family: FamilyDetails }) {
     <Page
       title={code}
       lead={`${name}, ${manufacturer.name}: ${approvalCountWords(family.approvals)}.`}
-      actions={<LinkButton to={findFamilyLink(family.id)}>Find its parts</LinkButton>}
+      actions={
+        <LinkButton to={findFamilyLink(family.id)} color="fg" textDecoration="none">
+          Find its parts
+        </LinkButton>
+      }
     >
       {shown === undefined ? (
         <Empty title="No revision is published yet">Its drafts stand below.</Empty>
