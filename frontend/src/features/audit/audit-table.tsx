@@ -1,0 +1,53 @@
+import { chakra } from '@chakra-ui/react';
+import { Link } from 'react-router-dom';
+import { RuledTable } from '../../components/ruled-table';
+import { momentWords } from '../../wording/date-words';
+import { actionWords, subjectWords } from '../permissions/permission-words';
+import { Changes } from './changes';
+import type { AuditEntry } from './requests/list-audit';
+
+/** Things that have a page of their own. */
+const pages: Record<string, string> = { Part: '/parts/', Family: '/families/' };
+
+function Subject({ entry }: { entry: AuditEntry }) {
+  const words = `${subjectWords(entry.subjectType)} ${entry.subjectId}`;
+  const page = pages[entry.subjectType];
+  return page === undefined ? <>{words}</> : <Link to={`${page}${entry.subjectId}`}>{words}</Link>;
+}
+
+/** Who did what to what, when and why. */
+export function AuditTable({ entries }: { entries: readonly AuditEntry[] }) {
+  return (
+    <RuledTable label="Audit trail">
+      <thead>
+        <tr>
+          <th scope="col">When</th>
+          <th scope="col">Who</th>
+          <th scope="col">What</th>
+          <th scope="col">Changed</th>
+          <th scope="col">Why</th>
+        </tr>
+      </thead>
+      <tbody>
+        {entries.map((entry) => (
+          <tr key={entry.id}>
+            <chakra.td whiteSpace="nowrap">{momentWords(entry.recordedAt)}</chakra.td>
+            <chakra.td whiteSpace="nowrap">{entry.actorName}</chakra.td>
+            <chakra.th scope="row" whiteSpace="nowrap">
+              {actionWords(entry.action)}{' '}
+              <chakra.span fontWeight="normal">
+                <Subject entry={entry} />
+              </chakra.span>
+            </chakra.th>
+            <chakra.td minWidth="14rem">
+              <Changes entry={entry} />
+            </chakra.td>
+            <chakra.td minWidth="12rem" color="fg.muted">
+              {entry.reason}
+            </chakra.td>
+          </tr>
+        ))}
+      </tbody>
+    </RuledTable>
+  );
+}
