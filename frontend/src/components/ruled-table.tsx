@@ -1,7 +1,7 @@
 import { chakra } from '@chakra-ui/react';
 import type { ReactNode } from 'react';
 
-const Scroller = chakra('div', { base: { overflowX: 'auto', maxWidth: 'full' } });
+const Scroller = chakra('div', { base: { overflowX: 'auto', maxWidth: 'full', position: 'relative' } });
 
 const Table = chakra('table', {
   base: {

@@ -52,7 +52,7 @@ export function AuditFilters({ filter, onFilter }: AuditFiltersProps) {
   return (
     <Formik initialValues={filter} enableReinitialize validationSchema={schema} onSubmit={onFilter}>
       {({ values, setFieldValue }) => (
-        <Grid role="search">
+        <Grid role="search" aria-label="Narrow the trail">
           <Form noValidate>
             <FormField name="text" label="Words in it" />
             <SelectField

@@ -27,7 +27,7 @@ export function FamilyFilters({ filter, onChange }: FamilyFiltersProps) {
   const textId = useId();
   const manufacturers = useManufacturers();
   return (
-    <Row role="search">
+    <Row role="search" aria-label="Narrow the families">
       <FieldRow label="Code, name or manufacturer" controlId={textId} stacked>
         <TextInput
           id={textId}
