@@ -14,6 +14,7 @@ const items: readonly NavigationItem[] = [
   { to: '/find', label: 'Find', action: 'read', subject: 'Part', group: 'work' },
   { to: '/families', label: 'Families', action: 'read', subject: 'Family', group: 'work' },
   { to: '/policies', label: 'Policies', action: 'read', subject: 'Policy', group: 'work' },
+  { to: '/reviews', label: 'Reviews', action: 'read', subject: 'Review', group: 'work' },
   { to: '/people', label: 'People', action: 'read', subject: 'User', group: 'administration' },
   {
     to: '/permissions',
