@@ -128,7 +128,7 @@ it('a search equals assessing every part alone, for 5 duties', () => {
 
 it('searching again with a relaxation gives the total and its gains, by part and by company part number', () => {
   let tried = 0;
-  for (const [duty, policy] of duties.slice(0, 60)) {
+  for (const [duty, policy] of duties.slice(0, 30)) {
     for (const byCompanyNumber of [false, true]) {
       const plan = planOf(duty, policy, undefined, { relaxations: true, byCompanyNumber, limit: 10 });
       const before = searchCatalogue(index, plan, scratch);
@@ -150,7 +150,7 @@ it('searching again with a relaxation gives the total and its gains, by part and
       }
     }
   }
-  expect(tried).toBeGreaterThan(50);
+  expect(tried).toBeGreaterThan(20);
 }, 240_000);
 
 it('pages are stable: pages of 7 give the same order as one page', () => {
