@@ -30,7 +30,15 @@ import { StandingActions } from './standing/standing-actions';
 const typingPauseMilliseconds = 120;
 
 const Frame = chakra('div', {
-  base: { maxWidth: 'page', mx: 'auto', px: { base: 4, md: 6 }, py: 6, display: 'grid', gap: 8, minWidth: 0 },
+  base: {
+    maxWidth: 'page',
+    mx: 'auto',
+    px: { base: 4, md: 6 },
+    py: 6,
+    display: 'grid',
+    gridTemplateColumns: 'minmax(0, 1fr)',
+    gap: 8,
+  },
 });
 
 const Pair = chakra('div', {
@@ -74,6 +82,7 @@ function PartPage({ part }: { part: PartDetails }) {
         <Link to={`/find?${writeFind({ ...state, part: part.id }).toString()}`}>Back to the list</Link>
       </chakra.p>
       <PartHead part={part} />
+      <StandingActions part={part} />
       <HeldAgainstDuty part={part} state={state} change={change} />
       <RatingsSection part={part} />
       <Pair>
@@ -83,7 +92,6 @@ function PartPage({ part }: { part: PartDetails }) {
       <SourcesSection part={part} search={search} />
       <OffersSection part={part} />
       <AlternatesSection id={part.id} search={search} />
-      <StandingActions part={part} />
       <Pair>
         <HistorySection part={part} />
       </Pair>

@@ -78,15 +78,13 @@ export function AssessmentSection({ part, assessment, duty, policyName }: Assess
       </div>
       <div>
         {derating !== undefined && ratedDissipation !== undefined && !link && (
-          <Section title="Derating">
-            <DeratingChart
-              ratedDissipation={ratedDissipation}
-              curve={derating}
-              entry={entry}
-              policyName={policyName}
-              operating={operatingOf(duty, assessment, derating.axis)}
-            />
-          </Section>
+          <DeratingChart
+            ratedDissipation={ratedDissipation}
+            curve={derating}
+            entry={entry}
+            policyName={policyName}
+            operating={operatingOf(duty, assessment, derating.axis)}
+          />
         )}
         <Section title="Permitted here">
           <PermittedValues assessment={assessment} link={link} />

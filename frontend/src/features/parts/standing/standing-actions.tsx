@@ -4,7 +4,7 @@ import { Button } from '../../../components/button';
 import { Failed, Loading } from '../../../components/states';
 import type { PartDetails } from '../requests/get-part';
 import { type Transitions, useTransitions } from '../requests/get-transitions';
-import { Quiet, Section } from '../sections/section';
+import { Quiet } from '../sections/section';
 import { DemandList } from './demand-list';
 import { TransitionDialog } from './transition-dialog';
 import { type Offered, approvalDeed, supplyDeed } from './transition-words';
@@ -40,12 +40,14 @@ export function StandingActions({ part }: { part: PartDetails }) {
   if (transitions.isError)
     return <Failed error={transitions.error} onRetry={() => void transitions.refetch()} />;
   const all = offeredOf(transitions.data);
+  // Read again after a stale change, it may demand something else by now.
+  const current = all.find(
+    ({ door, transition }) => door === chosen?.door && transition.to === chosen.transition.to,
+  );
   const allowed = all.filter(({ transition }) => transition.allowed);
   return (
-    <Section title="What may become of it">
-      {allowed.length === 0 ? (
-        <Quiet>Nothing that your roles allow; below stands whose it is.</Quiet>
-      ) : (
+    <chakra.section aria-label="What may become of it">
+      {allowed.length > 0 && (
         <chakra.div display="flex" flexWrap="wrap" gap={2}>
           {allowed.map((offered) => (
             <Button key={offered.deed} onClick={() => setChosen(offered)}>
@@ -56,7 +58,9 @@ export function StandingActions({ part }: { part: PartDetails }) {
       )}
       <chakra.details mt={2} fontSize="sm">
         <chakra.summary cursor="pointer" py={1} color="fg.muted">
-          What each change demands, and whose it is
+          {allowed.length === 0
+            ? 'Your roles change nothing here: whose it is, and what it demands'
+            : 'What each change demands, and whose it is'}
         </chakra.summary>
         <Deeds>
           {all.map(({ deed, transition }) => (
@@ -76,11 +80,11 @@ export function StandingActions({ part }: { part: PartDetails }) {
       {chosen !== undefined && (
         <TransitionDialog
           part={part}
-          offered={chosen}
+          offered={current ?? chosen}
           version={transitions.data.version}
           onClose={() => setChosen(undefined)}
         />
       )}
-    </Section>
+    </chakra.section>
   );
 }

@@ -99,7 +99,10 @@ export function TransitionDialog({ part, offered, version, onClose }: Transition
           The part has been read again: it is {now.toLowerCase()} now. What you wrote is still here.
         </chakra.p>
       )}
-      <DemandList demands={offered.transition.demands} />
+      {/* What an entry below fulfils is asked there. */}
+      <DemandList
+        demands={offered.transition.demands.filter(({ field }) => !entries.some(([name]) => name === field))}
+      />
       {entries.map(([name, { label }]) => (
         <FormField
           key={name}

@@ -32,5 +32,7 @@ export function valueWords({ resistance, tolerance, tcr }: SearchPart): string {
     formatQuantity(resistance, 'resistance'),
     ...(tolerance !== undefined ? [formatQuantity(tolerance, 'tolerance')] : []),
     ...(tcr !== undefined ? [formatQuantity(tcr, 'temperature-coefficient')] : []),
-  ].join(' ');
+  ]
+    .map((figure) => figure.replaceAll(' ', '\u00a0'))
+    .join(' ');
 }
