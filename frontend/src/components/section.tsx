@@ -9,7 +9,7 @@ export interface SectionProps {
 }
 
 const Region = chakra('section', {
-  base: { borderTop: '1px solid', borderColor: 'border', pt: 4, mt: 7, _first: { mt: 0 } },
+  base: { borderTop: '1px solid', borderColor: 'border', pt: 4, mt: 7, '&:first-child': { mt: 0 } },
 });
 
 /** A part of a page under its own heading, set off by a hairline. */

@@ -19,7 +19,7 @@ function Line({ entry }: { entry: PolicyEntry }) {
       {entry.from === undefined ? 'its knee' : <Figure value={entry.from} quantity="temperature" />}, nothing
       at{' '}
       {entry.zero === undefined ? (
-        'where the share puts it'
+        'the temperature where the share puts it'
       ) : (
         <Figure value={entry.zero} quantity="temperature" />
       )}
