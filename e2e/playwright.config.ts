@@ -6,6 +6,8 @@ export default defineConfig({
   outputDir: 'test-results',
   globalSetup: './support/global-setup.ts',
   timeout: 60_000,
+  // Long enough for a busy machine, short enough to tell which step of a story hangs.
+  expect: { timeout: 10_000 },
   // The browser, the server and its search share two cores: a second worker only makes both slower.
   workers: 1,
   retries: 1,
@@ -16,6 +18,7 @@ export default defineConfig({
     headless: true,
     launchOptions: LAUNCH_OPTIONS,
     viewport: { width: 1440, height: 900 },
+    actionTimeout: 15_000,
     trace: 'on-first-retry',
   },
 });

@@ -3,7 +3,7 @@ import { type Page, expect } from '@playwright/test';
 
 const RULES = ['wcag2a', 'wcag2aa', 'wcag21a', 'wcag21aa', 'wcag22aa', 'best-practice'];
 
-/** Holds a page, as it stands, to the accessibility rules, naming each element that breaks one. */
+/** Holds a page, as it stands, to the accessibility rules, naming each element that breaks one; the test goes on. */
 export async function expectAccessible(page: Page): Promise<void> {
   const { violations } = await new AxeBuilder({ page }).withTags(RULES).analyze();
   const broken = violations.flatMap(({ id, help, nodes }) =>
@@ -11,5 +11,5 @@ export async function expectAccessible(page: Page): Promise<void> {
       ({ target, failureSummary }) => `${id} (${help}) at ${target.join(' ')}: ${failureSummary ?? ''}`,
     ),
   );
-  expect(broken, page.url()).toEqual([]);
+  expect.soft(broken, page.url()).toEqual([]);
 }

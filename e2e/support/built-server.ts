@@ -3,6 +3,7 @@ import { once } from 'node:events';
 import { existsSync, mkdtempSync, rmSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
+import { freePort } from './free-port';
 
 const MAIN = join(__dirname, '../../backend/dist/main.js');
 const PAGES = join(__dirname, '../../frontend/dist/index.html');
@@ -22,9 +23,17 @@ export class BuiltServer {
       if (!existsSync(file)) throw new Error(`${file} is not built: run npm run build first`);
     }
     const dataDirectory = mkdtempSync(join(tmpdir(), 'resistry-e2e-'));
+    // Named beforehand, so that links in mail lead to it as well.
+    const port = await freePort();
     const child = spawn(process.execPath, [MAIN], {
       // Nothing of the surroundings decides what is tested.
-      env: { PATH: process.env['PATH'], DATA_DIR: dataDirectory, SEED: 'demo', HOST: '127.0.0.1', PORT: '0' },
+      env: {
+        PATH: process.env['PATH'],
+        DATA_DIR: dataDirectory,
+        SEED: 'demo',
+        HOST: '127.0.0.1',
+        PORT: String(port),
+      },
       stdio: ['ignore', 'pipe', 'pipe'],
     });
     try {

@@ -1,0 +1,13 @@
+import { type AddressInfo, createServer } from 'node:net';
+
+/** A port of the loopback that nothing listens at in this moment. */
+export function freePort(): Promise<number> {
+  return new Promise((resolve, reject) => {
+    const server = createServer();
+    server.once('error', reject);
+    server.listen(0, '127.0.0.1', () => {
+      const { port } = server.address() as AddressInfo;
+      server.close(() => resolve(port));
+    });
+  });
+}
