@@ -157,6 +157,7 @@ describe('self-heating', () => {
     });
     expect(check(result, 'dissipation')).toMatchObject({ status: 'unmet', demand: null, margin: null });
     expect(check(result, 'value')).toMatchObject({ status: 'unmet', demand: null });
+    expect(result.budget.find((line) => line.contribution === 'temperature')?.amount).toBeNull();
   });
 
   it('takes R_th from the slope of the curve, (155 − 70) K / 0.25 W = 340 K/W, and 0 K/W as a value', () => {

@@ -39,9 +39,12 @@ function plain(
     : { contribution, amount, basis: `${words}, as rated`, missing: [] };
 }
 
+const noOperatingPoint = 'an operating point, for self-heating does not settle';
+
 /** What is missing for the temperature of the element. */
-function missingForElement(conditions: Conditions): string[] {
+function missingForElement(conditions: Conditions, state: OperatingState): string[] {
   const missing: string[] = [];
+  if (!state.settled) missing.push(noOperatingPoint);
   if (!conditions.axis.known) missing.push(conditions.axis.missing);
   if (conditions.load !== undefined && conditions.thermal === undefined) missing.push('thermalResistance');
   return missing;
@@ -75,6 +78,14 @@ function voltageLine(conditions: Conditions, state: OperatingState): BudgetLine 
   if (conditions.ratings.voltageCoefficient === undefined) {
     return plain('voltage', undefined, 'voltage coefficient', 'voltageCoefficient');
   }
+  if (!state.settled) {
+    return {
+      contribution: 'voltage',
+      amount: null,
+      basis: 'voltage coefficient: the voltage is not known',
+      missing: [noOperatingPoint],
+    };
+  }
   return {
     contribution: 'voltage',
     amount: conditions.voltageCoefficient * state.voltage,
@@ -86,7 +97,7 @@ function voltageLine(conditions: Conditions, state: OperatingState): BudgetLine 
 function driftLine(conditions: Conditions, state: OperatingState): BudgetLine {
   const { drift, hours, ratings } = conditions;
   if (drift === undefined) return plain('drift', undefined, 'load-life drift', 'drift');
-  const missing = missingForElement(conditions);
+  const missing = missingForElement(conditions, state);
   if (missing.length > 0) {
     return {
       contribution: 'drift',
