@@ -53,7 +53,7 @@ function missingForElement(conditions: Conditions, state: OperatingState): strin
 function temperatureLine(conditions: Conditions, state: OperatingState): BudgetLine {
   const missing = [
     ...(conditions.ratings.tcr === undefined ? ['tcr'] : []),
-    ...missingForElement(conditions),
+    ...missingForElement(conditions, state),
   ];
   if (missing.length > 0) {
     return {
