@@ -28,7 +28,9 @@ export function AccountMenu() {
     <chakra.div ref={rootRef} position="relative" flexShrink={0}>
       <chakra.button type="button" {...buttonProps} fontSize="sm" py={1} whiteSpace="nowrap">
         <chakra.span fontWeight="medium">{user.name}</chakra.span>{' '}
-        <chakra.span color="fg.muted">{user.roles.map((role) => roleWords[role]).join(', ')}</chakra.span>
+        <chakra.span color="fg.muted" display={{ base: 'none', md: 'inline' }}>
+          {user.roles.map((role) => roleWords[role]).join(', ')}
+        </chakra.span>
       </chakra.button>
       {open && (
         <FloatingPanel id={panelId}>
@@ -42,6 +44,9 @@ export function AccountMenu() {
             color="fg.muted"
           >
             {user.email}
+            <chakra.span display={{ base: 'block', md: 'none' }}>
+              {user.roles.map((role) => roleWords[role]).join(', ')}
+            </chakra.span>
           </chakra.div>
           <chakra.div css={{ '& > a, & > button': panelItem }}>
             <Link to="/account" onClick={close}>
