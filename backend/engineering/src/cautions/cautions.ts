@@ -63,12 +63,14 @@ const rules: readonly CautionRule[] = [
   function flammability({ ratings, allowedDissipation }, state) {
     const flameproof =
       ratings.features?.some((feature) => feature === 'flameproof' || feature === 'fusible') ?? false;
-    const watt = Math.max(state.dissipation, allowedDissipation.known ? allowedDissipation.value : 0);
+    const loaded = state.settled ? state.dissipation : Infinity;
+    const watt = Math.max(loaded, allowedDissipation.known ? allowedDissipation.value : 0);
     if (flameproof || watt < ignitionWatt || ratings.resistance === 0) return undefined;
+    const figure = Number.isFinite(watt) ? `at ${watt.toPrecision(3)} W` : 'beyond any operating point';
     return {
       kind: 'flammability',
       title: 'Overload can ignite.',
-      text: `The part is rated or loaded at ${watt.toPrecision(3)} W and claims neither a flameproof coating nor a fusible element: consider what an overload does to it and to the board beneath.`,
+      text: `The part is rated or loaded ${figure} and claims neither a flameproof coating nor a fusible element: consider what an overload does to it and to the board beneath.`,
     };
   },
   function surge({ requirement }) {
