@@ -2057,7 +2057,8 @@ export interface components {
             values: number[];
         };
         MarkingReadingDto: {
-            kind: string;
+            /** @enum {string} */
+            kind: "colour-bands" | "letter-code" | "three-character" | "four-character" | "two-digit-and-letter" | "link";
             /** @description Ω */
             resistance: number;
             /** @description Fraction */
@@ -2066,7 +2067,8 @@ export interface components {
             tcr?: number;
         };
         MarkingFormDto: {
-            kind: string;
+            /** @enum {string} */
+            kind: "colour-bands" | "letter-code" | "three-character" | "four-character" | "two-digit-and-letter" | "link";
             text?: string;
             bands?: string[];
         };
