@@ -15,7 +15,7 @@ export interface FigureProps {
 export function Figure({ value, quantity, significantDigits = 4, aligned = false }: FigureProps) {
   if (value === null || value === undefined) return <span className="not-stated">not stated</span>;
   const { figure, unit } = formatQuantityParts(value, quantity, { significantDigits });
-  const unitShown = unit !== '' && <span className="unit"> {unit}</span>;
+  const unitShown = unit !== '' && <span className="unit">{`\u00a0${unit}`}</span>;
   if (!aligned) {
     return (
       <span className="figure">

@@ -4,7 +4,7 @@ import type { ReactNode } from 'react';
 const Scroller = chakra('div', {
   base: {
     overflowX: 'auto',
-    '& table': { borderCollapse: 'collapse', width: 'full', minWidth: '36rem', fontSize: 'sm' },
+    '& table': { borderCollapse: 'collapse', width: 'full', minWidth: '44rem', fontSize: 'sm' },
     '& th': {
       textAlign: 'start',
       fontSize: '2xs',

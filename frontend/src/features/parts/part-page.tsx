@@ -57,6 +57,7 @@ export function Component() {
     return (
       <Frame>
         <title>Part · Resistry</title>
+        <chakra.h1 srOnly>Part</chakra.h1>
         <Failed error={part.error} onRetry={() => void part.refetch()} />
       </Frame>
     );
@@ -65,6 +66,7 @@ export function Component() {
     return (
       <Frame>
         <title>Part · Resistry</title>
+        <chakra.h1 srOnly>Part</chakra.h1>
         <Loading label="Reading the part" lines={14} />
       </Frame>
     );

@@ -83,3 +83,9 @@ export function writeFind(state: FindState): URLSearchParams {
   if (state.part !== undefined) address.set('part', String(state.part));
   return address;
 }
+
+/** Whether only some of the catalogue is looked at. */
+export const isNarrowed = ({ text, filters, flags }: FindState): boolean =>
+  text !== '' ||
+  filterNames.some((name) => filters[name].length > 0) ||
+  flagNames.some((name) => flags[name]);

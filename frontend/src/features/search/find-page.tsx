@@ -1,13 +1,13 @@
 import { chakra } from '@chakra-ui/react';
 import { Suspense, lazy, useCallback, useMemo, useRef, useState } from 'react';
 import { Button } from '../../components/button';
-import { Loading } from '../../components/states';
+import { Empty, Loading } from '../../components/states';
 import { useElementWidth } from '../../components/use-element-width';
 import { usePolicies } from '../policies/requests/list-policies';
 import { readDuty } from './duty/read-duty';
 import { FilterChips } from './filters/filter-chips';
 import { FilterPanel } from './filters/filter-panel';
-import { writeFind } from './find-address';
+import { isNarrowed, writeFind } from './find-address';
 import { Ledger } from './ledger/ledger';
 import type { ChangeDuty } from './panel/change-duty';
 import { DutyPanel } from './panel/duty-panel';
@@ -104,6 +104,7 @@ export function Component() {
         minWidth={0}
       >
         <div>
+          {search.answer === undefined && <chakra.h1 srOnly>Find</chakra.h1>}
           <Sentence
             duty={state.duty}
             policies={policies.data ?? []}
@@ -122,7 +123,13 @@ export function Component() {
           {search.error !== null && !search.waiting && (
             <SearchFailed error={search.error} onRetry={search.retry} />
           )}
-          {search.answer === undefined && search.error === null && (
+          {request === undefined && search.answer === undefined && (
+            <Empty title="Nothing is searched yet">
+              An entry cannot be read: it is marked, with what to do about it. Once it can be, the parts stand
+              here.
+            </Empty>
+          )}
+          {request !== undefined && search.answer === undefined && search.error === null && (
             <Loading label="Searching the catalogue" lines={12} />
           )}
           {search.answer !== undefined && (
@@ -151,7 +158,7 @@ export function Component() {
                   <NothingMeets
                     answer={search.answer}
                     duty={state.duty}
-                    narrowed={search.answered?.filters !== undefined}
+                    narrowed={isNarrowed(state)}
                     onChange={changeDuty}
                     onShowUnrated={() => change((before) => ({ ...before, show: 'met-and-unrated' }))}
                   />

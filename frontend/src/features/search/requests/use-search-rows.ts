@@ -1,5 +1,5 @@
 import { useQueries } from '@tanstack/react-query';
-import { useCallback, useMemo, useState } from 'react';
+import { useCallback, useEffect, useMemo, useRef, useState } from 'react';
 import { type SearchItem, pageSize, searchPage } from './search-parts';
 import type { SearchRequest } from './search-request';
 
@@ -25,10 +25,27 @@ export function useSearchRows(request: SearchRequest | undefined): SearchRows {
   const itemAt = (index: number): SearchItem | undefined =>
     answers[pageOf(index) - range.first]?.data?.items[index % pageSize];
 
-  const showRange = useCallback((first: number, last: number) => {
-    const next = { first: pageOf(first), last: pageOf(last) };
+  // While pages are on their way no others are asked for: each is a search of its own on the server, and whoever flies
+  // past a hundred of them wants the last.
+  const waiting = answers.some((answer) => answer.isFetching && answer.data === undefined);
+  const wanted = useRef(range);
+  const settle = useCallback(() => {
+    const next = wanted.current;
     setRange((before) => (before.first === next.first && before.last === next.last ? before : next));
   }, []);
+  const held = useRef(waiting);
+  useEffect(() => {
+    held.current = waiting;
+    if (!waiting) settle();
+  }, [waiting, settle]);
+
+  const showRange = useCallback(
+    (first: number, last: number) => {
+      wanted.current = { first: pageOf(first), last: pageOf(last) };
+      if (!held.current) settle();
+    },
+    [settle],
+  );
 
   return { itemAt, showRange };
 }

@@ -3,7 +3,7 @@ import { type DrawnBody } from '../../../components/drawn-part/drawn-body';
 import { drawnBodyOf } from '../../../components/drawn-part/body-of-part';
 import type { SearchPart } from '../search-part';
 
-const euro = new Intl.NumberFormat('en', { minimumFractionDigits: 3, maximumFractionDigits: 4 });
+const euro = new Intl.NumberFormat('en', { minimumFractionDigits: 4, maximumFractionDigits: 4 });
 
 /** € a piece, or what is said where no offer is in force. */
 export const priceWords = (price: number | undefined): string =>
