@@ -12,7 +12,7 @@ const TABLES = [
   'parts',
   'offers',
   'audit_entries',
-  'derating_policies',
+  "derating_policies WHERE origin = 'company'",
 ];
 
 describe('loading the demonstration', () => {
