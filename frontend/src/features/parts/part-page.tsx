@@ -27,7 +27,7 @@ import { OffersSection, SourcesSection } from './sections/purchasing-section';
 import { RatingsSection } from './sections/ratings-section';
 import { StandingActions } from './standing/standing-actions';
 
-const typingPauseMilliseconds = 120;
+const typingPauseMilliseconds = 80;
 
 const Frame = chakra('div', {
   base: {

@@ -26,7 +26,7 @@ import { useFindState } from './use-find-state';
 const PartSheet = lazy(() => import('./sheet/part-sheet'));
 
 /** Long enough to let a number be finished, short enough that rows seem to follow the typing. */
-const typingPauseMilliseconds = 120;
+const typingPauseMilliseconds = 80;
 /** Below this the table's columns no longer fit, and a row becomes one cell. */
 const narrowBelow = 620;
 

@@ -16,7 +16,7 @@ const Chips = chakra('ul', {
     flexWrap: 'wrap',
     gap: 1.5,
     alignItems: 'center',
-    my: 2,
+    py: 2,
     '& button[data-chip]': {
       border: '1px solid',
       borderColor: 'border.field',

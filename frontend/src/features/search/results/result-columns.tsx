@@ -31,7 +31,7 @@ const number: Column = {
   id: 'company-part-number',
   header: 'Part',
   plainHeader: 'Company part number',
-  width: '6.4rem',
+  width: '6.2rem',
   fixed: true,
   sortable: true,
   cell: ({ part }) => <NumberCell part={part} />,
@@ -108,7 +108,7 @@ const tolerance: Column = {
   id: 'tolerance',
   header: 'Tol.',
   plainHeader: 'Tolerance, fraction',
-  width: '3.2rem',
+  width: '3.5rem',
   align: 'end',
   sortable: true,
   cell: ({ part }) => (part.resistance === 0 ? '' : <Figure value={part.tolerance} quantity="tolerance" />),
@@ -130,7 +130,7 @@ const margin: Column = {
   id: 'margin',
   header: 'Tightest margin',
   plainHeader: 'Tightest margin, fraction',
-  width: '7.6rem',
+  width: '7.5rem',
   sortable: true,
   cell: (item) => <MarginCell {...item} />,
   hint: ({ overSpecification }) => overSpecification.join(', '),
@@ -215,17 +215,23 @@ const price: Column = {
 };
 
 /** How many approved sources a number has; unfolds to each with its own assessment. */
-export const sourcesColumn: Column = {
+const sourcesColumn: Column = {
   id: 'sources',
   header: 'Sources',
   plainHeader: 'Approved sources',
-  width: '5.2rem',
+  width: '4.9rem',
   fixed: true,
   unfolds: true,
   cell: ({ sources }) =>
     sources === undefined ? '' : sources.length === 1 ? '1 source' : `${sources.length} sources`,
   plain: ({ sources }) => sources?.length ?? null,
 };
+
+/** A number has no body of its own, only its sources have; how many those are stands in its place. */
+export const groupedColumns = (columns: readonly Column[]): Column[] => [
+  ...columns.filter((column) => column !== body),
+  sourcesColumn,
+];
 
 export const resultColumns: readonly Column[] = [
   body,

@@ -30,9 +30,10 @@ const noneUnfolded: Unfolded = new Map();
 export function ResultTable({ answered, rowCount, openPart, onOpen, ...table }: ResultTableProps) {
   const { itemAt, showRange } = useSearchRows(answered);
   const [openPlace, setOpenPlace] = useState<number>();
-  const [unfoldedOf, setUnfolded] = useState<{ answered?: SearchRequest; unfolded: Unfolded }>();
+  const [unfoldedOf, setUnfolded] = useState<{ question: string; unfolded: Unfolded }>();
+  const question = JSON.stringify(answered);
   // Places mean something only within the answer they were unfolded in.
-  const unfolded = unfoldedOf?.answered === answered ? (unfoldedOf?.unfolded ?? noneUnfolded) : noneUnfolded;
+  const unfolded = unfoldedOf?.question === question ? unfoldedOf.unfolded : noneUnfolded;
 
   const rowAt = (place: number): SearchItem | undefined => {
     const { item, source } = rowAtPlace(place, unfolded);
@@ -56,7 +57,7 @@ export function ResultTable({ answered, rowCount, openPart, onOpen, ...table }: 
     if (source !== undefined || sources === undefined) return;
     const next = new Map(unfolded);
     if (!next.delete(item)) next.set(item, sources);
-    setUnfolded({ answered, unfolded: next });
+    setUnfolded({ question, unfolded: next });
   };
   const tree: RowTree = {
     levelAt: (place) => (rowAtPlace(place, unfolded).source === undefined ? 1 : 2),

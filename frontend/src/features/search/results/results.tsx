@@ -6,7 +6,7 @@ import type { SearchRequest, Show } from '../requests/search-request';
 import type { Search } from '../requests/use-search';
 import { CountLine } from './count-line';
 import { CopyLink } from './copy-link';
-import { narrowColumns, resultColumns, sourcesColumn } from './result-columns';
+import { groupedColumns, narrowColumns, resultColumns } from './result-columns';
 import { ResultTable } from './result-table';
 import { TableActions } from './table-actions';
 
@@ -43,7 +43,7 @@ export function Results(props: ResultsProps) {
   // What was asked for when it was answered, not what the switch says by now.
   const rowCount = search.answered?.show === 'met-and-unrated' ? total + unrated : total;
   const shown = narrow ? narrowColumns : table.visible;
-  const columns = search.answered?.group === 'company' ? [...shown, sourcesColumn] : shown;
+  const columns = search.answered?.group === 'company' ? groupedColumns(shown) : shown;
   return (
     <>
       <CountLine
