@@ -1,4 +1,4 @@
-import { readFileSync } from 'node:fs';
+import { readdirSync, readFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { buildDocument, documentText } from '../src/openapi/build-document';
 
@@ -19,4 +19,14 @@ describe('the description of the API', () => {
     expect(names.filter((name) => !/^[a-z][A-Za-z]+$/.test(name ?? ''))).toEqual([]);
     expect(new Set(names).size).toBe(names.length);
   });
+});
+
+it('no two classes of the wire share a name, of which the description would keep only one', () => {
+  const source = join(__dirname, '..', 'src');
+  const names = readdirSync(source, { recursive: true, encoding: 'utf8' })
+    .filter((file) => file.endsWith('.dto.ts'))
+    .flatMap((file) => [...readFileSync(join(source, file), 'utf8').matchAll(/^(?:export )?class (\w+)/gm)])
+    .map(([, name]) => name ?? '');
+  expect(names.length).toBeGreaterThan(50);
+  expect(names.filter((name, place) => names.indexOf(name) !== place)).toEqual([]);
 });

@@ -1,10 +1,10 @@
 import type { Assessment } from '@resistry/engineering/assessment/assess';
 import { generalCaution } from '@resistry/engineering/cautions/cautions';
 import type { AssessmentDto, CheckResultDto, PolicyUsed } from './dto/assessment.dto';
-import type { CitationDto } from './dto/basis.dto';
+import type { BasisCitationDto } from './dto/basis.dto';
 
 /** Finds the place in a datasheet where a field of the ratings is cited. */
-export type CitationOf = (field: string) => CitationDto | undefined;
+export type CitationOf = (field: string) => BasisCitationDto | undefined;
 
 /** An assessment as the API gives it: plain numbers, citations beside the inputs that have one. */
 export function presentAssessment(

@@ -21,7 +21,7 @@ export interface StandingRows {
 /** Approvals whose part is looked at again when it leaves active supply. */
 const inUse: readonly Approval[] = ['approved', 'preferred', 'restricted'];
 
-/** @param histories one entry a part that has any history; each in the order of time */
+/** @param histories one entry a part with a history; each in the order of time */
 export function standingRows(
   histories: Iterable<{ readonly approval: readonly ApprovalStep[]; readonly supply: readonly SupplyStep[] }>,
 ): StandingRows {

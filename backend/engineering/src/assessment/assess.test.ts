@@ -184,6 +184,11 @@ describe('dissipation', () => {
     expect(low).toBeCloseTo(4700 * (1 - 0.01 - 100e-6 * (50 + 340 * (576 / low))), 6);
   });
 
+  it('says what the interval of the resistance lacks, so that a worst case of less does not look like the whole', () => {
+    const notes = check(assessed(without(thickFilmChip, 'drift'), gentleDuty), 'dissipation')?.basis.notes;
+    expect(notes?.join()).toContain('voltage, soldering, humidity, drift');
+  });
+
   it('is unrated where the axis temperature is missing, never replaced by another', () => {
     const terminal: Ratings = {
       ...thickFilmChip,

@@ -1,3 +1,4 @@
+import { budgetOf } from '../budget/budget';
 import { lineOf } from '../derating/policy-line';
 import { hasPulses, type Conditions } from '../operating/conditions';
 import type { OperatingState } from '../operating/settle';
@@ -54,10 +55,21 @@ export const dissipationCheck: CheckDefinition = {
         conditions.entry === undefined
           ? 'IEC 60115-1, derating curve of the manufacturer'
           : 'IEC 60115-1; the derating policy in force',
-      notes: state.settled ? [] : ['Self-heating does not settle: there is no operating point.'],
+      notes: intervalNotes(conditions, state),
     };
   },
 };
+
+/** What the interval of the resistance over life lacks: a load is then worst over less than the part can take. */
+export function intervalNotes(conditions: Conditions, state: OperatingState): string[] {
+  if (!state.settled) return ['Self-heating does not settle: there is no operating point.'];
+  const missing = budgetOf(conditions, state).filter(({ amount }) => amount === null);
+  if (missing.length === 0) return [];
+  const names = missing.map(({ contribution }) => contribution).join(', ');
+  return [
+    `The interval of the resistance over life is without what the datasheet or the duty does not state: ${names}.`,
+  ];
+}
 
 /** Which bound of the load decides, in symbols. */
 function demandFormula(conditions: Conditions, state: OperatingState): string {

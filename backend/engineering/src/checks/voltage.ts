@@ -1,5 +1,6 @@
 import { knownInputs } from './basis';
 import type { CheckDefinition, Finding } from './check';
+import { intervalNotes } from './dissipation';
 import { beyondBounds, compared, holds, unrated } from './finding';
 
 /** Critical resistance, Ω: where the rated voltage √(P·R) reaches the limiting element voltage (IEC 60115-1). */
@@ -96,7 +97,7 @@ export const voltageCheck: CheckDefinition = {
         },
       ),
       source: 'IEC 60115-1, rated voltage and limiting element voltage',
-      notes: [],
+      notes: intervalNotes(conditions, state),
     };
   },
 };

@@ -2,7 +2,7 @@ import { ApiExtraModels, ApiProperty, ApiPropertyOptional } from '@nestjs/swagge
 import type { BasisInput } from '@resistry/engineering/checks/basis';
 
 /** Where a number stands in a datasheet. */
-export class CitationDto {
+export class BasisCitationDto {
   @ApiProperty()
   datasheetId: number;
 
@@ -36,8 +36,8 @@ export class BasisInputDto {
   @ApiPropertyOptional({ description: 'Field of the ratings, the duty or the policy' })
   field?: string;
 
-  @ApiPropertyOptional({ type: CitationDto })
-  citation?: CitationDto;
+  @ApiPropertyOptional({ type: BasisCitationDto })
+  citation?: BasisCitationDto;
 }
 
 /** Why a number is what it is. */

@@ -2239,6 +2239,13 @@ export interface components {
             ratings: components["schemas"]["RatingsDto"];
             duty: components["schemas"]["DutyDto"];
         };
+        BasisCitationDto: {
+            datasheetId: number;
+            /** @description Document number and revision */
+            datasheet: string;
+            page: number;
+            note?: string;
+        };
         BasisInputDto: {
             name: string;
             symbol?: string;
@@ -2248,7 +2255,7 @@ export interface components {
             from: "duty" | "ratings" | "policy" | "derived" | "catalogue";
             /** @description Field of the ratings, the duty or the policy */
             field?: string;
-            citation?: components["schemas"]["CitationDto"];
+            citation?: components["schemas"]["BasisCitationDto"];
         };
         BasisDto: {
             words: string;
