@@ -7,6 +7,8 @@ interface Alternate {
   sameCompanyPartNumber: boolean;
   otherManufacturer: boolean;
   sound: boolean;
+  judgement: string;
+  shortfalls: { field: string; sense: string }[];
   differences: { field: string; sense: string }[];
 }
 
@@ -62,16 +64,55 @@ describe('alternates of a part', () => {
     await catalogue.offer(approved, { price: 0.02 });
     await catalogue.rebuild();
     const items = await alternatesOf(own);
-    expect(numbersOf(items)).toEqual(['WREN-1', 'TEAL-1', 'TEAL-ENDED', 'TEAL-DRAFT', 'WREN-TIGHT']);
-    expect(items.map(({ sound }) => sound)).toEqual([false, true, false, false, true]);
+    const equal = items.filter(({ judgement }) => judgement === 'equal');
+    expect(numbersOf(equal)).toEqual(['WREN-1', 'TEAL-1', 'TEAL-ENDED', 'TEAL-DRAFT', 'WREN-TIGHT']);
+    expect(equal.map(({ sound }) => sound)).toEqual([false, true, false, false, true]);
     expect(items[0]).toMatchObject({
       sameCompanyPartNumber: true,
       otherManufacturer: false,
       differences: [],
     });
-    expect(items.at(-1)?.differences).toEqual([
+    const rest = items.slice(equal.length);
+    expect(numbersOf(rest)).toEqual(['TEAL-UNSAID']);
+    expect(rest[0]).toMatchObject({
+      judgement: 'undecided',
+      shortfalls: [{ field: 'tcr', sense: 'unknown', own: '100 ppm/K' }],
+    });
+    expect(equal.at(-1)?.differences).toEqual([
       { field: 'tolerance', sense: 'better', own: '±1 %', alternate: '±0.1 %' },
     ]);
+  });
+
+  it('hold every source under the same company part number, whatever it lacks', async () => {
+    const own = await part('SKUA', 'SKUA-SRC', { resistance: 470 });
+    const lesser = await part('KITE', 'KITE-SRC', { resistance: 470, approval: 'approved' });
+    const unsaid = await part('WREN', 'WREN-SRC', { resistance: 470, tcr: null });
+    const bigger = await part('LARK', 'LARK-SRC', { resistance: 470, approval: 'approved' });
+    await part('KITE', 'KITE-STRANGER', { resistance: 470, approval: 'approved' });
+    await catalogue.companyPartNumber('BW-R-2', [own, lesser, unsaid, bigger]);
+    await catalogue.rebuild();
+    const items = await alternatesOf(own);
+    expect(items.map((item) => [item.part.manufacturerPartNumber, item.judgement, item.shortfalls])).toEqual([
+      [
+        'KITE-SRC',
+        'lesser',
+        [{ field: 'limitingElementVoltage', sense: 'worse', own: '75 V', alternate: '50 V' }],
+      ],
+      [
+        'LARK-SRC',
+        'lesser',
+        [
+          {
+            field: 'landPattern',
+            sense: 'different',
+            own: 'rect-chip 1608 nominal',
+            alternate: 'rect-chip 2012 nominal',
+          },
+        ],
+      ],
+      ['WREN-SRC', 'undecided', [{ field: 'tcr', sense: 'unknown', own: '100 ppm/K' }]],
+    ]);
+    expect(items.every(({ sameCompanyPartNumber }) => sameCompanyPartNumber)).toBe(true);
   });
 
   it('are compared by body where the datasheet names no land pattern', async () => {

@@ -1,14 +1,18 @@
 import type { Status } from '@resistry/engineering/checks/check';
 import type { Approval, SupplyStatus } from '@resistry/engineering/ratings/technology';
 import type { ReactNode } from 'react';
+import type { Schema } from '../api/schema';
 import { statusWords } from '../wording/check-words';
 import { approvalWords, supplyWords } from '../wording/standing-words';
 import { approvalShapes, supplyShapes, verdictShapes } from './status-shapes';
 
+type Judgement = Schema<'AlternateDto'>['judgement'];
+
 export type StatusWordProps =
   | { kind: 'approval'; status: Approval }
   | { kind: 'supply'; status: SupplyStatus }
-  | { kind: 'verdict'; status: Status };
+  | { kind: 'verdict'; status: Status }
+  | { kind: 'judgement'; status: Judgement };
 
 /** What a colour says here; see row-styles. */
 type Tone = 'preferred' | 'met' | 'unmet' | 'unrated' | 'caution' | 'quiet';
@@ -36,6 +40,14 @@ const supplyTones: Record<SupplyStatus, Tone> = {
   discontinued: 'unmet',
 };
 
+/** An alternate that is equal is shown like a check that is met; one that nobody can judge, like one that is unrated. */
+const verdictOfJudgement: Record<Judgement, Status> = { equal: 'met', lesser: 'unmet', undecided: 'unrated' };
+const judgementWords: Record<Judgement, string> = {
+  equal: 'Equal',
+  lesser: 'Not equal',
+  undecided: 'Undecided',
+};
+
 function appearance(props: StatusWordProps): Appearance {
   switch (props.kind) {
     case 'approval':
@@ -59,6 +71,15 @@ function appearance(props: StatusWordProps): Appearance {
         tone: props.status,
         strong: props.status === 'unmet',
       };
+    case 'judgement': {
+      const verdict = verdictOfJudgement[props.status];
+      return {
+        shape: verdictShapes[verdict],
+        word: judgementWords[props.status],
+        tone: verdict,
+        strong: false,
+      };
+    }
   }
 }
 

@@ -27,6 +27,7 @@ const words: Record<string, string> = {
   'body.width': 'Body width',
   'body.height': 'Body height',
   bodyStyle: 'Body',
+  size: 'Size',
   mounting: 'Mounting',
   features: 'Features',
   certificates: 'Certificates',

@@ -1,10 +1,14 @@
 import { ApiProperty, ApiPropertyOptional } from '@nestjs/swagger';
 import { PartSummaryDto } from '../summary/part-summary.dto';
 import { type Difference, type Sense, senses } from './differences';
+import { type Judgement, judgements, type Shortfall, shortfallSenses } from './shortfall';
 
 export class DifferenceDto implements Difference {
   @ApiProperty({ description: 'Field of the ratings' })
   field: string;
+
+  @ApiPropertyOptional({ description: 'Operating mode of the part that it is about, where it has several' })
+  mode?: string;
 
   @ApiProperty({ enum: senses, description: 'unknown: one of the two does not state it' })
   sense: Sense;
@@ -16,7 +20,13 @@ export class DifferenceDto implements Difference {
   alternate?: string;
 }
 
-/** A part of equal form, fit and function. */
+/** In what an alternate is less than the part, or in what that cannot be said. */
+export class ShortfallDto extends DifferenceDto implements Shortfall {
+  @ApiProperty({ enum: shortfallSenses, description: 'unknown: one of the two does not state it' })
+  declare sense: Shortfall['sense'];
+}
+
+/** A part that may replace another. */
 export class AlternateDto {
   @ApiProperty({ type: PartSummaryDto })
   part: PartSummaryDto;
@@ -35,6 +45,16 @@ export class AlternateDto {
   })
   mode?: string;
 
+  @ApiProperty({
+    enum: judgements,
+    description:
+      'Of equal form, fit and function; lesser where a shortfall is known; undecided where a rating that counts is not stated',
+  })
+  judgement: Judgement;
+
+  @ApiProperty({ type: [ShortfallDto], description: 'What keeps it from being equal; none of an equal' })
+  shortfalls: ShortfallDto[];
+
   @ApiProperty({ type: [DifferenceDto] })
   differences: DifferenceDto[];
 }
@@ -45,7 +65,8 @@ export class AlternatesDto {
 
   @ApiProperty({
     type: [AlternateDto],
-    description: 'At most 100: those under the same company part number first, then other manufacturers’',
+    description:
+      'At most 100: those under the same company part number first, equal or not; then the equal, then the undecided',
   })
   items: AlternateDto[];
 }

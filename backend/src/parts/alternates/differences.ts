@@ -1,6 +1,6 @@
 import { formatQuantity } from '@resistry/engineering/notation/format-quantity';
-import type { Quantity } from '@resistry/engineering/notation/quantity';
 import type { DeratingCurve, Ratings } from '@resistry/engineering/ratings/ratings';
+import { type Figure, figures } from './compared-figures';
 
 export const senses = ['better', 'worse', 'different', 'unknown'] as const;
 /** `unknown`: one of the two does not state it. */
@@ -9,6 +9,8 @@ export type Sense = (typeof senses)[number];
 /** In what an alternate differs from the part; texts with units, absent where it is not stated. */
 export interface Difference {
   field: string;
+  /** Operating mode of the part that it is about, where only one of several is. */
+  mode?: string;
   sense: Sense;
   own?: string;
   alternate?: string;
@@ -19,64 +21,6 @@ export interface Form {
   bodyStyle: string;
   termination?: string;
 }
-
-interface Figure {
-  field: string;
-  quantity: Quantity;
-  /** Which of two is the better one; neither for what is only different. */
-  better?: 'higher' | 'lower';
-  of: (ratings: Ratings) => number | undefined;
-}
-
-const figures: readonly Figure[] = [
-  { field: 'tolerance', quantity: 'tolerance', better: 'lower', of: (r) => r.tolerance },
-  { field: 'tcr', quantity: 'temperature-coefficient', better: 'lower', of: (r) => r.tcr },
-  { field: 'referenceTemperature', quantity: 'temperature', of: (r) => r.referenceTemperature },
-  { field: 'ratedDissipation', quantity: 'power', better: 'higher', of: (r) => r.ratedDissipation },
-  {
-    field: 'limitingElementVoltage',
-    quantity: 'voltage',
-    better: 'higher',
-    of: (r) => r.limitingElementVoltage,
-  },
-  { field: 'overloadVoltage', quantity: 'voltage', better: 'higher', of: (r) => r.overloadVoltage },
-  { field: 'insulationVoltage', quantity: 'voltage', better: 'higher', of: (r) => r.insulationVoltage },
-  { field: 'category.min', quantity: 'temperature', better: 'lower', of: (r) => r.category?.min },
-  { field: 'category.max', quantity: 'temperature', better: 'higher', of: (r) => r.category?.max },
-  {
-    field: 'maxElementTemperature',
-    quantity: 'temperature',
-    better: 'higher',
-    of: (r) => r.maxElementTemperature,
-  },
-  {
-    field: 'thermalResistance',
-    quantity: 'thermal-resistance',
-    better: 'lower',
-    of: (r) => r.thermalResistance,
-  },
-  {
-    field: 'voltageCoefficient',
-    quantity: 'voltage-coefficient',
-    better: 'lower',
-    of: (r) => r.voltageCoefficient,
-  },
-  { field: 'noiseIndex', quantity: 'noise-index', better: 'lower', of: (r) => r.noiseIndex },
-  { field: 'inductance', quantity: 'inductance', better: 'lower', of: (r) => r.inductance },
-  { field: 'capacitance', quantity: 'capacitance', better: 'lower', of: (r) => r.capacitance },
-  { field: 'solderShift', quantity: 'tolerance', better: 'lower', of: (r) => r.solderShift },
-  { field: 'humidityShift', quantity: 'tolerance', better: 'lower', of: (r) => r.humidityShift },
-  { field: 'body.length', quantity: 'length', of: (r) => r.body?.length },
-  { field: 'body.width', quantity: 'length', of: (r) => r.body?.width },
-  { field: 'body.height', quantity: 'length', of: (r) => r.body?.height },
-  { field: 'link.ratedCurrent', quantity: 'current', better: 'higher', of: (r) => r.link?.ratedCurrent },
-  {
-    field: 'link.residualResistance',
-    quantity: 'resistance',
-    better: 'lower',
-    of: (r) => r.link?.residualResistance,
-  },
-];
 
 /** Every difference between a part and an alternate, rating by rating. */
 export function differencesBetween(

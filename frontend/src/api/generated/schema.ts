@@ -1725,9 +1725,26 @@ export interface components {
             /** @description Another manufacturer’s approved and active part stands under the same company part number */
             secondSource: boolean;
         };
+        ShortfallDto: {
+            /** @description Field of the ratings */
+            field: string;
+            /** @description Operating mode of the part that it is about, where it has several */
+            mode?: string;
+            /**
+             * @description unknown: one of the two does not state it
+             * @enum {string}
+             */
+            sense: "worse" | "different" | "unknown";
+            /** @description Of the part, with its unit; absent where it is not stated */
+            own?: string;
+            /** @description Of the alternate, with its unit; absent where it is not stated */
+            alternate?: string;
+        };
         DifferenceDto: {
             /** @description Field of the ratings */
             field: string;
+            /** @description Operating mode of the part that it is about, where it has several */
+            mode?: string;
             /**
              * @description unknown: one of the two does not state it
              * @enum {string}
@@ -1747,12 +1764,19 @@ export interface components {
             sound: boolean;
             /** @description Operating mode of the alternate in which it is compared, where it has several */
             mode?: string;
+            /**
+             * @description Of equal form, fit and function; lesser where a shortfall is known; undecided where a rating that counts is not stated
+             * @enum {string}
+             */
+            judgement: "equal" | "undecided" | "lesser";
+            /** @description What keeps it from being equal; none of an equal */
+            shortfalls: components["schemas"]["ShortfallDto"][];
             differences: components["schemas"]["DifferenceDto"][];
         };
         AlternatesDto: {
             /** @description Number of all that there are */
             total: number;
-            /** @description At most 100: those under the same company part number first, then other manufacturers’ */
+            /** @description At most 100: those under the same company part number first, equal or not; then the equal, then the undecided */
             items: components["schemas"]["AlternateDto"][];
         };
         ForbiddenByDto: {

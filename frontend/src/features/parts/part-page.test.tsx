@@ -68,6 +68,17 @@ beforeEach(() => {
           sameCompanyPartNumber: false,
           otherManufacturer: true,
           sound: true,
+          judgement: 'lesser',
+          shortfalls: [
+            {
+              field: 'ratedDissipation',
+              mode: 'power',
+              sense: 'worse',
+              own: '400 mW',
+              alternate: '250 mW',
+            },
+            { field: 'limitingElementVoltage', sense: 'unknown', own: '200 V' },
+          ],
           differences: [{ field: 'tcr', sense: 'worse', own: '100 ppm/K', alternate: '200 ppm/K' }],
         };
         return { status: 200, data: { total: 1, items: [alternate] } };
@@ -115,9 +126,11 @@ describe('the page of a part', () => {
     expect(screen.getAllByText('P = U²/R')[0]).toBeInTheDocument();
   });
 
-  it('names the differences of an alternate, and offers with their prices', async () => {
+  it('judges an alternate, names what it lacks and how it differs, and offers with their prices', async () => {
     renderApplication(address);
     const alternates = await table('Alternates');
+    expect(alternates).toHaveTextContent('Not equalrated dissipation 400 mW → 250 mW in the mode “power”');
+    expect(alternates).toHaveTextContent('Cannot be said for limiting element voltage 200 V → not stated');
     expect(alternates).toHaveTextContent('Worse: tcr 100 ppm/K → 200 ppm/K');
     expect(within(alternates).getByRole('link', { name: 'LKP1206-4K7' })).toHaveAttribute(
       'href',

@@ -6,7 +6,6 @@ import { PlainTable } from '../../../components/plain-table';
 import { Failed, Loading } from '../../../components/states';
 import { StatusWord } from '../../../components/status-word';
 import { ratingWords } from '../../../wording/rating-words';
-import { leadingNumber } from '../../search/search-part';
 import { type Alternate, useAlternates } from '../requests/get-alternates';
 import { Quiet, Section } from './section';
 
@@ -21,8 +20,25 @@ const senses = [
   { sense: 'better', words: 'Better' },
 ] as const;
 
-const differenceWords = ({ field, own, alternate }: Difference): string =>
-  `${ratingWords(field).toLowerCase()} ${own ?? 'not stated'} → ${alternate ?? 'not stated'}`;
+const differenceWords = ({ field, mode, own, alternate }: Difference): string =>
+  `${ratingWords(field).toLowerCase()} ${own ?? 'not stated'} → ${alternate ?? 'not stated'}${
+    mode === undefined ? '' : ` in the mode “${mode}”`
+  }`;
+
+const Line = chakra('p', { base: { fontSize: 'xs', lineHeight: 1.45 } });
+
+/** Whether it is an equal, and if not or if that cannot be said, by which ratings. */
+function Judged({ alternate: { judgement, shortfalls } }: { alternate: Alternate }) {
+  const known = shortfalls.filter(({ sense }) => sense !== 'unknown');
+  const unknown = shortfalls.filter(({ sense }) => sense === 'unknown');
+  return (
+    <>
+      <StatusWord kind="judgement" status={judgement} />
+      {known.length > 0 && <Line>{known.map(differenceWords).join('; ')}</Line>}
+      {unknown.length > 0 && <Line>Cannot be said for {unknown.map(differenceWords).join('; ')}</Line>}
+    </>
+  );
+}
 
 function Differences({ alternate }: { alternate: Alternate }) {
   if (alternate.differences.length === 0) return <>none</>;
@@ -30,17 +46,17 @@ function Differences({ alternate }: { alternate: Alternate }) {
     const found = alternate.differences.filter((difference) => difference.sense === sense);
     if (found.length === 0) return null;
     return (
-      <chakra.p key={sense} fontSize="xs" lineHeight={1.45}>
+      <Line key={sense}>
         <chakra.b color={sense === 'worse' ? 'unmet' : undefined} fontWeight="semibold">
           {words}:
         </chakra.b>{' '}
         {found.map(differenceWords).join('; ')}
-      </chakra.p>
+      </Line>
     );
   });
 }
 
-/** Parts of equal form, fit and function, with every difference named. */
+/** What may replace the part: its other sources, and parts of equal form, fit and function; every difference is named. */
 export function AlternatesSection({ id, search }: { id: number; search: string }) {
   const alternates = useAlternates(id);
   const [all, setAll] = useState(false);
@@ -48,7 +64,7 @@ export function AlternatesSection({ id, search }: { id: number; search: string }
   return (
     <Section
       title="Alternates"
-      note="Of equal form, fit and function; every difference is named, ours first."
+      note="The other sources under its company part number, equal or not; then parts of equal form, fit and function, and those of which a rating that counts is not stated. Every difference is named, ours first."
     >
       {alternates.isPending && <Loading label="Looking for alternates" lines={3} />}
       {alternates.isError && <Failed error={alternates.error} onRetry={() => void alternates.refetch()} />}
@@ -56,17 +72,29 @@ export function AlternatesSection({ id, search }: { id: number; search: string }
       {items.length > 0 && (
         <PlainTable
           label="Alternates"
-          headers={[{ words: 'Part' }, { words: 'Approval' }, { words: 'Supply' }, { words: 'Differences' }]}
+          headers={[
+            { words: 'Part' },
+            { words: 'Form, fit and function' },
+            { words: 'Approval' },
+            { words: 'Supply' },
+            { words: 'Differences' },
+          ]}
         >
           {(all ? items : items.slice(0, shownAtFirst)).map((alternate) => (
             <tr key={alternate.part.id}>
               <td>
-                <Link to={`/parts/${alternate.part.id}${search}`}>{leadingNumber(alternate.part)}</Link>{' '}
+                <Link to={`/parts/${alternate.part.id}${search}`}>
+                  {alternate.part.manufacturerPartNumber}
+                </Link>{' '}
                 <small>
                   {alternate.part.manufacturer.name} {alternate.part.family.code}
                   {alternate.mode !== undefined && `, mode “${alternate.mode}”`}
-                  {alternate.sameCompanyPartNumber && ', same company number'}
+                  {alternate.part.companyPartNumber !== undefined &&
+                    `, ${alternate.sameCompanyPartNumber ? 'also ' : ''}${alternate.part.companyPartNumber.number}`}
                 </small>
+              </td>
+              <td>
+                <Judged alternate={alternate} />
               </td>
               <td>
                 <StatusWord kind="approval" status={alternate.part.approval} />
