@@ -157,7 +157,7 @@ describe('changing the approval of a part', () => {
 
   it.each([
     [{}, ['/reason', '/to', '/version']],
-    [{ to: 'draft', reason: 'r', version: 1 }, ['/to']],
+    [{ to: 'drafted', reason: 'r', version: 1 }, ['/to']],
     [{ to: 'approved', reason: ' ', version: 1 }, ['/reason']],
     [{ to: 'approved', reason: 'r'.repeat(1001), version: 1 }, ['/reason']],
     [{ to: 'approved', reason: 'r', version: '1' }, ['/version']],
@@ -215,6 +215,33 @@ describe('changing the approval of a part', () => {
       expect(letter?.subject).toBe('SKUA0603FS is now approved; it was in-review');
     }
     expect((await engineer.get('/api/reviews').expect(200)).body).toEqual({ total: 0, items: [] });
+  });
+
+  it('sends a part back to draft, which closes its review and tells who submitted it', async () => {
+    const submitter = await application.people.signIn('librarian');
+    const id = await catalogue.part({ family, number: 'SKUA0603FB', enteredBy: submitter.person.id });
+    await catalogue.rebuild();
+    const submit = (version: number) =>
+      submitter.post(`/api/parts/${id}/approval`, { to: 'in-review', reason: 'Read twice', version });
+    await submit(1).expect(200);
+    const answer = await engineer
+      .post(`/api/parts/${id}/approval`, { to: 'draft', reason: 'Page 3 says 50 V', version: 2 })
+      .expect(200);
+    expect(answer.body).toMatchObject({ approval: 'draft', openReviews: [] });
+    expect(await rowsOf(application.nest, 'reviews', id)).toEqual([
+      expect.objectContaining({ state: 'closed', outcome: 'draft' }),
+    ]);
+    const audit = await administrator.get(`/api/audit?subjectType=Part&subjectId=${id}`).expect(200);
+    expect((audit.body as { items: object[] }).items[0]).toMatchObject({
+      action: 'return',
+      before: { approval: 'in-review' },
+      after: { approval: 'draft' },
+      reason: 'Page 3 says 50 V',
+    });
+    await application.delivered();
+    const [letter] = await lettersTo(administrator, submitter.person.email);
+    expect(letter?.subject).toBe('SKUA0603FB is now draft; it was in-review');
+    await submit(3).expect(200);
   });
 
   it('gives the other source its second source, and tells of both before it answers', async () => {

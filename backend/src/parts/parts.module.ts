@@ -10,6 +10,7 @@ import { PriceRefresh } from './price-refresh';
 import { StandingChanges } from './standing-changes';
 import { ApprovalChanges } from './standing/approval-changes';
 import { PartReviews } from './standing/part-reviews';
+import { SecondSourceWatch } from './standing/second-source-watch';
 import { StandingController } from './standing/standing.controller';
 import { StandingDoor } from './standing/standing-door';
 import { StandingLetters } from './standing/standing-letters';
@@ -30,6 +31,7 @@ import { PartReadingModule } from './summary/part-reading.module';
     StandingChanges,
     ApprovalChanges,
     PartReviews,
+    SecondSourceWatch,
     StandingDoor,
     StandingLetters,
     StandingTransitions,

@@ -45,6 +45,13 @@ export const rules: readonly PermissionRule[] = [
     sentence: 'A librarian changes a family revision while it is a draft; a published one never changes.',
   },
   {
+    roles: ['librarian', 'component-engineer'],
+    actions: ['return'],
+    subjects: ['Part'],
+    sentence:
+      'A component engineer sends a part under review back to draft, and a librarian takes a submission back.',
+  },
+  {
     roles: ['component-engineer'],
     actions: ['approve', 'restrict', 'withdraw'],
     subjects: ['Part'],
@@ -64,6 +71,14 @@ export const rules: readonly PermissionRule[] = [
     actions: ['create', 'update'],
     subjects: ['CompanyPartNumber', 'Policy'],
     sentence: 'A component engineer keeps the company part numbers and the derating policy.',
+  },
+  {
+    roles: ['component-engineer'],
+    actions: ['publish'],
+    subjects: ['Family', 'Policy'],
+    conditions: { ...ENTERED_BY_SOMEBODY_ELSE, state: { $eq: 'draft' } },
+    sentence:
+      'A component engineer publishes drafts of family revisions and of the derating policy, but none that he or she entered.',
   },
   {
     roles: ['component-engineer', 'designer', 'purchasing'],

@@ -12,7 +12,7 @@ const ENTERED = `SELECT entered_at AS at, entered_by AS actor, 'create' AS actio
   SELECT r.entered_at, r.entered_by, 'update', 'Family', r.family_id, NULL,
     json_object('revision', r.number, 'state', 'draft'), r.description FROM family_revisions AS r
   UNION ALL
-  SELECT r.published_at, r.published_by, 'submit', 'Family', r.family_id,
+  SELECT r.published_at, r.published_by, 'publish', 'Family', r.family_id,
     json_object('revision', r.number, 'state', 'draft'), json_object('revision', r.number, 'state', 'published'),
     r.description FROM family_revisions AS r
   UNION ALL
@@ -23,7 +23,7 @@ const ENTERED = `SELECT entered_at AS at, entered_by AS actor, 'create' AS actio
     json_object('version', v.number, 'state', 'draft'), v.note
     FROM derating_policy_versions AS v JOIN derating_policies AS p ON p.id = v.policy_id AND p.origin = 'company'
   UNION ALL
-  SELECT v.published_at, v.published_by, 'update', 'Policy', v.policy_id,
+  SELECT v.published_at, v.published_by, 'publish', 'Policy', v.policy_id,
     json_object('version', v.number, 'state', 'draft'), json_object('version', v.number, 'state', 'published'), v.note
     FROM derating_policy_versions AS v JOIN derating_policies AS p ON p.id = v.policy_id AND p.origin = 'company'
     WHERE v.state = 'published'`;

@@ -194,6 +194,16 @@ export class CatalogueBuilder {
     return id;
   }
 
+  /** One more source at the end of a company part number's list. */
+  async addSource(number: string, partId: number): Promise<void> {
+    await this.run(
+      `INSERT INTO approved_sources (company_part_number_id, part_id, position, added_by, added_at)
+        SELECT id, $partId, (SELECT count(*) + 1 FROM approved_sources WHERE company_part_number_id = c.id), $by, $at
+        FROM company_part_numbers AS c WHERE number = $number`,
+      { number, partId, by: this.enteredBy, at: ENTERED_AT },
+    );
+  }
+
   /** An offer from 1 piece on, at a price in EUR for 1 and for 1000 pieces. */
   async offer(
     partId: number,
@@ -225,13 +235,18 @@ export class CatalogueBuilder {
     return id;
   }
 
-  /** Sets a part to where a test wants it, past every door. */
+  /** Sets a part to where a test wants it, past every door, with nothing to be reviewed. */
   async stand(partId: number, approval: Approval, supply: SupplyStatus): Promise<void> {
     const restricted = approval === 'restricted';
     await this.run(
       `UPDATE parts SET approval = $approval, supply = $supply, restriction_words = $words, restriction_scope = NULL,
         last_order_on = NULL WHERE id = $partId`,
       { partId, approval, supply, words: restricted ? 'Not above half of the rated dissipation.' : null },
+    );
+    await this.run(
+      `UPDATE reviews SET state = 'closed', closed_by = opened_by, closed_at = opened_at
+        WHERE part_id = $partId AND state = 'open'`,
+      { partId },
     );
     await this.rebuild();
   }

@@ -55,7 +55,7 @@ export class SupplyStepDto extends StepDto {
   lastOrderOn?: string;
 }
 
-export const reviewCauses = ['left-active-supply', 'submitted'] as const;
+export const reviewCauses = ['left-active-supply', 'lost-second-source', 'submitted'] as const;
 export type ReviewCause = (typeof reviewCauses)[number];
 
 export class OpenReviewDto {

@@ -1,4 +1,5 @@
 import { Injectable } from '@nestjs/common';
+import type { Approval } from '@resistry/engineering/ratings/technology';
 import type { Transaction } from 'sequelize';
 import { AuditTrail } from '../../audit/audit-trail';
 import { Clock } from '../../common/clock';
@@ -6,7 +7,7 @@ import type { FieldError } from '../../common/problems/problem';
 import { ClashProblem } from '../../common/problems/problems';
 import { Writer } from '../../database/writer';
 import type { Person } from '../../permissions/person';
-import { approvalActions, type ApprovalTarget, approvalTransitions } from './approval-transitions';
+import { approvalActions, reachableApprovals } from './approval-transitions';
 import { type ApprovalInput, approvalDemands, unmet } from './demands';
 import { PartReviews } from './part-reviews';
 import type { PartStanding } from './part-standing';
@@ -14,7 +15,7 @@ import { StandingDoor } from './standing-door';
 import { StandingLetters } from './standing-letters';
 
 export interface ApprovalChange extends ApprovalInput {
-  to: ApprovalTarget;
+  to: Approval;
   reason: string;
   version: number;
 }
@@ -37,11 +38,13 @@ export class ApprovalChanges {
    */
   async change(actor: Person, partId: number, change: ApprovalChange): Promise<void> {
     const action = approvalActions[change.to];
-    await this.door.pass(
+    await this.door.pass({
+      actor,
       partId,
-      change.version,
-      (part) => actor.demand(action, 'Part', { enteredBy: part.entered_by }),
-      async (transaction, part) => {
+      version: change.version,
+      reason: change.reason,
+      allow: (part) => actor.demand(action, 'Part', { enteredBy: part.entered_by }),
+      apply: async (transaction, part) => {
         refuse(part, change);
         await this.write(transaction, actor, part, change);
         await this.audit.record(transaction, {
@@ -54,8 +57,9 @@ export class ApprovalChanges {
           reason: change.reason,
         });
         await this.follow(transaction, actor, part, change);
+        return `is now ${change.to}`;
       },
-    );
+    });
   }
 
   private async write(
@@ -95,7 +99,8 @@ export class ApprovalChanges {
     part: PartStanding,
     { to, reason }: ApprovalChange,
   ): Promise<void> {
-    const news = { part, actor, reason, event: `is now ${to}; it was ${part.approval}` };
+    const event = to === part.approval ? `stays ${to}` : `is now ${to}; it was ${part.approval}`;
+    const news = { part, actor, reason, event };
     if (to === 'in-review') {
       await this.reviews.open(transaction, part.id, { cause: 'submitted', words: reason, actor });
       await this.letters.toComponentEngineers(transaction, {
@@ -111,7 +116,7 @@ export class ApprovalChanges {
 
 function refuse(part: PartStanding, change: ApprovalChange): void {
   const name = part.manufacturer_part_number;
-  const reachable = approvalTransitions[part.approval];
+  const reachable = reachableApprovals(part);
   if (!reachable.includes(change.to)) {
     const message = `A part that is ${part.approval} can only become ${reachable.join(', ')}.`;
     throw new ClashProblem(`${name} cannot become ${change.to}. ${message}`, [{ pointer: '/to', message }]);

@@ -1,22 +1,26 @@
 import type { Approval } from '@resistry/engineering/ratings/technology';
 import type { Action } from '../../permissions/actions-and-subjects';
 
-/** What a part can be made; no part goes back to being a draft. */
-export const approvalTargets = ['in-review', 'approved', 'preferred', 'restricted', 'withdrawn'] as const;
-export type ApprovalTarget = (typeof approvalTargets)[number];
-
 /** Which approvals follow on which. Restricted follows on itself: its words can change. */
-export const approvalTransitions: Readonly<Record<Approval, readonly ApprovalTarget[]>> = {
+const approvalTransitions: Readonly<Record<Approval, readonly Approval[]>> = {
   draft: ['in-review', 'approved', 'restricted', 'withdrawn'],
-  'in-review': ['approved', 'restricted', 'withdrawn'],
+  'in-review': ['approved', 'restricted', 'withdrawn', 'draft'],
   approved: ['preferred', 'restricted', 'withdrawn'],
   preferred: ['approved', 'restricted', 'withdrawn'],
   restricted: ['approved', 'restricted', 'withdrawn'],
   withdrawn: ['in-review'],
 };
 
+/** What the part can be made from where it stands. While a review of it is open, that it stays what it is is a decision too. */
+export function reachableApprovals(part: { approval: Approval; open_reviews: number }): readonly Approval[] {
+  const { approval, open_reviews: openReviews } = part;
+  const confirmed = openReviews > 0 && (approval === 'approved' || approval === 'preferred');
+  return [...(confirmed ? [approval] : []), ...approvalTransitions[approval]];
+}
+
 /** The deed by which a part becomes this, in the words of the permissions. */
-export const approvalActions: Readonly<Record<ApprovalTarget, Action>> = {
+export const approvalActions: Readonly<Record<Approval, Action>> = {
+  draft: 'return',
   'in-review': 'submit',
   approved: 'approve',
   preferred: 'promote',

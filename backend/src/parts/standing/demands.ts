@@ -1,6 +1,5 @@
-import type { SupplyStatus } from '@resistry/engineering/ratings/technology';
+import type { Approval, SupplyStatus } from '@resistry/engineering/ratings/technology';
 import type { FieldError } from '../../common/problems/problem';
-import type { ApprovalTarget } from './approval-transitions';
 import type { PartStanding } from './part-standing';
 
 export const demandNames = [
@@ -32,7 +31,7 @@ export interface ApprovalInput {
 }
 
 /** What must hold for the part to become this. */
-export function approvalDemands(to: ApprovalTarget, part: PartStanding, input: ApprovalInput): Demand[] {
+export function approvalDemands(to: Approval, part: PartStanding, input: ApprovalInput): Demand[] {
   if (to === 'preferred') return demandsOfPreference(part, input);
   if (to === 'restricted') return demandsOfRestriction(input);
   return [];

@@ -1,10 +1,10 @@
 import { Injectable } from '@nestjs/common';
+import type { Approval } from '@resistry/engineering/ratings/technology';
 import type { Transaction } from 'sequelize';
 import { Clock } from '../../common/clock';
 import { Writer } from '../../database/writer';
 import type { Person } from '../../permissions/person';
 import type { ReviewCause } from '../details/standing.dto';
-import type { ApprovalTarget } from './approval-transitions';
 
 /** Opening and closing the reviews of a part, in the transaction of what causes it. */
 @Injectable()
@@ -40,7 +40,7 @@ export class PartReviews {
   async closeAll(
     transaction: Transaction,
     partId: number,
-    outcome: ApprovalTarget,
+    outcome: Approval,
     actor: Person,
   ): Promise<number[]> {
     const rows = await this.writer.select<{ id: number }>(

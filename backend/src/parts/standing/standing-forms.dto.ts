@@ -1,9 +1,13 @@
 import { ApiProperty, ApiPropertyOptional } from '@nestjs/swagger';
-import { supplyStatuses, type SupplyStatus } from '@resistry/engineering/ratings/technology';
+import {
+  type Approval,
+  approvals,
+  supplyStatuses,
+  type SupplyStatus,
+} from '@resistry/engineering/ratings/technology';
 import { IsIn, IsInt, IsOptional, IsString, Max, MaxLength, Min } from 'class-validator';
 import { Day } from '../../common/validation/day';
 import { Filled } from '../../common/validation/filled';
-import { approvalTargets, type ApprovalTarget } from './approval-transitions';
 
 const LONGEST = 1000;
 
@@ -22,9 +26,9 @@ class ReasonedForm {
 }
 
 export class ApprovalChangeForm extends ReasonedForm {
-  @ApiProperty({ enum: approvalTargets })
-  @IsIn(approvalTargets)
-  to: ApprovalTarget;
+  @ApiProperty({ enum: approvals })
+  @IsIn(approvals)
+  to: Approval;
 
   @ApiPropertyOptional({ maxLength: LONGEST, description: 'Of a restriction: what the part may be used for' })
   @IsOptional()

@@ -6,7 +6,7 @@ import { mayDo } from '../../permissions/ability';
 import type { Action } from '../../permissions/actions-and-subjects';
 import type { Person } from '../../permissions/person';
 import { refusalOf } from '../../permissions/refusal';
-import { approvalActions, approvalTransitions } from './approval-transitions';
+import { approvalActions, reachableApprovals } from './approval-transitions';
 import { approvalDemands, supplyDemands } from './demands';
 import { type PartStanding, partStandingSql } from './part-standing';
 import { supplyTransitions } from './supply-transitions';
@@ -31,7 +31,7 @@ export class StandingTransitions {
       version: part.version,
       approval: part.approval,
       supply: part.supply,
-      approvalTransitions: approvalTransitions[part.approval].map((to) => ({
+      approvalTransitions: reachableApprovals(part).map((to) => ({
         to,
         action: approvalActions[to],
         ...permission(approvalActions[to]),

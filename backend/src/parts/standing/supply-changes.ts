@@ -40,16 +40,18 @@ export class SupplyChanges {
    * @throws ClashProblem naming every demand that is not met, or saying that it cannot follow on what the part is
    */
   async change(actor: Person, partId: number, change: SupplyChange): Promise<void> {
-    await this.door.pass(
+    await this.door.pass({
+      actor,
       partId,
-      change.version,
-      (part) => {
+      version: change.version,
+      reason: change.reason,
+      allow: (part) => {
         actor.demand('set-supply-status', 'Part', { enteredBy: part.entered_by });
         if (change.lastOrderDate !== undefined) {
           actor.demand('set-last-order-date', 'Part', { enteredBy: part.entered_by });
         }
       },
-      async (transaction, part) => {
+      apply: async (transaction, part) => {
         const today = this.clock.today();
         refuse(part, change, today);
         const lastOrderOn = lastOrderAfter(part, change, today);
@@ -67,8 +69,9 @@ export class SupplyChanges {
           reason: change.reason,
         });
         await this.follow(transaction, actor, part, change);
+        return `is now ${change.to} in supply`;
       },
-    );
+    });
   }
 
   private async write(

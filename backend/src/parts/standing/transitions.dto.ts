@@ -6,7 +6,6 @@ import {
   type SupplyStatus,
 } from '@resistry/engineering/ratings/technology';
 import { ACTIONS, type Action } from '../../permissions/actions-and-subjects';
-import { approvalTargets, type ApprovalTarget } from './approval-transitions';
 import { demandNames, type Demand, type DemandName } from './demands';
 
 const fields = ['to', 'words', 'scope', 'exception', 'lastOrderDate'] as const;
@@ -51,8 +50,8 @@ class TransitionDto {
 }
 
 export class ApprovalTransitionDto extends TransitionDto {
-  @ApiProperty({ enum: approvalTargets })
-  to: ApprovalTarget;
+  @ApiProperty({ enum: approvals })
+  to: Approval;
 }
 
 export class SupplyTransitionDto extends TransitionDto {

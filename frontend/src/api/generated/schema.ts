@@ -951,7 +951,7 @@ export interface components {
             password: string;
         };
         /** @enum {string} */
-        Action: "read" | "compute" | "create" | "update" | "submit" | "approve" | "promote" | "restrict" | "withdraw" | "set-supply-status" | "set-last-order-date" | "invite" | "change-roles" | "deactivate" | "reactivate" | "manage";
+        Action: "read" | "compute" | "create" | "update" | "submit" | "return" | "approve" | "promote" | "restrict" | "withdraw" | "publish" | "set-supply-status" | "set-last-order-date" | "invite" | "change-roles" | "deactivate" | "reactivate" | "manage";
         /** @enum {string} */
         Subject: "Account" | "Search" | "Part" | "Family" | "Manufacturer" | "CompanyPartNumber" | "Offer" | "Review" | "Policy" | "User" | "Permission" | "AuditEntry" | "Mail" | "OutboxMessage" | "Backup";
         PermissionRow: {
@@ -1626,7 +1626,7 @@ export interface components {
         OpenReviewDto: {
             id: number;
             /** @enum {string} */
-            cause: "left-active-supply" | "submitted";
+            cause: "left-active-supply" | "lost-second-source" | "submitted";
             words: string;
             openedBy: components["schemas"]["PersonRefDto"];
             /** @description ISO 8601 */
@@ -1801,21 +1801,21 @@ export interface components {
              * @description What it is called in the table of rules
              * @enum {string}
              */
-            action: "read" | "compute" | "create" | "update" | "submit" | "approve" | "promote" | "restrict" | "withdraw" | "set-supply-status" | "set-last-order-date" | "invite" | "change-roles" | "deactivate" | "reactivate" | "manage";
+            action: "read" | "compute" | "create" | "update" | "submit" | "return" | "approve" | "promote" | "restrict" | "withdraw" | "publish" | "set-supply-status" | "set-last-order-date" | "invite" | "change-roles" | "deactivate" | "reactivate" | "manage";
             /** @description The rules let the person who asks do this to this part */
             allowed: boolean;
             forbiddenBy?: components["schemas"]["ForbiddenByDto"];
             /** @description As things stand, with nothing filled in */
             demands: components["schemas"]["DemandDto"][];
             /** @enum {string} */
-            to: "in-review" | "approved" | "preferred" | "restricted" | "withdrawn";
+            to: "draft" | "in-review" | "approved" | "preferred" | "restricted" | "withdrawn";
         };
         SupplyTransitionDto: {
             /**
              * @description What it is called in the table of rules
              * @enum {string}
              */
-            action: "read" | "compute" | "create" | "update" | "submit" | "approve" | "promote" | "restrict" | "withdraw" | "set-supply-status" | "set-last-order-date" | "invite" | "change-roles" | "deactivate" | "reactivate" | "manage";
+            action: "read" | "compute" | "create" | "update" | "submit" | "return" | "approve" | "promote" | "restrict" | "withdraw" | "publish" | "set-supply-status" | "set-last-order-date" | "invite" | "change-roles" | "deactivate" | "reactivate" | "manage";
             /** @description The rules let the person who asks do this to this part */
             allowed: boolean;
             forbiddenBy?: components["schemas"]["ForbiddenByDto"];
@@ -1839,7 +1839,7 @@ export interface components {
             /** @description Version of the part that the change is made on */
             version: number;
             /** @enum {string} */
-            to: "in-review" | "approved" | "preferred" | "restricted" | "withdrawn";
+            to: "draft" | "in-review" | "approved" | "preferred" | "restricted" | "withdrawn";
             /** @description Of a restriction: what the part may be used for */
             words?: string;
             /** @description Of a restriction: where it holds */
@@ -1977,7 +1977,7 @@ export interface components {
         ReviewDto: {
             id: number;
             /** @enum {string} */
-            cause: "left-active-supply" | "submitted";
+            cause: "left-active-supply" | "lost-second-source" | "submitted";
             words: string;
             openedBy: components["schemas"]["PersonRefDto"];
             /** @description ISO 8601 */

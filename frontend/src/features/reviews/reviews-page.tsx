@@ -57,7 +57,8 @@ export function Component() {
         {({ total, items }) =>
           items.length === 0 ? (
             <Empty title="Nothing waits">
-              Parts that are submitted, or that leave active supply, come here.
+              Parts that are submitted, that leave active supply, or that are preferred and lose their second
+              source come here.
             </Empty>
           ) : (
             <>

@@ -3,6 +3,7 @@ import { supplyWords } from '../../../wording/standing-words';
 import type { ApprovalTransition, SupplyTransition } from '../requests/get-transitions';
 
 const approvalDeeds: Record<ApprovalTransition['to'], string> = {
+  draft: 'Send back to draft',
   'in-review': 'Submit for review',
   approved: 'Approve',
   preferred: 'Promote to preferred',
@@ -12,7 +13,9 @@ const approvalDeeds: Record<ApprovalTransition['to'], string> = {
 
 /** What a change is called where the same end is reached from elsewhere. */
 const fromElsewhere: Partial<Record<`${Approval} ${ApprovalTransition['to']}`, string>> = {
+  'preferred preferred': 'Keep as preferred',
   'preferred approved': 'Back to approved',
+  'approved approved': 'Keep as approved',
   'restricted approved': 'Lift the restriction',
   'restricted restricted': 'Change the restriction',
   'withdrawn in-review': 'Submit for review again',
