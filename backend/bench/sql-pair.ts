@@ -1,4 +1,5 @@
-import { allocateScratch, evaluateRows, type Evaluation } from '../src/search/engine/evaluation';
+import { evaluateRows, type Evaluation } from '../src/search/engine/evaluation';
+import { allocateScratch, type Scratch } from '../src/search/engine/scratch';
 import type { CatalogueIndex } from '../src/search/index/catalogue-index';
 import type { Policy } from '@resistry/engineering/derating/policy-entry';
 import { requirementOf } from '@resistry/engineering/duty/requirement';
@@ -18,6 +19,7 @@ export class SqlPair {
   private constructor(
     private readonly database: Statements,
     private readonly index: CatalogueIndex,
+    private readonly scratch: Scratch,
   ) {}
 
   static async prepare(database: Statements, index: CatalogueIndex): Promise<SqlPair> {
@@ -47,7 +49,7 @@ export class SqlPair {
         { $values: JSON.stringify(values) },
       );
     }
-    return new SqlPair(database, index);
+    return new SqlPair(database, index, allocateScratch(columns.partId.length));
   }
 
   /** Gives SQL the stretches of one duty; not timed. */
@@ -57,7 +59,8 @@ export class SqlPair {
       this.index.rows,
       requirementOf(duty),
       policy,
-      allocateScratch(this.index.columns.partId.length),
+      this.scratch,
+      'all parts',
     );
     const standingBits = bitsOf(evaluation, 'approval') | bitsOf(evaluation, 'supply');
     await this.database.run('DROP TABLE IF EXISTS stretches');
@@ -111,7 +114,7 @@ function bitsOf(evaluation: Evaluation, name: string): number {
 
 /** Runs of positions in a row that share their masks, with the standing checks left to the join. */
 function stretchesOf(index: CatalogueIndex, evaluation: Evaluation, standingBits: number): number[][] {
-  const { unmet, unrated } = evaluation.masks;
+  const { unmet, unrated } = evaluation.scratch.masks;
   const { resistance } = index.columns;
   const stretches: number[][] = [];
   for (const [row, { from, to }] of index.rows.entries()) {

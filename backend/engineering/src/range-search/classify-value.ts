@@ -3,7 +3,7 @@ import type { Status } from '../checks/check';
 import type { Window } from '../duty/window';
 import type { Conditions } from '../operating/conditions';
 import { deviationAt, settle, type OperatingState } from '../operating/settle';
-import { setBit, type RowMasks } from './row-masks';
+import { setStatus, type RowMasks } from './row-masks';
 
 /** A stretch of one row that the value check is held to. */
 interface Stretch {
@@ -28,7 +28,7 @@ export function classifyValue(stretch: Stretch, from: number, to: number): void 
   if (to - from >= shortest) {
     const decided = decide(stretch, from, to);
     if (decided !== undefined) {
-      mark(stretch, from, to, decided);
+      setStatus(stretch.masks, from, to, stretch.bit, decided);
       return;
     }
     const middle = (from + to) >>> 1;
@@ -39,18 +39,9 @@ export function classifyValue(stretch: Stretch, from: number, to: number): void 
   for (let index = from; index < to; index += 1) {
     const resistance = stretch.resistances[index] ?? NaN;
     stretch.masks.exact += 1;
-    mark(
-      stretch,
-      index,
-      index + 1,
-      statusAt(stretch, settle(stretch.conditions, resistance, resistance), resistance),
-    );
+    const state = settle(stretch.conditions, resistance, resistance);
+    setStatus(stretch.masks, index, index + 1, stretch.bit, statusAt(stretch, state, resistance));
   }
-}
-
-function mark({ masks, bit }: Stretch, from: number, to: number, status: Status): void {
-  if (status === 'unmet') setBit(masks.unmet, from, to, bit);
-  else if (status === 'unrated') setBit(masks.unrated, from, to, bit);
 }
 
 function statusAt({ conditions }: Stretch, state: OperatingState, nominal: number): Status {

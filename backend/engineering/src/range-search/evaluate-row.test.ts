@@ -9,6 +9,8 @@ import { valuesBetween } from '../preferred-values/values-between';
 import { arbitraryDuty, arbitraryPolicy, arbitraryRatings } from '../test-support/arbitrary-duties';
 import { askedChecks } from './asked-checks';
 import { evaluateRow } from './evaluate-row';
+import { passingStretches } from './passing-stretches';
+import { answersOf } from './row-answers';
 import type { RowMasks } from './row-masks';
 
 const resistances = Float64Array.from(valuesBetween(0.1, 1e7, 'E24'));
@@ -28,6 +30,11 @@ const newMasks = (): RowMasks => ({
   exact: 0,
 });
 
+const holdsPosition = (stretches: readonly number[], position: number): boolean =>
+  stretches.some(
+    (first, place) => place % 2 === 0 && position >= first && position < (stretches[place + 1] ?? 0),
+  );
+
 it('a row gives each part the statuses of assessing it alone', () => {
   let parts = 0;
   let exact = 0;
@@ -37,30 +44,30 @@ it('a row gives each part the statuses of assessing it alone', () => {
       if (requirement === undefined) return;
       const checks = askedChecks(requirement);
       const masks = newMasks();
-      evaluateRow(
-        conditionsOf(ratings, requirement, policy),
-        checks,
-        resistances,
-        0,
-        resistances.length,
-        masks,
-      );
+      const conditions = conditionsOf(ratings, requirement, policy);
+      const row = { conditions, answers: answersOf(conditions, checks), resistances };
+      evaluateRow(row, 0, resistances.length, masks);
+      const passing = passingStretches(row, [0, resistances.length]);
       parts += resistances.length;
       exact += masks.exact;
       resistances.forEach((resistance, index) => {
-        const conditions = conditionsOf({ ...ratings, resistance }, requirement, policy);
-        const state = stateOf(conditions);
+        const single = conditionsOf({ ...ratings, resistance }, requirement, policy);
+        const state = stateOf(single);
         const alone: Record<string, string> = {};
         const inRow: Record<string, string> = {};
         for (const { definition, bit } of checks) {
           if (standingChecks.has(definition.name)) continue;
-          if (!definition.asked(requirement, conditions.ratings, undefined)) continue;
-          alone[definition.name] = definition.find({ conditions, state }).status;
+          if (!definition.asked(requirement, single.ratings, undefined)) continue;
+          alone[definition.name] = definition.find({ conditions: single, state }).status;
           const unmet = ((masks.unmet[index] ?? 0) & bit) !== 0;
           const unrated = ((masks.unrated[index] ?? 0) & bit) !== 0;
           inRow[definition.name] = unmet && unrated ? 'both' : unmet ? 'unmet' : unrated ? 'unrated' : 'met';
         }
         expect({ resistance, ...inRow }).toEqual({ resistance, ...alone });
+        const passes = Object.entries(alone).every(
+          ([name, status]) => name === 'value' || status !== 'unmet',
+        );
+        expect({ resistance, passes: holdsPosition(passing, index) }).toEqual({ resistance, passes });
       });
     }),
     { numRuns: 300 },

@@ -1,130 +1,134 @@
-import { conditionsOf, type Conditions } from '@resistry/engineering/operating/conditions';
 import type { Policy } from '@resistry/engineering/derating/policy-entry';
 import type { Requirement } from '@resistry/engineering/duty/requirement';
+import { conditionsOf, type Conditions } from '@resistry/engineering/operating/conditions';
 import { askedChecks, type AskedCheck } from '@resistry/engineering/range-search/asked-checks';
-import { evaluateRow } from '@resistry/engineering/range-search/evaluate-row';
-import type { RowMasks } from '@resistry/engineering/range-search/row-masks';
-import { approvals, supplyStatuses } from '@resistry/engineering/ratings/technology';
-import { wantedApprovals } from '@resistry/engineering/checks/approval';
-import { wantedSupply } from '@resistry/engineering/checks/supply';
+import { evaluateRow, insideWindow, type Row } from '@resistry/engineering/range-search/evaluate-row';
+import { passingStretches } from '@resistry/engineering/range-search/passing-stretches';
+import { answersOf } from '@resistry/engineering/range-search/row-answers';
 import type { CatalogueRow } from '../index/catalogue-columns';
 import type { CatalogueIndex } from '../index/catalogue-index';
+import type { Scratch } from './scratch';
+import { addStanding, standingMasks, type StandingMasks } from './standing-masks';
 
-/** Masks of all parts of the catalogue; kept between searches, because a million parts are not worth allocating twice. */
-export interface Scratch {
-  masks: RowMasks;
-  /** For the second and further operating modes of a row. */
-  other: RowMasks;
-  /** Of parts with several operating modes, the checks that are unmet in every mode. */
-  unmetInEveryMode: Uint32Array;
+/**
+ * How one row stands. Its parts at [from, to) have been judged by every check. The others lie outside the window by their
+ * nominal resistance: of them it is only known in which stretches nothing but the window, and perhaps their standing in
+ * the catalogue, removes them.
+ */
+export interface RowOutcome {
+  row: CatalogueRow;
+  from: number;
+  to: number;
+  /** Pairs of first position and position after the last. */
+  passingOutside: readonly number[];
 }
 
-export function allocateScratch(length: number): Scratch {
-  const masks = (): RowMasks => ({
-    unmet: new Uint32Array(length),
-    unrated: new Uint32Array(length),
-    exact: 0,
-  });
-  return { masks: masks(), other: masks(), unmetInEveryMode: new Uint32Array(length) };
-}
-
-/** The checks a requirement asks and how the rows of a catalogue stand under it. */
-export interface Evaluation {
+/** The checks a requirement asks. */
+interface Question {
   requirement: Requirement;
   policy: Policy;
   checks: readonly AskedCheck[];
-  masks: RowMasks;
-  unmetInEveryMode: Uint32Array;
+  /** Bit of the value check; 0 where it is not asked. */
+  valueBit: number;
+  standing: StandingMasks;
+  scratch: Scratch;
 }
+
+/** How the rows of a catalogue stand under a requirement; the masks are in its scratch. */
+export interface Evaluation extends Question {
+  outcomes: readonly RowOutcome[];
+  /** Checks of single parts that bounds could not decide. */
+  exact: number;
+}
+
+/**
+ * Which parts are judged by every check: all of them, or those inside the window, which is enough to count parts and a
+ * small share of the work.
+ */
+export type Extent = 'all parts' | 'inside the window';
 
 /** Conditions of each operating mode of a row. */
 export function conditionsOfRow(row: CatalogueRow, requirement: Requirement, policy: Policy): Conditions[] {
   return row.modes.map((ratings) => conditionsOf(ratings, requirement, policy));
 }
 
-/** Holds every part of the given rows against a requirement; the standing checks are set last, from the columns. */
+/** Holds the parts of the given rows against a requirement. */
 export function evaluateRows(
   index: CatalogueIndex,
   rows: readonly CatalogueRow[],
   requirement: Requirement,
   policy: Policy,
   scratch: Scratch,
+  extent: Extent,
 ): Evaluation {
   const checks = askedChecks(requirement);
-  const standing = standingMasks(requirement, checks);
+  const question: Question = {
+    requirement,
+    policy,
+    checks,
+    valueBit: checks.find(({ definition }) => definition.name === 'value')?.bit ?? 0,
+    standing: standingMasks(requirement, checks),
+    scratch,
+  };
   scratch.masks.exact = 0;
   scratch.other.exact = 0;
-  for (const row of rows) evaluateModes(index, row, requirement, policy, checks, scratch, standing);
-  scratch.masks.exact += scratch.other.exact;
-  return { requirement, policy, checks, masks: scratch.masks, unmetInEveryMode: scratch.unmetInEveryMode };
+  const outcomes = rows.map((row) => outcomeOf(index, row, question, extent));
+  return { ...question, outcomes, exact: scratch.masks.exact + scratch.other.exact };
 }
 
-function evaluateModes(
+function outcomeOf(
   index: CatalogueIndex,
   row: CatalogueRow,
-  requirement: Requirement,
-  policy: Policy,
-  checks: readonly AskedCheck[],
-  { masks, other, unmetInEveryMode }: Scratch,
-  standing: Uint32Array,
-): void {
-  const { columns } = index;
-  const { from, to } = row;
-  const modes = conditionsOfRow(row, requirement, policy);
-  modes.forEach((conditions, mode) => {
-    const into = mode === 0 ? masks : other;
-    evaluateRow(conditions, checks, columns.resistance, from, to, into);
-    for (let position = from; position < to; position += 1) {
-      const common = mode === 0 ? ~0 : (unmetInEveryMode[position] ?? 0);
-      unmetInEveryMode[position] = common & (into.unmet[position] ?? 0);
-    }
-    if (mode > 0) keepBetterMode(masks, other, from, to);
-  });
-  for (let position = from; position < to; position += 1) {
-    const key = standingKey(
-      columns.approval[position] ?? 0,
-      columns.supply[position] ?? 0,
-      columns.secondSource[position] ?? 0,
-    );
-    masks.unmet[position] = (masks.unmet[position] ?? 0) | (standing[key] ?? 0);
-    unmetInEveryMode[position] = (unmetInEveryMode[position] ?? 0) | (standing[key] ?? 0);
+  { requirement, checks, policy, scratch, standing }: Question,
+  extent: Extent,
+): RowOutcome {
+  const { resistance } = index.columns;
+  const { window, link } = requirement;
+  const windowDecides = extent === 'inside the window' && window !== undefined && !link && !row.isLink;
+  const [from, to] = windowDecides ? insideWindow(window, resistance, row.from, row.to) : [row.from, row.to];
+  let passingOutside: readonly number[] = [];
+  for (const [mode, ratings] of row.modes.entries()) {
+    // Outside the window every operating mode is unmet, and of equals the first stands.
+    if (mode > 0 && from >= to) break;
+    const conditions = conditionsOf(ratings, requirement, policy);
+    const judged: Row = { conditions, answers: answersOf(conditions, checks), resistances: resistance };
+    if (mode === 0) passingOutside = passingStretches(judged, outside(row, from, to));
+    judgeMode(judged, mode, from, to, scratch);
   }
+  addStanding(index.columns, standing, scratch, from, to);
+  return { row, from, to, passingOutside };
 }
 
-/** A part is assessed in the mode of its best verdict, the first of equals. */
-function keepBetterMode(masks: RowMasks, other: RowMasks, from: number, to: number): void {
+/** The stretches of a row that are not in [from, to). */
+function outside(row: CatalogueRow, from: number, to: number): number[] {
+  if (from >= to) return row.from < row.to ? [row.from, row.to] : [];
+  const stretches: number[] = [];
+  if (row.from < from) stretches.push(row.from, from);
+  if (to < row.to) stretches.push(to, row.to);
+  return stretches;
+}
+
+/** Judges [from, to) in one operating mode; a part keeps the mode of its best verdict, the first of equals. */
+function judgeMode(row: Row, mode: number, from: number, to: number, scratch: Scratch): void {
+  const { masks, other, unmetInEveryMode } = scratch;
+  const into = mode === 0 ? masks : other;
+  evaluateRow(row, from, to, into);
   for (let position = from; position < to; position += 1) {
-    const unmet = masks.unmet[position] ?? 0;
-    const unrated = masks.unrated[position] ?? 0;
-    const rank = unmet !== 0 ? 2 : unrated !== 0 ? 1 : 0;
+    const common = mode === 0 ? ~0 : (unmetInEveryMode[position] ?? 0);
+    unmetInEveryMode[position] = common & (into.unmet[position] ?? 0);
+  }
+  if (mode === 0) return;
+  for (let position = from; position < to; position += 1) {
+    const rank = rankOf(masks.unmet[position] ?? 0, masks.unrated[position] ?? 0);
     if (rank === 0) continue;
-    const otherUnmet = other.unmet[position] ?? 0;
-    const otherUnrated = other.unrated[position] ?? 0;
-    const otherRank = otherUnmet !== 0 ? 2 : otherUnrated !== 0 ? 1 : 0;
-    if (otherRank >= rank) continue;
-    masks.unmet[position] = otherUnmet;
-    masks.unrated[position] = otherUnrated;
+    const unmet = other.unmet[position] ?? 0;
+    const unrated = other.unrated[position] ?? 0;
+    if (rankOf(unmet, unrated) >= rank) continue;
+    masks.unmet[position] = unmet;
+    masks.unrated[position] = unrated;
   }
 }
 
-function standingKey(approval: number, supply: number, secondSource: number): number {
-  return approval | (supply << 3) | (secondSource << 5);
-}
-
-/** Bits of the standing checks that are unmet, by approval, supply status and second source. */
-function standingMasks(requirement: Requirement, checks: readonly AskedCheck[]): Uint32Array {
-  const bitOf = (name: string): number => checks.find((check) => check.definition.name === name)?.bit ?? 0;
-  const wanted = { approvals: wantedApprovals(requirement), supply: wantedSupply(requirement) };
-  const masks = new Uint32Array(64);
-  for (const [approval, approvalName] of approvals.entries()) {
-    for (const [supply, supplyName] of supplyStatuses.entries()) {
-      for (const secondSource of [0, 1]) {
-        masks[standingKey(approval, supply, secondSource)] =
-          (wanted.approvals.includes(approvalName) ? 0 : bitOf('approval')) |
-          (wanted.supply.includes(supplyName) ? 0 : bitOf('supply')) |
-          (secondSource === 1 ? 0 : bitOf('second-source'));
-      }
-    }
-  }
-  return masks;
+function rankOf(unmet: number, unrated: number): number {
+  return unmet !== 0 ? 2 : unrated !== 0 ? 1 : 0;
 }

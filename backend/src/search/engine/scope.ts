@@ -12,21 +12,37 @@ import type { SearchPlan } from './search-plan';
  */
 export class Scope {
   readonly rows: readonly CatalogueRow[];
-  private readonly accepts: ((position: number) => boolean) | undefined;
+  private readonly filter: ((position: number) => boolean) | undefined;
   private readonly numbers: ReadonlySet<number>;
+
+  readonly byCompanyNumber: boolean;
 
   constructor(
     private readonly index: CatalogueIndex,
-    private readonly plan: SearchPlan,
+    plan: SearchPlan,
   ) {
+    this.byCompanyNumber = plan.byCompanyNumber;
     this.rows = index.rows.filter(rowFilter(index, plan.filters));
-    this.accepts = partFilter(index, plan.filters);
+    this.filter = partFilter(index, plan.filters);
     this.numbers = plan.byCompanyNumber ? this.acceptedNumbers() : new Set();
+  }
+
+  /** Whether the filters accept the part at a position of an accepted row. */
+  accepts(position: number): boolean {
+    return this.filter === undefined || this.filter(position);
+  }
+
+  /** How many parts at [from, to) of an accepted row the filters accept. */
+  countAccepted(from: number, to: number): number {
+    if (this.filter === undefined) return to - from;
+    let count = 0;
+    for (let position = from; position < to; position += 1) if (this.filter(position)) count += 1;
+    return count;
   }
 
   /** The positions that decide about a unit. */
   positionsOf(unit: number): readonly number[] {
-    return this.plan.byCompanyNumber ? judgedSources(this.index, unit) : [unit];
+    return this.byCompanyNumber ? judgedSources(this.index, unit) : [unit];
   }
 
   /** Calls back for every unit, or for those whose parts lie in an interval of resistance (Ω). */
@@ -35,7 +51,7 @@ export class Scope {
     interval: { lower: number; upper: number } = { lower: -1, upper: Infinity },
   ): void {
     const { resistance } = this.index.columns;
-    if (this.plan.byCompanyNumber) {
+    if (this.byCompanyNumber) {
       for (const number of this.numbers) {
         const inside = judgedSources(this.index, number).every((position) => {
           const ohm = resistance[position] ?? NaN;
@@ -49,7 +65,7 @@ export class Scope {
       const first = firstNotBelow(resistance, from, to, interval.lower);
       const last = firstAbove(resistance, first, to, interval.upper);
       for (let position = first; position < last; position += 1) {
-        if (this.accepts === undefined || this.accepts(position)) visit(position);
+        if (this.accepts(position)) visit(position);
       }
     }
   }
@@ -60,7 +76,7 @@ export class Scope {
     for (const { from, to } of this.rows) {
       for (let position = from; position < to; position += 1) {
         const number = company[position] ?? -1;
-        if (number >= 0 && (this.accepts === undefined || this.accepts(position))) numbers.add(number);
+        if (number >= 0 && this.accepts(position)) numbers.add(number);
       }
     }
     return numbers;

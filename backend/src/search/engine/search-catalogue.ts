@@ -2,13 +2,14 @@ import { approvals } from '@resistry/engineering/ratings/technology';
 import { requirementOf } from '@resistry/engineering/duty/requirement';
 import type { CatalogueIndex } from '../index/catalogue-index';
 import { judgedSources } from './company-numbers';
-import { evaluateRows, type Evaluation, type Scratch } from './evaluation';
+import { countNumbers, countParts } from './count-units';
+import { evaluateRows, type Evaluation, type Extent } from './evaluation';
 import { PartOrder } from './part-order';
 import { Scope } from './scope';
+import type { Scratch } from './scratch';
 import type { FoundItem, SearchPlan, SearchResult } from './search-plan';
 import { orderOfNumbers, orderOfParts } from './unit-order';
 import { selectFirst } from './select-first';
-import { Tally } from './tally';
 import { relaxationsOf } from './relaxation/relaxations';
 
 /** Scratch for the search itself and for trying loosened duties beside it. */
@@ -31,14 +32,13 @@ export function searchCatalogue(
   const scope = new Scope(index, plan);
   // The sources of a company part number can stand in rows that the filters leave out.
   const rows = plan.byCompanyNumber ? index.rows : scope.rows;
-  const evaluation = evaluateRows(index, rows, requirement, plan.policy, scratch.main);
-  const tally = count(scope, evaluation);
+  const evaluation = evaluateRows(index, rows, requirement, plan.policy, scratch.main, extentOf(plan));
+  const tally = plan.byCompanyNumber ? countNumbers(scope, evaluation) : countParts(index, scope, evaluation);
   const order = new PartOrder(index, evaluation);
   const compare = plan.byCompanyNumber
     ? orderOfNumbers(index, order, plan.sort)
     : orderOfParts(index, order, plan.sort);
   const { met, unrated } = tally;
-  const exact = evaluation.masks.exact;
   return {
     total: met.length,
     unrated: unrated.length,
@@ -46,24 +46,17 @@ export function searchCatalogue(
     knockouts: tally.knockouts(),
     relaxations: plan.relaxations ? relaxationsOf(index, scope, evaluation, scratch.retrial) : [],
     byApproval: countByApproval(index, scope, met),
-    exact,
+    exact: evaluation.exact,
   };
 }
 
-/** The worst of its positions speaks for a unit: its masks are those of all of them together. */
-function count(scope: Scope, evaluation: Evaluation): Tally {
-  const tally = new Tally(evaluation.checks);
-  const { unmet, unrated } = evaluation.masks;
-  scope.forEach((unit) => {
-    let unmetMask = 0;
-    let unratedMask = 0;
-    for (const position of scope.positionsOf(unit)) {
-      unmetMask |= unmet[position] ?? 0;
-      unratedMask |= unrated[position] ?? 0;
-    }
-    tally.add(unit, unmetMask, unratedMask);
-  });
-  return tally;
+/**
+ * Company part numbers are judged by sources on either side of the window, and loosened limits move the window itself;
+ * everything else is decided by the parts inside it.
+ */
+function extentOf(plan: SearchPlan): Extent {
+  const movable = plan.relaxations && plan.duty.limits !== undefined;
+  return plan.byCompanyNumber || movable ? 'all parts' : 'inside the window';
 }
 
 /** The page: by preference what is met comes before what is unrated; by any other column they stand mixed. */
@@ -89,7 +82,7 @@ function itemOf(
 ): FoundItem {
   const { columns, companyNumbers } = index;
   if (!plan.byCompanyNumber) return { partId: columns.partId[position] ?? 0 };
-  const { unmet, unrated } = evaluation.masks;
+  const { unmet, unrated } = evaluation.scratch.masks;
   const badness = (source: number): number => (unmet[source] !== 0 ? 2 : unrated[source] !== 0 ? 1 : 0);
   const sources = judgedSources(index, position).sort(
     (first, second) => badness(second) - badness(first) || first - second,

@@ -9,6 +9,9 @@ export class Tally {
   readonly met: number[] = [];
   readonly unrated: number[] = [];
 
+  /** Seen with `value` and something else unmet, counted without the rest of their masks. */
+  private removedByValueAndMore = 0;
+
   constructor(private readonly checks: readonly AskedCheck[]) {
     this.byMask = new Int32Array(1 << checks.length);
   }
@@ -20,13 +23,19 @@ export class Tally {
     else this.unrated.push(position);
   }
 
+  /** Counts what `value` removes without looking at the rest. @param alone those of them that nothing else removes */
+  addRemovedByValue(valueBit: number, count: number, alone: number): void {
+    this.byMask[valueBit] = (this.byMask[valueBit] ?? 0) + alone;
+    this.removedByValueAndMore += count - alone;
+  }
+
   /**
    * How many each check removes, and how many of those nothing else removes. `value` counts over everything that was
    * seen, every other check over what `value` does not remove.
    */
   knockouts(): Knockout[] {
     const valueBit = this.checks.find(({ definition }) => definition.name === 'value')?.bit ?? 0;
-    const removes = new Map<number, number>();
+    const removes = new Map<number, number>([[valueBit, this.removedByValueAndMore]]);
     for (let mask = 1; mask < this.byMask.length; mask += 1) {
       const count = this.byMask[mask] ?? 0;
       if (count === 0) continue;

@@ -1,4 +1,4 @@
-import { allocateScratch } from '../engine/evaluation';
+import { allocateScratch } from '../engine/scratch';
 import { searchCatalogue, type SearchScratch } from '../engine/search-catalogue';
 import type { SearchPlan, SearchResult } from '../engine/search-plan';
 import type { CatalogueIndex } from '../index/catalogue-index';

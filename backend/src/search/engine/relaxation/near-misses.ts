@@ -10,8 +10,8 @@ export class NearMisses {
   private readonly units: number[] = [];
   private readonly masks: number[] = [];
 
-  constructor(scope: Scope, evaluation: Evaluation, interval?: { lower: number; upper: number }) {
-    const { masks, unmetInEveryMode } = evaluation;
+  constructor(scope: Scope, { scratch }: Evaluation, interval?: { lower: number; upper: number }) {
+    const { masks, unmetInEveryMode } = scratch;
     scope.forEach((unit) => {
       let removed = 0;
       let common = 0;

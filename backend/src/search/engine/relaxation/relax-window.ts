@@ -2,6 +2,7 @@ import type { Duty } from '@resistry/engineering/duty/duty';
 import type { Relaxation } from '../search-plan';
 import { roundedOutward, withValueAt } from './relaxable-fields';
 import type { Retrial } from './retrial';
+import type { Edge, WindowMisses } from './window-misses';
 
 /** Resistance of a unit, and the narrowest interval it takes over life, Ω. */
 export interface Reach {
@@ -17,12 +18,11 @@ const tried = 64;
 /**
  * The smallest widening of the window at one edge that brings a unit back. A unit needs at least its nominal resistance
  * inside, so units are looked at from the edge outwards, and no farther than the best found so far.
- * @param units those that only the value check removes
  */
 export function relaxWindow(
   duty: Duty,
-  edge: 'lower' | 'upper',
-  units: readonly number[],
+  edge: Edge,
+  misses: WindowMisses,
   reach: Reach,
   retrial: Retrial,
 ): Relaxation | undefined {
@@ -30,7 +30,8 @@ export function relaxWindow(
   if (window === undefined || window.lower === 0) return undefined;
   const sign = edge === 'upper' ? 1 : -1;
   const outer = (ends: { low: number; high: number }): number => (edge === 'upper' ? ends.high : ends.low);
-  const byNominal = units
+  const byNominal = misses
+    .nearest(edge)
     .map((unit) => ({ unit, nominal: reach.nominal(unit) }))
     .filter(({ nominal }) => (edge === 'upper' ? nominal.low >= window.lower : nominal.high <= window.upper))
     .map(({ unit, nominal }) => ({ unit, nominal: outer(nominal) }))
@@ -52,7 +53,6 @@ export function relaxWindow(
     if (retrial.met(withValueAt(duty, pointer, to), [unit]).length === 1) best = to;
   }
   if (best === undefined) return undefined;
-  const to = best;
-  const within = byNominal.filter(({ nominal }) => sign * (nominal - to) <= 0).map(({ unit }) => unit);
-  return { field: pointer, to, gains: retrial.met(withValueAt(duty, pointer, to), within).length };
+  const gains = retrial.met(withValueAt(duty, pointer, best), misses.within(edge, best)).length;
+  return { field: pointer, to: best, gains };
 }

@@ -2,9 +2,10 @@ import { judge } from '@resistry/engineering/assessment/judge';
 import { settle } from '@resistry/engineering/operating/settle';
 import type { CatalogueIndex } from '../../index/catalogue-index';
 import { candidateAt } from '../candidate-at';
-import { conditionsOfRow, type Evaluation, type Scratch } from '../evaluation';
+import { conditionsOfRow, type Evaluation } from '../evaluation';
 import { rowOfPosition } from '../row-of-position';
 import type { Scope } from '../scope';
+import type { Scratch } from '../scratch';
 import type { Relaxation } from '../search-plan';
 import { bitsDependingOn, NearMisses } from './near-misses';
 import { choicesOf, relaxChoice } from './relax-choice';
@@ -12,6 +13,7 @@ import { relaxNumber } from './relax-number';
 import { relaxWindow, type Reach } from './relax-window';
 import { relaxableFields } from './relaxable-fields';
 import { Retrial } from './retrial';
+import { NumbersOutside, PartsOutside } from './window-misses';
 
 /**
  * For each demand that keeps units out by itself, the smallest change that brings some back and how many: searching
@@ -26,18 +28,24 @@ export function relaxationsOf(
   const { checks, requirement } = evaluation;
   const { duty, window } = requirement;
   const retrial = new Retrial(index, scope, evaluation, scratch);
-  const valueBit = checks.find(({ definition }) => definition.name === 'value')?.bit ?? 0;
+  const { valueBit } = evaluation;
   // Only a change of the window itself, or of the limits it follows from, brings back what lies outside it.
-  const everywhere = valueBit === 0 ? undefined : new NearMisses(scope, evaluation);
+  const everywhere =
+    valueBit === 0 || !(scope.byCompanyNumber || duty.limits !== undefined)
+      ? undefined
+      : new NearMisses(scope, evaluation);
   const inWindow = new NearMisses(scope, evaluation, window);
   const nearness = nearnessOf(index, scope, evaluation);
   const found: (Relaxation | undefined)[] = [];
-  if (everywhere !== undefined && !requirement.link) {
-    const units = everywhere.removedOnlyBy(valueBit);
+  if (duty.window !== undefined && !requirement.link) {
+    const outside =
+      everywhere === undefined
+        ? new PartsOutside(index, scope, evaluation)
+        : new NumbersOutside(everywhere, valueBit);
     const reach = reachOf(index, scope, evaluation);
     found.push(
-      relaxWindow(duty, 'lower', units, reach, retrial),
-      relaxWindow(duty, 'upper', units, reach, retrial),
+      relaxWindow(duty, 'lower', outside, reach, retrial),
+      relaxWindow(duty, 'upper', outside, reach, retrial),
     );
   }
   for (const field of relaxableFields) {

@@ -3,9 +3,10 @@ import type { Duty } from '@resistry/engineering/duty/duty';
 import { requirementOf, type Requirement } from '@resistry/engineering/duty/requirement';
 import type { CatalogueRow } from '../../index/catalogue-columns';
 import type { CatalogueIndex } from '../../index/catalogue-index';
-import { evaluateRows, type Evaluation, type Scratch } from '../evaluation';
+import { evaluateRows, type Evaluation } from '../evaluation';
 import { rowOfPosition } from '../row-of-position';
 import type { Scope } from '../scope';
+import type { Scratch } from '../scratch';
 
 /** Tries a loosened duty on single units without touching the masks of the search itself. */
 export class Retrial {
@@ -21,13 +22,9 @@ export class Retrial {
     const requirement = possibleRequirement(duty);
     if (requirement === undefined || units.length === 0) return [];
     const positions = units.flatMap((unit) => this.scope.positionsOf(unit));
-    const { masks } = evaluateRows(
-      this.index,
-      this.slices(positions),
-      requirement,
-      this.evaluation.policy,
-      this.scratch,
-    );
+    const { policy } = this.evaluation;
+    evaluateRows(this.index, this.slices(positions), requirement, policy, this.scratch, 'all parts');
+    const { masks } = this.scratch;
     const isMet = (position: number): boolean => masks.unmet[position] === 0 && masks.unrated[position] === 0;
     return units.filter((unit) => this.scope.positionsOf(unit).every(isMet));
   }

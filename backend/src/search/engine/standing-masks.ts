@@ -1,0 +1,57 @@
+import { wantedApprovals } from '@resistry/engineering/checks/approval';
+import { wantedSupply } from '@resistry/engineering/checks/supply';
+import type { Requirement } from '@resistry/engineering/duty/requirement';
+import type { AskedCheck } from '@resistry/engineering/range-search/asked-checks';
+import { approvals, supplyStatuses } from '@resistry/engineering/ratings/technology';
+import type { CatalogueColumns } from '../index/catalogue-columns';
+import type { Scratch } from './scratch';
+
+/** Bits of the standing checks that are unmet, by key of approval, supply status and second source. */
+export type StandingMasks = Uint32Array;
+
+function keyOf(approval: number, supply: number, secondSource: number): number {
+  return approval | (supply << 3) | (secondSource << 5);
+}
+
+export function standingMasks(requirement: Requirement, checks: readonly AskedCheck[]): StandingMasks {
+  const bitOf = (name: string): number => checks.find((check) => check.definition.name === name)?.bit ?? 0;
+  const wanted = { approvals: wantedApprovals(requirement), supply: wantedSupply(requirement) };
+  const masks = new Uint32Array(64);
+  for (const [approval, approvalName] of approvals.entries()) {
+    for (const [supply, supplyName] of supplyStatuses.entries()) {
+      for (const secondSource of [0, 1]) {
+        masks[keyOf(approval, supply, secondSource)] =
+          (wanted.approvals.includes(approvalName) ? 0 : bitOf('approval')) |
+          (wanted.supply.includes(supplyName) ? 0 : bitOf('supply')) |
+          (secondSource === 1 ? 0 : bitOf('second-source'));
+      }
+    }
+  }
+  return masks;
+}
+
+/** Bits of the standing checks that the part at a position does not meet. */
+export function unmetStanding(columns: CatalogueColumns, masks: StandingMasks, position: number): number {
+  const key = keyOf(
+    columns.approval[position] ?? 0,
+    columns.supply[position] ?? 0,
+    columns.secondSource[position] ?? 0,
+  );
+  return masks[key] ?? 0;
+}
+
+/** Adds the standing checks to what the ratings of the parts at [from, to) gave. */
+export function addStanding(
+  columns: CatalogueColumns,
+  standing: StandingMasks,
+  { masks, unmetInEveryMode }: Scratch,
+  from: number,
+  to: number,
+): void {
+  for (let position = from; position < to; position += 1) {
+    const unmet = unmetStanding(columns, standing, position);
+    if (unmet === 0) continue;
+    masks.unmet[position] = (masks.unmet[position] ?? 0) | unmet;
+    unmetInEveryMode[position] = (unmetInEveryMode[position] ?? 0) | unmet;
+  }
+}
