@@ -75,7 +75,7 @@ describe('access tokens', () => {
     const administrator = await application.people.signIn('administrator');
     const person = await application.people.signIn('designer');
     await person.get('/api/users').expect(403);
-    const roles = { roles: ['designer', 'administrator'], version: 1 };
+    const roles = { roles: ['designer', 'administrator'], version: 1, reason: 'Stands in' };
     await administrator.put(`/api/users/${person.person.id}/roles`, roles).expect(200);
     await person.get('/api/users').expect(200);
   });

@@ -74,6 +74,20 @@ describe('changing the approval of a part', () => {
     expect(letter?.text).toContain(`/parts/${id}`);
   });
 
+  it('takes a reason of several lines, and writes it so in the letter', async () => {
+    const { id } = await readyPart();
+    const reason = 'Two things:\n- cracks when bent\n- drifts';
+    const answer = await engineer
+      .post(`/api/parts/${id}/approval`, { to: 'withdrawn', reason, version: 1 })
+      .expect(200);
+    expect((answer.body as { approvalHistory: object[] }).approvalHistory[0]).toMatchObject({ reason });
+    await application.delivered();
+    const letters = await lettersTo(administrator, librarian.person.email);
+    expect(
+      letters.some(({ text }) => text.includes('  Two things:\n  - cracks when bent\n  - drifts\n')),
+    ).toBe(true);
+  });
+
   it('is not for whoever entered the part', async () => {
     const both = await application.people.signIn('component-engineer', 'librarian');
     const id = await catalogue.part({
@@ -159,6 +173,8 @@ describe('changing the approval of a part', () => {
     [{}, ['/reason', '/to', '/version']],
     [{ to: 'drafted', reason: 'r', version: 1 }, ['/to']],
     [{ to: 'approved', reason: ' ', version: 1 }, ['/reason']],
+    [{ to: 'approved', reason: ' \n\t', version: 1 }, ['/reason']],
+    [{ to: 'approved', reason: 'bell \u0007', version: 1 }, ['/reason']],
     [{ to: 'approved', reason: 'r'.repeat(1001), version: 1 }, ['/reason']],
     [{ to: 'approved', reason: 'r', version: '1' }, ['/version']],
     [{ to: 'approved', reason: 'r', version: 0 }, ['/version']],

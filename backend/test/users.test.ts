@@ -30,7 +30,7 @@ describe('keeping accounts', () => {
 
   it('changes roles and writes that down', async () => {
     const answer = await administrator
-      .put(path('roles'), { roles: ['purchasing', 'librarian'], version: 1 })
+      .put(path('roles'), { roles: ['purchasing', 'librarian'], version: 1, reason })
       .expect(200);
     expect(answer.body).toMatchObject({ roles: ['librarian', 'purchasing'], version: 2 });
     const audit = await administrator
@@ -42,13 +42,16 @@ describe('keeping accounts', () => {
         actorId: administrator.person.id,
         before: { roles: ['designer'] },
         after: { roles: ['librarian', 'purchasing'] },
+        reason,
       }),
     ]);
   });
 
   it('refuses a stale edit and changes nothing', async () => {
-    await administrator.put(path('roles'), { roles: ['librarian'], version: 1 }).expect(200);
-    const stale = await administrator.put(path('roles'), { roles: ['purchasing'], version: 1 }).expect(409);
+    await administrator.put(path('roles'), { roles: ['librarian'], version: 1, reason }).expect(200);
+    const stale = await administrator
+      .put(path('roles'), { roles: ['purchasing'], version: 1, reason })
+      .expect(409);
     expect((stale.body as ProblemBody).type).toBe('urn:resistry:problem:stale');
     const now = await administrator.get(`/api/users/${person.person.id}`);
     expect(now.body).toMatchObject({ roles: ['librarian'], version: 2 });
@@ -60,7 +63,9 @@ describe('keeping accounts', () => {
     [{ roles: 'designer', version: 1 }, '/roles'],
     [{ roles: ['designer'] }, '/version'],
     [{ roles: ['designer'], version: '1' }, '/version'],
-    [{ roles: ['designer'], version: 1, state: 'active' }, '/state'],
+    [{ roles: ['designer'], version: 1, reason: 'r', state: 'active' }, '/state'],
+    [{ roles: ['designer'], version: 1 }, '/reason'],
+    [{ roles: ['designer'], version: 1, reason: ' \n' }, '/reason'],
   ])('refuses the roles %j', async (body, pointer) => {
     const answer = await administrator.put(path('roles'), body).expect(400);
     expect((answer.body as ProblemBody).errors?.map((error) => error.pointer)).toContain(pointer);
@@ -88,19 +93,19 @@ describe('keeping accounts', () => {
 
   it('keeps the last administrator', async () => {
     const second = await application.people.signIn('administrator');
-    const body = { roles: ['designer'], version: 1 };
+    const body = { roles: ['designer'], version: 1, reason };
     await second.put(path('roles', administrator.person.id), body).expect(200);
     const answer = await second.put(path('roles', second.person.id), body).expect(422);
     expect((answer.body as ProblemBody).detail).toContain('nobody who can administer');
     await second
-      .put(path('roles', administrator.person.id), { roles: ['administrator'], version: 2 })
+      .put(path('roles', administrator.person.id), { roles: ['administrator'], version: 2, reason })
       .expect(200);
   });
 
   it('lets nobody but administrators do any of it', async () => {
     for (const answer of [
       await person.get('/api/users'),
-      await person.put(path('roles'), { roles: ['administrator'], version: 1 }),
+      await person.put(path('roles'), { roles: ['administrator'], version: 1, reason }),
       await person.post(path('deactivate', administrator.person.id), { reason, version: 1 }),
     ]) {
       expect(answer.status).toBe(403);

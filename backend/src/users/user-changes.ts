@@ -24,12 +24,16 @@ export class UserChanges {
   ) {}
 
   /** @throws ClashProblem when no administrator would be left */
-  async changeRoles(actor: Person, id: number, roles: readonly Role[], version: number): Promise<void> {
+  async changeRoles(
+    actor: Person,
+    id: number,
+    { roles, version, reason }: { roles: readonly Role[]; version: number; reason: string },
+  ): Promise<void> {
     await this.change(actor, 'change-roles', id, version, async (transaction, user) => {
       const before = await rolesOf(transaction, user.id);
       await this.accounts.setRoles(transaction, user.id, roles);
       const after = await rolesOf(transaction, user.id);
-      return { before: { roles: before }, after: { roles: after } };
+      return { before: { roles: before }, after: { roles: after }, reason };
     });
   }
 

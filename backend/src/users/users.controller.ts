@@ -53,7 +53,7 @@ export class UsersController {
     @Body() body: NewRoles,
     @CurrentPerson() person: Person,
   ): Promise<UserDetails> {
-    await this.changes.changeRoles(person, id, body.roles, body.version);
+    await this.changes.changeRoles(person, id, body);
     return this.queries.find(id);
   }
 

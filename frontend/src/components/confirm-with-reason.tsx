@@ -1,21 +1,12 @@
 import { Dialog, Portal, chakra } from '@chakra-ui/react';
 import { Form, Formik } from 'formik';
 import type { ReactNode } from 'react';
-import { type ObjectShape, object, string } from 'yup';
+import { type ObjectShape, object } from 'yup';
 import { problemOf } from '../api/problem';
 import { Button } from './button';
 import { FormField } from './form-field';
 import { FormRefusal } from './form-refusal';
-
-/** As the server takes it. */
-const shortestReason = 3;
-const longestReason = 500;
-
-const reason = string()
-  .trim()
-  .required('Say why; it stands in the history.')
-  .min(shortestReason, `At least ${shortestReason} characters.`)
-  .max(longestReason, `At most ${longestReason} characters.`);
+import { reasonRule } from './reason-rule';
 
 export interface ConfirmWithReasonProps<Values extends Record<string, string>> {
   title: string;
@@ -47,7 +38,7 @@ export function ConfirmWithReason<Values extends Record<string, string>>(
             <Dialog.Body>
               <Formik
                 initialValues={{ ...initialValues, reason: '' }}
-                validationSchema={object({ ...rules, reason })}
+                validationSchema={object({ ...rules, reason: reasonRule })}
                 onSubmit={(values) =>
                   onConfirm({ ...values, reason: values.reason.trim() }).then(onClose, () => undefined)
                 }

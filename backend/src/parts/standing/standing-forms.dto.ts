@@ -5,17 +5,12 @@ import {
   supplyStatuses,
   type SupplyStatus,
 } from '@resistry/engineering/ratings/technology';
-import { IsIn, IsInt, IsOptional, IsString, Max, MaxLength, Min } from 'class-validator';
+import { IsIn, IsInt, IsOptional, IsString, Max, Min } from 'class-validator';
 import { Day } from '../../common/validation/day';
-import { Filled } from '../../common/validation/filled';
-
-const LONGEST = 1000;
+import { Prose } from '../../common/validation/prose';
 
 class ReasonedForm {
-  @ApiProperty({ maxLength: LONGEST })
-  @IsString()
-  @Filled()
-  @MaxLength(LONGEST)
+  @Prose()
   reason: string;
 
   @ApiProperty({ type: 'integer', minimum: 1, description: 'Version of the part that the change is made on' })
@@ -30,28 +25,13 @@ export class ApprovalChangeForm extends ReasonedForm {
   @IsIn(approvals)
   to: Approval;
 
-  @ApiPropertyOptional({ maxLength: LONGEST, description: 'Of a restriction: what the part may be used for' })
-  @IsOptional()
-  @IsString()
-  @Filled()
-  @MaxLength(LONGEST)
+  @Prose({ optional: true, description: 'Of a restriction: what the part may be used for' })
   words?: string;
 
-  @ApiPropertyOptional({ maxLength: LONGEST, description: 'Of a restriction: where it holds' })
-  @IsOptional()
-  @IsString()
-  @Filled()
-  @MaxLength(LONGEST)
+  @Prose({ optional: true, description: 'Of a restriction: where it holds' })
   scope?: string;
 
-  @ApiPropertyOptional({
-    maxLength: LONGEST,
-    description: 'Of a promotion: why one source will do',
-  })
-  @IsOptional()
-  @IsString()
-  @Filled()
-  @MaxLength(LONGEST)
+  @Prose({ optional: true, description: 'Of a promotion: why one source will do' })
   exception?: string;
 }
 

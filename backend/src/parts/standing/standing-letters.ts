@@ -77,7 +77,7 @@ export class StandingLetters {
           `${name} ${event}.`,
           `Changed by ${actor.name}, who gave this reason:`,
           '',
-          `  ${reason}`,
+          ...reason.split(/\r?\n/).map((line) => `  ${line}`),
           '',
           ...(request === undefined ? [] : [request, '']),
           `${this.environment.appUrl}/parts/${part.id}`,

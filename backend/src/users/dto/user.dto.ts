@@ -1,15 +1,6 @@
 import { ApiProperty } from '@nestjs/swagger';
-import {
-  ArrayMaxSize,
-  ArrayMinSize,
-  ArrayUnique,
-  IsArray,
-  IsIn,
-  IsInt,
-  IsString,
-  Length,
-  Min,
-} from 'class-validator';
+import { ArrayMaxSize, ArrayMinSize, ArrayUnique, IsArray, IsIn, IsInt, Min } from 'class-validator';
+import { Prose } from '../../common/validation/prose';
 import { type Role, ROLES } from '../../permissions/roles';
 
 export class UserDetails {
@@ -43,14 +34,9 @@ export class UserList {
   items: UserDetails[];
 }
 
-export class NewRoles {
-  @ApiProperty({ enum: ROLES, enumName: 'Role', isArray: true })
-  @IsArray()
-  @ArrayMinSize(1)
-  @ArrayMaxSize(ROLES.length)
-  @ArrayUnique()
-  @IsIn(ROLES, { each: true, message: `roles must each be one of ${ROLES.join(', ')}` })
-  roles: Role[];
+export class ReasonedChange {
+  @Prose()
+  reason: string;
 
   @ApiProperty()
   @IsInt()
@@ -58,14 +44,12 @@ export class NewRoles {
   version: number;
 }
 
-export class ReasonedChange {
-  @ApiProperty({ minLength: 3, maxLength: 500 })
-  @IsString()
-  @Length(3, 500)
-  reason: string;
-
-  @ApiProperty()
-  @IsInt()
-  @Min(1)
-  version: number;
+export class NewRoles extends ReasonedChange {
+  @ApiProperty({ enum: ROLES, enumName: 'Role', isArray: true })
+  @IsArray()
+  @ArrayMinSize(1)
+  @ArrayMaxSize(ROLES.length)
+  @ArrayUnique()
+  @IsIn(ROLES, { each: true, message: `roles must each be one of ${ROLES.join(', ')}` })
+  roles: Role[];
 }

@@ -53,8 +53,16 @@ describe('people', () => {
     const dialog = await screen.findByRole('dialog', { name: 'Roles of O. Lind' });
     await userEvent.click(within(dialog).getByRole('checkbox', { name: 'librarian' }));
     await userEvent.click(within(dialog).getByRole('button', { name: 'Give these roles' }));
+    expect(await within(dialog).findByText(/Say why/)).toBeVisible();
+    await userEvent.type(within(dialog).getByRole('textbox', { name: 'Reason' }), 'Enters families now.');
+    await userEvent.click(within(dialog).getByRole('button', { name: 'Give these roles' }));
     await waitFor(() => expect(dialog).not.toBeInTheDocument());
-    expect(sent).toEqual([{ url: '/users/2/roles', data: { roles: ['librarian', 'designer'], version: 4 } }]);
+    expect(sent).toEqual([
+      {
+        url: '/users/2/roles',
+        data: { roles: ['librarian', 'designer'], reason: 'Enters families now.', version: 4 },
+      },
+    ]);
   });
 
   it('are invited by address and roles', async () => {

@@ -1,14 +1,17 @@
 import { Dialog, Portal } from '@chakra-ui/react';
 import { Formik } from 'formik';
 import { object } from 'yup';
+import { problemOf } from '../../api/problem';
 import { Button } from '../../components/button';
+import { FormField } from '../../components/form-field';
 import { FormRefusal } from '../../components/form-refusal';
+import { reasonRule } from '../../components/reason-rule';
 import { StackedForm } from '../../components/stacked-form';
 import { useChangeUser } from './requests/change-user';
 import type { UserDetails } from './requests/list-users';
 import { RoleChoice, someRoles } from './role-choice';
 
-const schema = object({ roles: someRoles });
+const schema = object({ roles: someRoles, reason: reasonRule });
 
 /** Gives a person these roles and no others. */
 export function RolesDialog({ user, onClose }: { user: UserDetails; onClose: () => void }) {
@@ -23,11 +26,15 @@ export function RolesDialog({ user, onClose }: { user: UserDetails; onClose: () 
             <Dialog.Description>They hold from the next thing this person does.</Dialog.Description>
             <Dialog.Body>
               <Formik
-                initialValues={{ roles: user.roles }}
+                initialValues={{ roles: user.roles, reason: '' }}
                 validationSchema={schema}
-                onSubmit={({ roles }) =>
+                onSubmit={({ roles, reason }) =>
                   change
-                    .mutateAsync({ id: user.id, change: 'roles', body: { roles, version: user.version } })
+                    .mutateAsync({
+                      id: user.id,
+                      change: 'roles',
+                      body: { roles, reason: reason.trim(), version: user.version },
+                    })
                     .then(onClose, () => undefined)
                 }
               >
@@ -35,6 +42,12 @@ export function RolesDialog({ user, onClose }: { user: UserDetails; onClose: () 
                   <StackedForm>
                     {change.isError && <FormRefusal error={change.error} />}
                     <RoleChoice />
+                    <FormField
+                      name="reason"
+                      label="Reason"
+                      multiline
+                      refusal={change.isError ? problemOf(change.error).at('/reason') : undefined}
+                    />
                     <Dialog.Footer>
                       <Button onClick={onClose}>Leave them as they are</Button>
                       <Button type="submit" variant="solid" disabled={isSubmitting}>
