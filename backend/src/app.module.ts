@@ -17,9 +17,11 @@ import { CompanyPartNumbersModule } from './company-part-numbers/company-part-nu
 import { FacetsModule } from './facets/facets.module';
 import { FamiliesModule } from './families/families.module';
 import { ManufacturersModule } from './manufacturers/manufacturers.module';
+import { OffersModule } from './offers/offers.module';
 import { PartsModule } from './parts/parts.module';
 import { PoliciesModule } from './policies/policies.module';
 import { ReviewsModule } from './reviews/reviews.module';
+import { SuppliersModule } from './suppliers/suppliers.module';
 import { TextSearchModule } from './text-search/text-search.module';
 import { HealthModule } from './health/health.module';
 import { HousekeepingModule } from './housekeeping/housekeeping.module';
@@ -54,6 +56,8 @@ export class AppModule {
         ManufacturersModule,
         FamiliesModule,
         PartsModule,
+        OffersModule,
+        SuppliersModule,
         CompanyPartNumbersModule,
         FacetsModule,
         TextSearchModule,

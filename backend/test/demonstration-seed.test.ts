@@ -167,6 +167,9 @@ describe('the demonstration', () => {
         WHERE a.subject_type = 'Part' AND a.subject_id = CAST(h.part_id AS TEXT) AND a.recorded_at = h.changed_at
           AND a.actor_id = h.changed_by AND a.after ->> 'approval' = h.to_approval)`),
     ).toBe(0);
+    expect(await count(`audit_entries WHERE action = 'create' AND subject_type = 'Offer'`)).toBe(
+      await count('offers'),
+    );
     expect(await count(`audit_entries WHERE action = 'set-supply-status'`)).toBe(
       await count('supply_history'),
     );

@@ -5,6 +5,7 @@ import { catalogue } from './migrations/0010-catalogue';
 import { parts } from './migrations/0011-parts';
 import { deratingPolicies } from './migrations/0012-derating-policies';
 import { reviewCauses } from './migrations/0013-review-causes';
+import { offerChanges } from './migrations/0014-offer-changes';
 
 /** Every migration, in order; a new one goes at the end. */
 export const migrations: readonly Migration[] = [
@@ -14,4 +15,5 @@ export const migrations: readonly Migration[] = [
   parts,
   deratingPolicies,
   reviewCauses,
+  offerChanges,
 ];

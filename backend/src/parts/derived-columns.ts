@@ -28,7 +28,7 @@ const RANGE = `(SELECT min(r.id) FROM families AS f
 export const PRICE = `(SELECT min((SELECT b.unit_price_micro FROM offer_price_breaks AS b
       WHERE b.offer_id = o.id AND b.quantity <= 1000 ORDER BY b.quantity DESC LIMIT 1))
   FROM offers AS o
-  WHERE o.part_id = parts.id AND o.minimum_order <= 1000 AND $today BETWEEN o.valid_from AND o.valid_until)`;
+  WHERE o.part_id = parts.id AND o.ended_at IS NULL AND o.minimum_order <= 1000 AND $today BETWEEN o.valid_from AND o.valid_until)`;
 
 /** Another manufacturer's approved or preferred and active part stands under the same company part number. */
 const SECOND_SOURCE = `EXISTS (SELECT 1 FROM approved_sources AS own

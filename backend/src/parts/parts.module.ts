@@ -1,5 +1,6 @@
 import { Module } from '@nestjs/common';
 import { FamiliesModule } from '../families/families.module';
+import { OfferReadingModule } from '../offers/offer-reading.module';
 import { Alternates } from './alternates/alternates.service';
 import { PartDetails } from './details/part-details';
 import { PartPurchasingReading } from './details/part-purchasing-reading';
@@ -19,7 +20,7 @@ import { SupplyChanges } from './standing/supply-changes';
 import { PartReadingModule } from './summary/part-reading.module';
 
 @Module({
-  imports: [FamiliesModule, PartReadingModule],
+  imports: [FamiliesModule, OfferReadingModule, PartReadingModule],
   controllers: [PartsController, StandingController],
   providers: [
     Alternates,

@@ -13,6 +13,7 @@ export const ACTIONS = [
   'publish',
   'set-supply-status',
   'set-last-order-date',
+  'end',
   'invite',
   'change-roles',
   'deactivate',

@@ -1,5 +1,6 @@
 import type { Transaction } from 'sequelize';
 import type { Writer } from '../database/writer';
+import { pricesSql } from '../offers/offer-record';
 
 /** What was entered, with the state it then had. */
 const ENTERED = `SELECT entered_at AS at, entered_by AS actor, 'create' AS action, 'Manufacturer' AS kind, id,
@@ -18,6 +19,12 @@ const ENTERED = `SELECT entered_at AS at, entered_by AS actor, 'create' AS actio
   UNION ALL
   SELECT c.entered_at, c.entered_by, 'create', 'CompanyPartNumber', c.id, NULL,
     json_object('number', c.number, 'description', c.description), NULL FROM company_part_numbers AS c
+  UNION ALL
+  SELECT o.entered_at, o.entered_by, 'create', 'Offer', o.id, NULL,
+    json_object('part', p.manufacturer_part_number, 'supplier', s.name, 'packaging', o.packaging_code,
+      'minimumOrder', o.minimum_order, 'orderMultiple', o.order_multiple, 'leadTimeDays', o.lead_time_days,
+      'validFrom', o.valid_from, 'validUntil', o.valid_until, 'prices', json(${pricesSql})), NULL
+    FROM offers AS o JOIN parts AS p ON p.id = o.part_id JOIN suppliers AS s ON s.id = o.supplier_id
   UNION ALL
   SELECT v.entered_at, v.entered_by, 'create', 'Policy', v.policy_id, NULL,
     json_object('version', v.number, 'state', 'draft'), v.note

@@ -13,6 +13,8 @@ export interface FormFieldProps {
   placeholder?: string;
   /** Several lines, for words rather than a word. */
   multiline?: boolean;
+  /** What was understood, shown while it is being typed. */
+  echo?: string;
   /** What the server said about this entry; goes once it is changed. */
   refusal?: string;
 }
@@ -22,6 +24,7 @@ export function FormField({
   name,
   label,
   multiline = false,
+  echo,
   refusal,
   type = 'text',
   ...attributes
@@ -34,10 +37,10 @@ export function FormField({
     ...attributes,
     id,
     'aria-invalid': error === undefined ? undefined : true,
-    'aria-describedby': describedBy(id, undefined, error),
+    'aria-describedby': describedBy(id, echo, error),
   };
   return (
-    <FieldRow label={label} controlId={id} error={error} stacked>
+    <FieldRow label={label} controlId={id} echo={echo} error={error} stacked>
       {multiline ? <TextArea {...common} rows={4} /> : <TextInput {...common} type={type} size="form" />}
     </FieldRow>
   );

@@ -62,6 +62,7 @@ export function examplePartDetails(rest: Partial<PartDetails> = {}): PartDetails
         priceBreaks: [{ quantity: 1000, unitPrice: 0.006 }],
         enteredBy: librarian,
         enteredAt: '2026-11-04T08:00:00.000Z',
+        version: 1,
       },
     ],
     approvalHistory: [

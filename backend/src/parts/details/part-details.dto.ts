@@ -4,7 +4,8 @@ import { RatingsDto } from '../../assessments/dto/ratings.dto';
 import { PersonRefDto } from '../../common/reading/person-ref.dto';
 import { CertificateDto, CitationDto, DatasheetRefDto, DeclarationDto } from '../../families/dto/papers.dto';
 import { PartSummaryDto } from '../summary/part-summary.dto';
-import { OfferDto, OrderingCodeDto, SourceDto } from './purchasing.dto';
+import { OfferDto } from '../../offers/dto/offer.dto';
+import { OrderingCodeDto, SourceDto } from './purchasing.dto';
 import { ApprovalStepDto, OpenReviewDto, RestrictionDto, SupplyStepDto } from './standing.dto';
 
 export class PartModeDto {

@@ -2,6 +2,7 @@ import { Injectable } from '@nestjs/common';
 import { NotFoundProblem } from '../../common/problems/problems';
 import { Readers } from '../../database/readers';
 import { FamilyPapers } from '../../families/family-papers';
+import { OfferReading } from '../../offers/offer-reading';
 import { modesOfPart } from '../ratings/size-ratings';
 import { SizeRatingsReader } from '../ratings/size-ratings-reader';
 import { PartSummaries, presentPartSummary, type PartRow } from '../summary/part-summaries';
@@ -48,6 +49,7 @@ export class PartDetails {
     private readonly sizeRatings: SizeRatingsReader,
     private readonly papers: FamilyPapers,
     private readonly purchasing: PartPurchasingReading,
+    private readonly offerReading: OfferReading,
     private readonly standing: PartStandingReading,
   ) {}
 
@@ -65,7 +67,7 @@ export class PartDetails {
         orderedPartOf(summary),
       ),
       summary.company_part_number_id === null ? [] : this.purchasing.sources(summary.company_part_number_id),
-      this.purchasing.offers(id),
+      this.offerReading.ofPart(id),
       this.papers.declarations(summary.family_id),
       this.papers.certificates(summary.family_id, summary.size_id),
     ]);

@@ -5,7 +5,6 @@ import {
   type Approval,
   type SupplyStatus,
 } from '@resistry/engineering/ratings/technology';
-import { PersonRefDto } from '../../common/reading/person-ref.dto';
 import { NamedDto } from '../summary/part-summary.dto';
 
 export class OrderingCodeDto {
@@ -50,53 +49,4 @@ export class SourceDto {
 
   @ApiPropertyOptional({ description: 'Day, ISO 8601' })
   lastOrderOn?: string;
-}
-
-export class PriceBreakDto {
-  @ApiProperty({ description: 'From so many pieces' })
-  quantity: number;
-
-  @ApiProperty({ description: 'A piece, in the currency of the offer' })
-  unitPrice: number;
-}
-
-export class OfferDto {
-  @ApiProperty()
-  id: number;
-
-  @ApiProperty({ type: NamedDto })
-  supplier: NamedDto;
-
-  @ApiProperty({ description: 'Code of the packaging' })
-  packaging: string;
-
-  @ApiProperty({ enum: ['EUR'] })
-  currency: 'EUR';
-
-  @ApiProperty({ description: 'Pieces' })
-  minimumOrder: number;
-
-  @ApiProperty({ description: 'Pieces; orders are multiples of it' })
-  orderMultiple: number;
-
-  @ApiProperty()
-  leadTimeDays: number;
-
-  @ApiProperty({ description: 'First day, ISO 8601' })
-  validFrom: string;
-
-  @ApiProperty({ description: 'Last day, ISO 8601' })
-  validUntil: string;
-
-  @ApiProperty({ description: 'Today lies between its first and its last day' })
-  inForce: boolean;
-
-  @ApiProperty({ type: [PriceBreakDto] })
-  priceBreaks: PriceBreakDto[];
-
-  @ApiProperty({ type: PersonRefDto })
-  enteredBy: PersonRefDto;
-
-  @ApiProperty({ description: 'ISO 8601' })
-  enteredAt: string;
 }

@@ -25,8 +25,8 @@ export const partStandingSql = `
     p.restriction_scope, p.supply, p.last_order_on, p.entered_by, p.version, p.derived_second_source AS second_source,
     EXISTS (SELECT 1 FROM families AS f JOIN family_revisions AS r ON r.id = f.current_revision_id
       WHERE f.id = p.family_id AND r.datasheet_id IS NOT NULL) AS datasheet,
-    EXISTS (SELECT 1 FROM offers AS o WHERE o.part_id = p.id AND $today BETWEEN o.valid_from AND o.valid_until)
-      AS offer_in_force,
+    EXISTS (SELECT 1 FROM offers AS o WHERE o.part_id = p.id AND o.ended_at IS NULL
+        AND $today BETWEEN o.valid_from AND o.valid_until) AS offer_in_force,
     (SELECT count(*) FROM reviews AS v WHERE v.part_id = p.id AND v.state = 'open') AS open_reviews
   FROM parts AS p LEFT JOIN approved_sources AS a ON a.part_id = p.id
     LEFT JOIN company_part_numbers AS c ON c.id = a.company_part_number_id

@@ -635,6 +635,74 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/api/offers": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Enter what a supplier offers for a part */
+        post: operations["enterOffer"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/offers/{id}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        /** Change the terms of an offer */
+        put: operations["changeOffer"];
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/offers/{id}/end": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** End an offer; it stays on record */
+        post: operations["endOffer"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/suppliers": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** All suppliers, by name */
+        get: operations["listSuppliers"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/api/company-part-numbers": {
         parameters: {
             query?: never;
@@ -951,7 +1019,7 @@ export interface components {
             password: string;
         };
         /** @enum {string} */
-        Action: "read" | "compute" | "create" | "update" | "submit" | "return" | "approve" | "promote" | "restrict" | "withdraw" | "publish" | "set-supply-status" | "set-last-order-date" | "invite" | "change-roles" | "deactivate" | "reactivate" | "manage";
+        Action: "read" | "compute" | "create" | "update" | "submit" | "return" | "approve" | "promote" | "restrict" | "withdraw" | "publish" | "set-supply-status" | "set-last-order-date" | "end" | "invite" | "change-roles" | "deactivate" | "reactivate" | "manage";
         /** @enum {string} */
         Subject: "Account" | "Search" | "Part" | "Family" | "Manufacturer" | "CompanyPartNumber" | "Offer" | "Review" | "Policy" | "User" | "Permission" | "AuditEntry" | "Mail" | "OutboxMessage" | "Backup";
         PermissionRow: {
@@ -1054,8 +1122,9 @@ export interface components {
             items: components["schemas"]["UserDetails"][];
         };
         NewRoles: {
-            roles: components["schemas"]["Role"][];
+            reason: string;
             version: number;
+            roles: components["schemas"]["Role"][];
         };
         ReasonedChange: {
             reason: string;
@@ -1583,12 +1652,16 @@ export interface components {
             validFrom: string;
             /** @description Last day, ISO 8601 */
             validUntil: string;
-            /** @description Today lies between its first and its last day */
+            /** @description Today lies between its first and its last day, and nobody has ended it */
             inForce: boolean;
             priceBreaks: components["schemas"]["PriceBreakDto"][];
             enteredBy: components["schemas"]["PersonRefDto"];
             /** @description ISO 8601 */
             enteredAt: string;
+            /** @description ISO 8601; absent where nobody has ended it */
+            endedAt?: string;
+            /** @description Send it with a change */
+            version: number;
         };
         RestrictionDto: {
             words: string;
@@ -1801,7 +1874,7 @@ export interface components {
              * @description What it is called in the table of rules
              * @enum {string}
              */
-            action: "read" | "compute" | "create" | "update" | "submit" | "return" | "approve" | "promote" | "restrict" | "withdraw" | "publish" | "set-supply-status" | "set-last-order-date" | "invite" | "change-roles" | "deactivate" | "reactivate" | "manage";
+            action: "read" | "compute" | "create" | "update" | "submit" | "return" | "approve" | "promote" | "restrict" | "withdraw" | "publish" | "set-supply-status" | "set-last-order-date" | "end" | "invite" | "change-roles" | "deactivate" | "reactivate" | "manage";
             /** @description The rules let the person who asks do this to this part */
             allowed: boolean;
             forbiddenBy?: components["schemas"]["ForbiddenByDto"];
@@ -1815,7 +1888,7 @@ export interface components {
              * @description What it is called in the table of rules
              * @enum {string}
              */
-            action: "read" | "compute" | "create" | "update" | "submit" | "return" | "approve" | "promote" | "restrict" | "withdraw" | "publish" | "set-supply-status" | "set-last-order-date" | "invite" | "change-roles" | "deactivate" | "reactivate" | "manage";
+            action: "read" | "compute" | "create" | "update" | "submit" | "return" | "approve" | "promote" | "restrict" | "withdraw" | "publish" | "set-supply-status" | "set-last-order-date" | "end" | "invite" | "change-roles" | "deactivate" | "reactivate" | "manage";
             /** @description The rules let the person who asks do this to this part */
             allowed: boolean;
             forbiddenBy?: components["schemas"]["ForbiddenByDto"];
@@ -1855,6 +1928,55 @@ export interface components {
             to: "active" | "not-recommended" | "last-time-buy" | "discontinued";
             /** @description Day, ISO 8601; a last-time buy needs it */
             lastOrderDate?: string;
+        };
+        PriceBreakForm: {
+            /** @description From so many pieces */
+            quantity: number;
+            /** @description EUR a piece, in whole millionths */
+            unitPrice: number;
+        };
+        NewOfferForm: {
+            reason: string;
+            supplierId: number;
+            /** @description Code of a packaging of the part’s size */
+            packaging: string;
+            /** @description Pieces; a multiple of the order multiple */
+            minimumOrder: number;
+            /** @description Pieces; orders are multiples of it */
+            orderMultiple: number;
+            leadTimeDays: number;
+            /** @description First day, ISO 8601 */
+            validFrom: string;
+            /** @description Last day, ISO 8601 */
+            validUntil: string;
+            priceBreaks: components["schemas"]["PriceBreakForm"][];
+            partId: number;
+        };
+        OfferChangeForm: {
+            reason: string;
+            supplierId: number;
+            /** @description Code of a packaging of the part’s size */
+            packaging: string;
+            /** @description Pieces; a multiple of the order multiple */
+            minimumOrder: number;
+            /** @description Pieces; orders are multiples of it */
+            orderMultiple: number;
+            leadTimeDays: number;
+            /** @description First day, ISO 8601 */
+            validFrom: string;
+            /** @description Last day, ISO 8601 */
+            validUntil: string;
+            priceBreaks: components["schemas"]["PriceBreakForm"][];
+            /** @description Version of the offer that the change is made on */
+            version: number;
+        };
+        OfferEndForm: {
+            reason: string;
+            /** @description Version of the offer that is ended */
+            version: number;
+        };
+        SupplierList: {
+            items: components["schemas"]["NamedDto"][];
         };
         CompanyPartNumberSummaryDto: {
             id: number;
@@ -4118,6 +4240,226 @@ export interface operations {
                 };
             };
             422: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+        };
+    };
+    enterOffer: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["NewOfferForm"];
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["OfferDto"];
+                };
+            };
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            422: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+        };
+    };
+    changeOffer: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: number;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["OfferChangeForm"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["OfferDto"];
+                };
+            };
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            409: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            422: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+        };
+    };
+    endOffer: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: number;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["OfferEndForm"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["OfferDto"];
+                };
+            };
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            409: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            422: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+        };
+    };
+    listSuppliers: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["SupplierList"];
+                };
+            };
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemDocument"];
+                };
+            };
+            403: {
                 headers: {
                     [name: string]: unknown;
                 };

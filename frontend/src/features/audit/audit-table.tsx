@@ -10,7 +10,10 @@ import type { AuditEntry } from './requests/list-audit';
 const pages: Record<string, string> = { Part: '/parts/', Family: '/families/' };
 
 function Subject({ entry }: { entry: AuditEntry }) {
-  const words = `${subjectWords(entry.subjectType)} ${entry.subjectId}`;
+  // An offer is known by its part, which stays the same and so stands in no line of what changed.
+  const part = entry.subjectType === 'Offer' ? (entry.after?.part ?? entry.before?.part) : undefined;
+  const of = typeof part === 'string' ? ` for ${part}` : '';
+  const words = `${subjectWords(entry.subjectType)} ${entry.subjectId}${of}`;
   const page = pages[entry.subjectType];
   return page === undefined ? <>{words}</> : <Link to={`${page}${entry.subjectId}`}>{words}</Link>;
 }

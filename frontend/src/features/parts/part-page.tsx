@@ -2,6 +2,7 @@ import { chakra } from '@chakra-ui/react';
 import { useCallback, useMemo } from 'react';
 import { Link, useParams } from 'react-router-dom';
 import { Failed, Loading } from '../../components/states';
+import { OffersSection } from '../offers/offers-section';
 import { usePolicies } from '../policies/requests/list-policies';
 import { readDuty } from '../search/duty/read-duty';
 import { type FindState, writeFind } from '../search/find-address';
@@ -23,7 +24,7 @@ import { AssessmentSection } from './sections/assessment-section';
 import { HistorySection } from './sections/history-section';
 import { MarkingSection } from './sections/marking-section';
 import { PapersSection } from './sections/papers-section';
-import { OffersSection, SourcesSection } from './sections/purchasing-section';
+import { SourcesSection } from './sections/sources-section';
 import { RatingsSection } from './sections/ratings-section';
 import { StandingActions } from './standing/standing-actions';
 
