@@ -4,6 +4,7 @@ import cookieParser from 'cookie-parser';
 import { Logger } from 'nestjs-pino';
 import { AppModule } from './app.module';
 import { apiHeaders } from './common/http/api-headers';
+import { compressAnswers } from './common/http/compress-answers';
 import { giveRequestId } from './common/http/request-id';
 import { securityHeaders } from './common/http/security-headers';
 import { servePages } from './common/http/serve-pages';
@@ -37,7 +38,7 @@ export async function createApplication(
   application.setGlobalPrefix('api');
   application.use(giveRequestId);
   application.use(securityHeaders(options.pagesDirectory, environment.servedOverTls));
-  application.use('/api', apiHeaders);
+  application.use('/api', apiHeaders, compressAnswers);
   servePages(application, options.pagesDirectory);
   application.useBodyParser('json', { limit: LARGEST_JSON, strict: true });
   application.use(cookieParser());
