@@ -1,5 +1,5 @@
 import { createHash } from 'node:crypto';
-import { mkdirSync, mkdtempSync, rmSync, writeFileSync } from 'node:fs';
+import { mkdirSync, mkdtempSync, rmSync, utimesSync, writeFileSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import { brotliCompressSync, gzipSync } from 'node:zlib';
@@ -35,6 +35,7 @@ describe('the pages', () => {
       expect(answer.text).toBe(INDEX);
       expect(answer.get('Content-Type')).toContain('text/html');
       expect(answer.get('Cache-Control')).toBe('no-cache');
+      expect(answer.get('Content-Encoding')).toBeUndefined();
     },
   );
 
@@ -62,6 +63,23 @@ describe('the pages', () => {
     expect(answer.get('Content-Type')).toContain('javascript');
     expect(answer.get('Vary')).toContain('Accept-Encoding');
     expect(answer.get('Cache-Control')).toContain('immutable');
+  });
+
+  it('come uncompressed where what lies beside a file is older than it', async () => {
+    const file = join(pages, 'assets', 'app-9z.js');
+    writeFileSync(`${file}.br`, brotliCompressSync('the old one'));
+    writeFileSync(`${file}.gz`, gzipSync('the old one'));
+    writeFileSync(file, 'the new one');
+    const hourAgo = new Date(Date.now() - 3_600_000);
+    utimesSync(`${file}.br`, hourAgo, hourAgo);
+    utimesSync(`${file}.gz`, hourAgo, hourAgo);
+    const get = () =>
+      request(application.server).get('/assets/app-9z.js').set('Accept-Encoding', 'gzip, br').expect(200);
+    const old = await get();
+    expect([old.text, old.get('Content-Encoding')]).toEqual(['the new one', undefined]);
+    writeFileSync(`${file}.gz`, gzipSync('the new one'));
+    const now = await get();
+    expect([now.text, now.get('Content-Encoding')]).toEqual(['the new one', 'gzip']);
   });
 
   it('run only scripts from here and the inline ones that the build wrote', async () => {
