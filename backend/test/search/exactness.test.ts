@@ -3,8 +3,8 @@ import type { Duty } from '@resistry/engineering/duty/duty';
 import { requirementOf } from '@resistry/engineering/duty/requirement';
 import { arbitraryDuty, arbitraryPolicy } from '@resistry/engineering/test-support/arbitrary-duties';
 import * as fc from 'fast-check';
-import { scratchFor } from '../../src/search/host/inline-search-host';
-import { searchCatalogue, type SearchScratch } from '../../src/search/engine/search-catalogue';
+import { allocateScratch, type Scratch } from '../../src/search/engine/scratch';
+import { searchCatalogue } from '../../src/search/engine/search-catalogue';
 import type { SearchPlan } from '../../src/search/engine/search-plan';
 import type { CatalogueIndex } from '../../src/search/index/catalogue-index';
 import { Readers } from '../../src/database/readers';
@@ -22,14 +22,14 @@ const duties = fc
 
 let application: StartedApplication;
 let index: CatalogueIndex;
-let scratch: SearchScratch;
+let scratch: Scratch;
 let stratified: number[];
 
 beforeAll(async () => {
   application = await startApplication({ seed: 'demo' });
   const readers = application.nest.get(Readers);
   index = await buildIndex(readers, await new SizeRatingsReader(readers, application.clock).all());
-  scratch = scratchFor(index);
+  scratch = allocateScratch(index.columns.partId.length);
   stratified = stratify(index, 4000);
 }, 120_000);
 

@@ -22,7 +22,7 @@ export interface Judgement {
 }
 
 /** State of a link: it has no deviation to settle. */
-const linkState: OperatingState = {
+export const linkState: OperatingState = {
   nominal: 0,
   low: 0,
   high: 0,

@@ -95,8 +95,10 @@ function voltageLine(conditions: Conditions, state: OperatingState): BudgetLine 
 }
 
 function driftLine(conditions: Conditions, state: OperatingState): BudgetLine {
-  const { drift, hours, ratings } = conditions;
-  if (drift === undefined) return plain('drift', undefined, 'load-life drift', 'drift');
+  const { driftOverLife, hours, ratings } = conditions;
+  const { drift } = ratings;
+  if (drift === undefined || driftOverLife === undefined)
+    return plain('drift', undefined, 'load-life drift', 'drift');
   const missing = missingForElement(conditions, state);
   if (missing.length > 0) {
     return {
@@ -106,7 +108,7 @@ function driftLine(conditions: Conditions, state: OperatingState): BudgetLine {
       missing,
     };
   }
-  const amount = driftAt(ratings.technology, drift, hours, state.hot);
+  const amount = driftAt(driftOverLife, state.hot);
   const stated = `${String(drift.fraction * 100)} % at ${String(drift.hours)} h and ${String(drift.temperature)} °C`;
   if (!amount.complete) {
     const missingData = `drift beyond ${String(drift.hours)} h or ${String(drift.temperature)} °C`;

@@ -30,8 +30,7 @@ function missingForBudget(conditions: Conditions, state: OperatingState): readon
     (!temperature || ratings.tcr !== undefined) &&
     (!(temperature || life) || !Number.isNaN(state.hot)) &&
     (!life ||
-      (ratings.drift !== undefined &&
-        driftAt(ratings.technology, ratings.drift, conditions.hours, state.hot).complete));
+      (conditions.driftOverLife !== undefined && driftAt(conditions.driftOverLife, state.hot).complete));
   if (complete) return nothing;
   const essential = new Set(['tolerance', 'temperature', 'drift']);
   return budgetOf(conditions, state)

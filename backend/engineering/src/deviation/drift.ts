@@ -20,21 +20,49 @@ export function driftLawOf(
   );
 }
 
+/** Load-life drift after a given time, still open to the temperature of the element. */
+export interface DriftOverLife {
+  /** Fraction at the temperature of the family's test. */
+  atTestTemperature: number;
+  /** °C */
+  testTemperature: number;
+  /** Growth per kelvin, 1/K: ln 2 / doubling; 0 without a law. */
+  perKelvin: number;
+  /** Hottest element, °C, up to which the whole is known: −Infinity beyond the stated hours without a law. */
+  completeUpTo: number;
+}
+
 /**
- * Load-life drift |ΔR/R| after `hours` with the element at `celsius`:
- * stated · (t/t₀)^exponent · 2^((T−T₀)/doubling); (t/t₀)^(1/3) and doubling per 30 K for films, common practice.
- * Without a law the stated figure holds up to the stated hours and temperature and the drift is not known beyond them.
+ * Load-life drift |ΔR/R| over `hours`: stated · (t/t₀)^exponent · 2^((T−T₀)/doubling); (t/t₀)^(1/3) and doubling per 30 K
+ * for films, common practice. Without a law the stated figure holds up to the stated hours and temperature and the drift
+ * is not known beyond them.
  * @param hours h, above 0
- * @param celsius temperature of the element, °C
  */
-export function driftAt(technology: Technology, drift: Drift, hours: number, celsius: number): DriftAmount {
+export function driftOverLife(technology: Technology, drift: Drift, hours: number): DriftOverLife {
   const law = driftLawOf(technology, drift);
-  if (law !== undefined) {
-    const scaled =
-      drift.fraction *
-      (hours / drift.hours) ** law.exponent *
-      2 ** ((celsius - drift.temperature) / law.doubling);
-    return { known: scaled, complete: true };
+  if (law === undefined) {
+    return {
+      atTestTemperature: drift.fraction,
+      testTemperature: drift.temperature,
+      perKelvin: 0,
+      completeUpTo: hours <= drift.hours ? drift.temperature : -Infinity,
+    };
   }
-  return { known: drift.fraction, complete: hours <= drift.hours && celsius <= drift.temperature };
+  return {
+    atTestTemperature: drift.fraction * (hours / drift.hours) ** law.exponent,
+    testTemperature: drift.temperature,
+    perKelvin: Math.LN2 / law.doubling,
+    completeUpTo: Infinity,
+  };
+}
+
+/** The drift with the element at a temperature, °C. */
+export function driftAt(drift: DriftOverLife, celsius: number): DriftAmount {
+  return { known: knownDriftAt(drift, celsius), complete: celsius <= drift.completeUpTo };
+}
+
+/** The part of the drift that is certain with the element at a temperature (°C), fraction. */
+export function knownDriftAt(drift: DriftOverLife, celsius: number): number {
+  if (drift.perKelvin === 0) return drift.atTestTemperature;
+  return drift.atTestTemperature * Math.exp((celsius - drift.testTemperature) * drift.perKelvin);
 }

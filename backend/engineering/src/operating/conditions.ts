@@ -1,9 +1,10 @@
 import { allowedFraction } from '../derating/policy-line';
+import { driftOverLife, type DriftOverLife } from '../deviation/drift';
 import { altitudeFactor } from '../derating/altitude-factor';
 import { entryFor, type Policy, type PolicyEntry } from '../derating/policy-entry';
 import type { Requirement } from '../duty/requirement';
 import type { SteadyLoad } from '../duty/steady-load';
-import { standardReferenceTemperature, type Drift, type Ratings } from '../ratings/ratings';
+import { standardReferenceTemperature, type Ratings } from '../ratings/ratings';
 import { thermalResistanceOf, type ThermalResistance } from '../thermal/thermal-resistance';
 import { axisTemperature, type AxisTemperature } from './axis-temperature';
 
@@ -39,25 +40,72 @@ export interface Conditions {
   coldSpan: number;
   /** 1/V; 0 where missing. */
   voltageCoefficient: number;
-  drift?: Drift;
+  /** Absent without a stated life or a stated drift. */
+  driftOverLife?: DriftOverLife;
   hours: number;
 }
 
-/** Flattens one set of ratings under a requirement and a policy. */
-export function conditionsOf(ratings: Ratings, requirement: Requirement, policy: Policy): Conditions {
-  const duty = requirement.duty;
+/** What every part of one size and operating mode shares, whatever its tolerance and TCR. */
+type SharedConditions = Omit<Conditions, 'ratings' | 'fixedSum' | 'fixedSquares' | 'tcr'>;
+
+/**
+ * Flattens one set of ratings under a requirement and a policy.
+ * @param sibling conditions of another tolerance or TCR of the same size and operating mode under the same requirement and
+ *   policy, if there are any: what they share is not worked out again
+ */
+export function conditionsOf(
+  ratings: Ratings,
+  requirement: Requirement,
+  policy: Policy,
+  sibling?: Conditions,
+): Conditions {
   const entry = policy === 'none' ? undefined : entryFor(policy.entries, ratings);
+  const shared =
+    sibling !== undefined && sibling.entry === entry
+      ? sibling
+      : sharedConditionsOf(ratings, requirement, policy, entry);
+  const pulseShift = hasPulses(requirement) ? (ratings.pulses?.shift ?? 0) : 0;
+  const tolerance = ratings.tolerance ?? 0;
+  const solderShift = ratings.solderShift ?? 0;
+  const humidityShift = ratings.humidityShift ?? 0;
+  // Field by field: this is made for every row of a catalogue at every search, and a spread costs ten times as much.
+  return {
+    requirement,
+    entry: shared.entry,
+    policyUnmatched: shared.policyUnmatched,
+    axis: shared.axis,
+    thermal: shared.thermal,
+    fraction: shared.fraction,
+    altitude: shared.altitude,
+    allowedDissipation: shared.allowedDissipation,
+    allowedVoltage: shared.allowedVoltage,
+    load: shared.load,
+    rootSumSquare: shared.rootSumSquare,
+    referenceTemperature: shared.referenceTemperature,
+    coldSpan: shared.coldSpan,
+    voltageCoefficient: shared.voltageCoefficient,
+    driftOverLife: shared.driftOverLife,
+    hours: shared.hours,
+    ratings,
+    fixedSum: tolerance + solderShift + humidityShift + pulseShift,
+    fixedSquares: tolerance ** 2 + solderShift ** 2 + humidityShift ** 2 + pulseShift ** 2,
+    tcr: requirement.duty.ambient === undefined ? 0 : (ratings.tcr ?? 0),
+  };
+}
+
+function sharedConditionsOf(
+  ratings: Ratings,
+  requirement: Requirement,
+  policy: Policy,
+  entry: PolicyEntry | undefined,
+): SharedConditions {
+  const duty = requirement.duty;
   const policyUnmatched = policy !== 'none' && entry === undefined;
   const axis = axisTemperature(duty, ratings.derating?.axis ?? 'ambient');
   const referenceTemperature = ratings.referenceTemperature ?? standardReferenceTemperature;
-  const pulseShift = hasPulses(requirement) ? ratings.pulses?.shift : undefined;
-  const fixed = [ratings.tolerance, ratings.solderShift, ratings.humidityShift, pulseShift].filter(
-    (part) => part !== undefined,
-  );
   const fraction = fractionOf(ratings, entry, policyUnmatched, axis);
   const altitude = altitudeOf(entry, duty.ambient?.altitude);
   return {
-    ratings,
     requirement,
     entry,
     policyUnmatched,
@@ -69,13 +117,13 @@ export function conditionsOf(ratings: Ratings, requirement: Requirement, policy:
     allowedVoltage: allowedVoltageOf(ratings, entry, policyUnmatched),
     load: requirement.load,
     rootSumSquare: duty.deviation === 'root-sum-square',
-    fixedSum: fixed.reduce((sum, part) => sum + part, 0),
-    fixedSquares: fixed.reduce((sum, part) => sum + part * part, 0),
-    tcr: duty.ambient === undefined ? 0 : (ratings.tcr ?? 0),
     referenceTemperature,
     coldSpan: duty.ambient === undefined ? 0 : referenceTemperature - duty.ambient.min,
     voltageCoefficient: ratings.voltageCoefficient ?? 0,
-    drift: duty.life === undefined ? undefined : ratings.drift,
+    driftOverLife:
+      duty.life === undefined || ratings.drift === undefined
+        ? undefined
+        : driftOverLife(ratings.technology, ratings.drift, duty.life.hours),
     hours: duty.life?.hours ?? 0,
   };
 }

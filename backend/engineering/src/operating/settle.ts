@@ -1,4 +1,4 @@
-import { driftAt } from '../deviation/drift';
+import { knownDriftAt } from '../deviation/drift';
 import { largestVoltage, worstDissipation } from '../duty/steady-load';
 import type { Conditions } from './conditions';
 
@@ -92,10 +92,8 @@ export function settle(conditions: Conditions, lowest: number, highest: number):
 export function deviationAt(conditions: Conditions, hot: number, voltage: number): number {
   const temperature = temperatureDeviation(conditions, hot);
   const byVoltage = conditions.voltageCoefficient * voltage;
-  const drift =
-    conditions.drift === undefined || Number.isNaN(hot)
-      ? 0
-      : driftAt(conditions.ratings.technology, conditions.drift, conditions.hours, hot).known;
+  const { driftOverLife } = conditions;
+  const drift = driftOverLife === undefined || Number.isNaN(hot) ? 0 : knownDriftAt(driftOverLife, hot);
   if (!conditions.rootSumSquare) return conditions.fixedSum + temperature + byVoltage + drift;
   return Math.sqrt(conditions.fixedSquares + temperature ** 2 + byVoltage ** 2 + drift ** 2);
 }

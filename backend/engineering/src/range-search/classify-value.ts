@@ -1,4 +1,6 @@
-import { valueCheck } from '../checks/value';
+import { holds } from '../checks/finding';
+import { distanceToEdge, valueCheck } from '../checks/value';
+import { largestVoltage, worstDissipation } from '../duty/steady-load';
 import type { Status } from '../checks/check';
 import type { Window } from '../duty/window';
 import type { Conditions } from '../operating/conditions';
@@ -44,7 +46,11 @@ export function classifyValue(stretch: Stretch, from: number, to: number): void 
   }
 }
 
-function statusAt({ conditions }: Stretch, state: OperatingState, nominal: number): Status {
+function statusAt({ conditions, window, atRest }: Stretch, state: OperatingState, nominal: number): Status {
+  if (atRest === 'unrated') {
+    // What is missing at rest is missing everywhere, but a part that leaves the window with what is known is unmet.
+    return state.settled && holds(state.deviation, distanceToEdge(window, nominal)) ? 'unrated' : 'unmet';
+  }
   return valueCheck.find({ conditions, state: { ...state, nominal } }).status;
 }
 
@@ -53,28 +59,92 @@ function decide(stretch: Stretch, from: number, to: number): Status | undefined 
   const { conditions, resistances, window } = stretch;
   const lowest = resistances[from] ?? NaN;
   const highest = resistances[to - 1] ?? NaN;
-  const worst = settle(conditions, lowest, highest);
-  if (worst.settled) {
-    // The distance to the window's edge is smallest at one of the ends.
-    const atEnds = [statusAt(stretch, worst, lowest), statusAt(stretch, worst, highest)] as const;
-    if (atEnds[0] === 'met' && atEnds[1] === 'met') return 'met';
-    if (stretch.atRest === 'unrated' && atEnds[0] !== 'unmet' && atEnds[1] !== 'unmet') return 'unrated';
+  // The distance to the window's edge is smallest at one of the ends and largest in the middle of the window.
+  const nearest = Math.min(distanceToEdge(window, lowest), distanceToEdge(window, highest));
+  if (nearest > 0) {
+    const worst = boundInside(conditions, nearest, lowest, highest);
+    if (worst !== undefined) {
+      const [low, high] = [statusAt(stretch, worst, lowest), statusAt(stretch, worst, highest)];
+      const certain = low === 'met' || stretch.atRest === 'unrated';
+      if (low === high && low !== 'unmet' && certain) return low;
+    }
   }
-  const atLowest = settle(conditions, lowest, lowest);
-  const atHighest = settle(conditions, highest, highest);
-  const load = conditions.load;
-  if (!atLowest.settled || !atHighest.settled) {
-    // By voltage alone the load falls with resistance, by current alone it rises: then one end speaks for all.
-    if (load?.currentMax === Infinity && !atHighest.settled && load.powerMax === Infinity) return 'unmet';
-    if (load?.voltageMax === Infinity && !atLowest.settled && load.powerMax === Infinity) return 'unmet';
-    return undefined;
-  }
-  // Dissipation rises, then falls with resistance, so inside it is at least the lower of its ends; voltage never falls.
-  const coolest = Math.min(atLowest.hotKnown, atHighest.hotKnown);
-  const least: OperatingState = {
-    ...atLowest,
-    deviation: deviationAt(conditions, coolest, atLowest.voltage) * (1 - 1e-9),
+  const middle = Math.min(highest, Math.max(lowest, (window.lower + window.upper) / 2));
+  return allDeviateMore(conditions, lowest, highest, distanceToEdge(window, middle)) ? 'unmet' : undefined;
+}
+
+/** A distance (fraction) from which a part cut off by it would dissipate far more than one that deviates as parts do. */
+const wide = 0.1;
+
+/**
+ * A state that no part of an interval of resistance (Ω) passes and that stays inside a distance (fraction), if there is
+ * one. Settling is monotone: where no more deviation comes out than was put in, no part deviates more.
+ */
+function boundInside(
+  conditions: Conditions,
+  distance: number,
+  lowest: number,
+  highest: number,
+): OperatingState | undefined {
+  const limit = distance * (1 - 1e-6);
+  const step = stepFrom(conditions, distance, lowest, highest);
+  if (step.deviation <= limit) return step;
+  if (distance < wide) return undefined;
+  const state = settle(conditions, lowest, highest);
+  return state.settled && state.deviation <= limit ? state : undefined;
+}
+
+/** One step of settling over an interval of resistance (Ω): what a deviation leads to at the worst resistance inside. */
+function stepFrom(
+  conditions: Conditions,
+  deviation: number,
+  lowest: number,
+  highest: number,
+): OperatingState {
+  const { load, axis, thermal } = conditions;
+  const celsius = axis.known ? axis.celsius : NaN;
+  const low = lowest * Math.max(0, 1 - deviation);
+  const high = highest * (1 + deviation);
+  const dissipation = load === undefined ? 0 : worstDissipation(load, low, high);
+  const voltage = load === undefined ? 0 : largestVoltage(load, high);
+  const hot = celsius + (thermal?.value ?? 0) * dissipation;
+  return {
+    nominal: lowest,
+    low,
+    high,
+    deviation: deviationAt(conditions, hot, voltage),
+    dissipation,
+    voltage,
+    hot: load === undefined || thermal !== undefined ? hot : NaN,
+    hotKnown: hot,
+    steps: 1,
+    settled: true,
   };
-  const farthest = Math.min(highest, Math.max(lowest, (window.lower + window.upper) / 2));
-  return statusAt(stretch, least, farthest) === 'unmet' ? 'unmet' : undefined;
+}
+
+/** Steps of settling that are spent on showing that a whole stretch fails; running away shows within fewer. */
+const stepsFromBelow = 8;
+
+/**
+ * Whether every part of an interval of resistance (Ω) deviates by more than a distance (fraction): a few steps of settling
+ * from the unheated part, which all parts reach. Dissipation rises, then falls with the resistance, so inside the interval
+ * it is at least the lower of its ends; the voltage never falls.
+ */
+function allDeviateMore(conditions: Conditions, lowest: number, highest: number, distance: number): boolean {
+  const { load, axis, thermal } = conditions;
+  const celsius = axis.known ? axis.celsius : NaN;
+  const exceeds = (fraction: number): boolean => !holds(fraction * (1 - 1e-9), distance);
+  let deviation = deviationAt(conditions, celsius, 0);
+  for (let step = 0; step < stepsFromBelow && load !== undefined && !exceeds(deviation); step += 1) {
+    const shrink = Math.max(0, 1 - deviation);
+    const watt = Math.min(
+      worstDissipation(load, lowest * shrink, lowest * (1 + deviation)),
+      worstDissipation(load, highest * shrink, highest * (1 + deviation)),
+    );
+    const voltage = largestVoltage(load, lowest * (1 + deviation));
+    const next = deviationAt(conditions, celsius + (thermal?.value ?? 0) * watt, voltage);
+    if (next <= deviation * 1.001) return exceeds(next);
+    deviation = next;
+  }
+  return exceeds(deviation);
 }

@@ -32,7 +32,7 @@ export function answersOf(conditions: Conditions, checks: readonly AskedCheck[])
 }
 
 /** A part before any load heats it, in the middle of the window: there its deviation has the most room. */
-function stateAtRest(conditions: Conditions): OperatingState {
+export function stateAtRest(conditions: Conditions): OperatingState {
   const celsius = conditions.axis.known ? conditions.axis.celsius : NaN;
   const riseKnown = conditions.load === undefined || conditions.thermal !== undefined;
   const window = conditions.requirement.window;

@@ -8,7 +8,7 @@ import { answersOf } from '@resistry/engineering/range-search/row-answers';
 import type { CatalogueRow } from '../index/catalogue-columns';
 import type { CatalogueIndex } from '../index/catalogue-index';
 import type { Scratch } from './scratch';
-import { addStanding, standingMasks, type StandingMasks } from './standing-masks';
+import { addStanding, anyStands, standingMasks, type StandingMasks } from './standing-masks';
 
 /**
  * How one row stands. Its parts at [from, to) have been judged by every check. The others lie outside the window by their
@@ -21,6 +21,8 @@ export interface RowOutcome {
   to: number;
   /** Pairs of first position and position after the last. */
   passingOutside: readonly number[];
+  /** Whether data are missing without which no part of the row can be met, whatever its resistance. */
+  isUnrated: boolean;
 }
 
 /** The checks a requirement asks. */
@@ -47,9 +49,17 @@ export interface Evaluation extends Question {
  */
 export type Extent = 'all parts' | 'inside the window';
 
-/** Conditions of each operating mode of a row. */
-export function conditionsOfRow(row: CatalogueRow, requirement: Requirement, policy: Policy): Conditions[] {
-  return row.modes.map((ratings) => conditionsOf(ratings, requirement, policy));
+/**
+ * Conditions of each operating mode of a row.
+ * @param siblings those of another row of the same size
+ */
+export function conditionsOfRow(
+  row: CatalogueRow,
+  requirement: Requirement,
+  policy: Policy,
+  siblings?: readonly Conditions[],
+): Conditions[] {
+  return row.modes.map((ratings, mode) => conditionsOf(ratings, requirement, policy, siblings?.[mode]));
 }
 
 /** Holds the parts of the given rows against a requirement. */
@@ -72,7 +82,14 @@ export function evaluateRows(
   };
   scratch.masks.exact = 0;
   scratch.other.exact = 0;
-  const outcomes = rows.map((row) => outcomeOf(index, row, question, extent));
+  // Rows of one size follow each other, and their conditions have most in common.
+  let siblings: Conditions[] = [];
+  let sizeId = 0;
+  const outcomes = rows.map((row) => {
+    if (row.sizeId !== sizeId) siblings = [];
+    sizeId = row.sizeId;
+    return outcomeOf(index, row, question, extent, siblings);
+  });
   return { ...question, outcomes, exact: scratch.masks.exact + scratch.other.exact };
 }
 
@@ -81,22 +98,28 @@ function outcomeOf(
   row: CatalogueRow,
   { requirement, checks, policy, scratch, standing }: Question,
   extent: Extent,
+  siblings: Conditions[],
 ): RowOutcome {
   const { resistance } = index.columns;
   const { window, link } = requirement;
   const windowDecides = extent === 'inside the window' && window !== undefined && !link && !row.isLink;
   const [from, to] = windowDecides ? insideWindow(window, resistance, row.from, row.to) : [row.from, row.to];
+  // Most rows hold no part that is approved at all; outside the window nothing is to be counted there.
+  const around = anyStands(index.columns, standing, row.from, row.to) ? outside(row, from, to) : [];
   let passingOutside: readonly number[] = [];
+  let isUnrated = true;
   for (const [mode, ratings] of row.modes.entries()) {
     // Outside the window every operating mode is unmet, and of equals the first stands.
-    if (mode > 0 && from >= to) break;
-    const conditions = conditionsOf(ratings, requirement, policy);
+    if (from >= to && (mode > 0 || around.length === 0)) break;
+    const conditions = conditionsOf(ratings, requirement, policy, siblings[mode]);
+    siblings[mode] = conditions;
     const judged: Row = { conditions, answers: answersOf(conditions, checks), resistances: resistance };
-    if (mode === 0) passingOutside = passingStretches(judged, outside(row, from, to));
+    if (mode === 0) passingOutside = passingStretches(judged, around);
+    isUnrated &&= judged.answers.some(({ unloaded }) => unloaded === 'unrated');
     judgeMode(judged, mode, from, to, scratch);
   }
   addStanding(index.columns, standing, scratch, from, to);
-  return { row, from, to, passingOutside };
+  return { row, from, to, passingOutside, isUnrated };
 }
 
 /** The stretches of a row that are not in [from, to). */

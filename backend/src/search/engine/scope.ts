@@ -45,6 +45,11 @@ export class Scope {
     return this.byCompanyNumber ? judgedSources(this.index, unit) : [unit];
   }
 
+  /** Whether all the positions that decide about a unit hold; the first that does not ends it. */
+  everyPosition(unit: number, holds: (position: number) => boolean): boolean {
+    return this.byCompanyNumber ? judgedSources(this.index, unit).every(holds) : holds(unit);
+  }
+
   /** Calls back for every unit, or for those whose parts lie in an interval of resistance (Ω). */
   forEach(
     visit: (unit: number) => void,

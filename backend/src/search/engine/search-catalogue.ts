@@ -12,27 +12,17 @@ import { orderOfNumbers, orderOfParts } from './unit-order';
 import { selectFirst } from './select-first';
 import { relaxationsOf } from './relaxation/relaxations';
 
-/** Scratch for the search itself and for trying loosened duties beside it. */
-export interface SearchScratch {
-  main: Scratch;
-  retrial: Scratch;
-}
-
 /**
  * The whole search over the columns of a catalogue: every check on every part that the filters accept, exact counts, the
  * page asked for, and what loosened demands would bring back.
  * @throws DutyConflict where the duty contradicts itself
  */
-export function searchCatalogue(
-  index: CatalogueIndex,
-  plan: SearchPlan,
-  scratch: SearchScratch,
-): SearchResult {
+export function searchCatalogue(index: CatalogueIndex, plan: SearchPlan, scratch: Scratch): SearchResult {
   const requirement = requirementOf(plan.duty);
   const scope = new Scope(index, plan);
   // The sources of a company part number can stand in rows that the filters leave out.
   const rows = plan.byCompanyNumber ? index.rows : scope.rows;
-  const evaluation = evaluateRows(index, rows, requirement, plan.policy, scratch.main, extentOf(plan));
+  const evaluation = evaluateRows(index, rows, requirement, plan.policy, scratch, extentOf(plan));
   const tally = plan.byCompanyNumber ? countNumbers(scope, evaluation) : countParts(index, scope, evaluation);
   const order = new PartOrder(index, evaluation);
   const compare = plan.byCompanyNumber
@@ -44,7 +34,7 @@ export function searchCatalogue(
     unrated: unrated.length,
     items: page(plan, met, unrated, compare).map((unit) => itemOf(index, plan, evaluation, unit)),
     knockouts: tally.knockouts(),
-    relaxations: plan.relaxations ? relaxationsOf(index, scope, evaluation, scratch.retrial) : [],
+    relaxations: plan.relaxations ? relaxationsOf(index, scope, evaluation) : [],
     byApproval: countByApproval(index, scope, met),
     exact: evaluation.exact,
   };

@@ -40,6 +40,19 @@ export function unmetStanding(columns: CatalogueColumns, masks: StandingMasks, p
   return masks[key] ?? 0;
 }
 
+/** Whether any part at [from, to) meets the standing checks. */
+export function anyStands(
+  columns: CatalogueColumns,
+  masks: StandingMasks,
+  from: number,
+  to: number,
+): boolean {
+  for (let position = from; position < to; position += 1) {
+    if (unmetStanding(columns, masks, position) === 0) return true;
+  }
+  return false;
+}
+
 /** Adds the standing checks to what the ratings of the parts at [from, to) gave. */
 export function addStanding(
   columns: CatalogueColumns,

@@ -1,21 +1,15 @@
-import { allocateScratch } from '../engine/scratch';
-import { searchCatalogue, type SearchScratch } from '../engine/search-catalogue';
+import { allocateScratch, type Scratch } from '../engine/scratch';
+import { searchCatalogue } from '../engine/search-catalogue';
 import type { SearchPlan, SearchResult } from '../engine/search-plan';
 import type { CatalogueIndex } from '../index/catalogue-index';
 import type { SearchHost } from './search-host';
 
-/** Scratch for an index. */
-export function scratchFor(index: CatalogueIndex): SearchScratch {
-  const length = index.columns.partId.length;
-  return { main: allocateScratch(length), retrial: allocateScratch(length) };
-}
-
 /** Computes in the thread that asks. */
 export class InlineSearchHost implements SearchHost {
-  private loaded?: { index: CatalogueIndex; scratch: SearchScratch };
+  private loaded?: { index: CatalogueIndex; scratch: Scratch };
 
   take(index: CatalogueIndex): void {
-    this.loaded = { index, scratch: scratchFor(index) };
+    this.loaded = { index, scratch: allocateScratch(index.columns.partId.length) };
   }
 
   search(plan: SearchPlan): Promise<SearchResult> {

@@ -9,6 +9,8 @@ import type { Retrial } from './retrial';
 export interface Choice {
   pointer: string;
   values: readonly unknown[];
+  /** Whether it changes nothing but what is asked of a part's standing. */
+  standingOnly: boolean;
 }
 
 /** What can be loosened by allowing one more, or asking one less. A withdrawn part is never offered. */
@@ -19,25 +21,29 @@ export function choicesOf(requirement: Requirement): Choice[] {
   const offered: Choice[] = [
     {
       pointer: '/approvals',
+      standingOnly: true,
       values: (['in-review', 'restricted', 'draft'] as const)
         .filter((name) => !approvals.includes(name))
         .map((name) => [...approvals, name]),
     },
     {
       pointer: '/supply',
+      standingOnly: true,
       values: (['not-recommended', 'last-time-buy'] as const)
         .filter((name) => !supply.includes(name))
         .map((name) => [...supply, name]),
     },
   ];
-  if (duty.secondSource === true) offered.push({ pointer: '/secondSource', values: [false] });
+  if (duty.secondSource === true)
+    offered.push({ pointer: '/secondSource', standingOnly: true, values: [false] });
   if (duty.window !== undefined && duty.deviation !== 'root-sum-square') {
-    offered.push({ pointer: '/deviation', values: ['root-sum-square'] });
+    offered.push({ pointer: '/deviation', standingOnly: false, values: ['root-sum-square'] });
   }
   const { features } = duty;
   if (features !== undefined && features.length > 0) {
     offered.push({
       pointer: '/features',
+      standingOnly: false,
       values: features.map((left) => features.filter((feature) => feature !== left)),
     });
   }
@@ -53,7 +59,9 @@ export function relaxChoice(
 ): Relaxation | undefined {
   if (units.length === 0) return undefined;
   for (const to of choice.values) {
-    const gains = retrial.met(withValueAt(requirement.duty, choice.pointer, to), units).length;
+    const duty = withValueAt(requirement.duty, choice.pointer, to);
+    const met = choice.standingOnly ? retrial.metByStanding(duty, units) : retrial.met(duty, units);
+    const gains = met.length;
     if (gains > 0) return { field: choice.pointer, to, gains };
   }
   return undefined;

@@ -12,7 +12,7 @@ const tried = 24;
 /**
  * The smallest change of one number that brings a unit back, and how many units come back with it. The nearest misses are
  * halved towards together; the gains are counted over all.
- * @param nearness larger the nearer a unit comes to being met
+ * @param nearness larger the nearer a unit comes to being met; Infinity for one that has no unmet check but lacks data
  */
 export function relaxNumber(
   duty: Duty,
@@ -43,17 +43,20 @@ export function relaxNumber(
   return { field: field.pointer, to, gains: retrial.met(at(to), units).length };
 }
 
+/** Of very many misses an even sample is looked at: the smallest change among them stands for all. */
+const sampled = 1000;
+
+/** The units nearest to being met; beside those with an unmet check some that only lack data, which a change can spare. */
 function nearestOf(units: readonly number[], nearness: (unit: number) => number): number[] {
   if (units.length <= tried) return [...units];
-  // Of very many misses an even sample is looked at: the smallest change among them stands for all.
-  const step = Math.ceil(units.length / 2000);
+  const step = Math.ceil(units.length / sampled);
   const sample = units
     .filter((_, place) => place % step === 0)
-    .map((unit) => ({ unit, near: nearness(unit) }));
-  return sample
-    .sort((first, second) => second.near - first.near || first.unit - second.unit)
-    .slice(0, tried)
-    .map(({ unit }) => unit);
+    .map((unit) => ({ unit, near: nearness(unit) }))
+    .sort((first, second) => second.near - first.near || first.unit - second.unit);
+  const lacking = sample.filter(({ near }) => near === Infinity).slice(0, tried / 3);
+  const unmet = sample.filter(({ near }) => near < Infinity).slice(0, tried - lacking.length);
+  return [...unmet, ...lacking].map(({ unit }) => unit);
 }
 
 /** Halfway: in degrees between the two, else their geometric mean where both are above 0. */

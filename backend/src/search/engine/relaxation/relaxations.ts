@@ -5,9 +5,8 @@ import { candidateAt } from '../candidate-at';
 import { conditionsOfRow, type Evaluation } from '../evaluation';
 import { rowOfPosition } from '../row-of-position';
 import type { Scope } from '../scope';
-import type { Scratch } from '../scratch';
 import type { Relaxation } from '../search-plan';
-import { bitsDependingOn, NearMisses } from './near-misses';
+import { bitsDependingOn, NearMisses, outsideByTolerance } from './near-misses';
 import { choicesOf, relaxChoice } from './relax-choice';
 import { relaxNumber } from './relax-number';
 import { relaxWindow, type Reach } from './relax-window';
@@ -19,22 +18,17 @@ import { NumbersOutside, PartsOutside } from './window-misses';
  * For each demand that keeps units out by itself, the smallest change that brings some back and how many: searching
  * again with it gives the total and these.
  */
-export function relaxationsOf(
-  index: CatalogueIndex,
-  scope: Scope,
-  evaluation: Evaluation,
-  scratch: Scratch,
-): Relaxation[] {
+export function relaxationsOf(index: CatalogueIndex, scope: Scope, evaluation: Evaluation): Relaxation[] {
   const { checks, requirement } = evaluation;
   const { duty, window } = requirement;
-  const retrial = new Retrial(index, scope, evaluation, scratch);
+  const retrial = new Retrial(index, scope, evaluation);
   const { valueBit } = evaluation;
   // Only a change of the window itself, or of the limits it follows from, brings back what lies outside it.
   const everywhere =
     valueBit === 0 || !(scope.byCompanyNumber || duty.limits !== undefined)
       ? undefined
       : new NearMisses(scope, evaluation);
-  const inWindow = new NearMisses(scope, evaluation, window);
+  const inWindow = new NearMisses(scope, evaluation, window, outsideByTolerance(index, evaluation));
   const nearness = nearnessOf(index, scope, evaluation);
   const found: (Relaxation | undefined)[] = [];
   if (duty.window !== undefined && !requirement.link) {

@@ -1,49 +1,67 @@
+import { standingChecks } from '@resistry/engineering/checks/list';
 import { DutyConflict } from '@resistry/engineering/duty/duty-conflict';
 import type { Duty } from '@resistry/engineering/duty/duty';
 import { requirementOf, type Requirement } from '@resistry/engineering/duty/requirement';
-import type { CatalogueRow } from '../../index/catalogue-columns';
+import type { Conditions } from '@resistry/engineering/operating/conditions';
+import { canBeMet, isMetBy } from '@resistry/engineering/range-search/is-met-by';
+import { askedChecks, type AskedCheck } from '@resistry/engineering/range-search/asked-checks';
 import type { CatalogueIndex } from '../../index/catalogue-index';
-import { evaluateRows, type Evaluation } from '../evaluation';
+import { conditionsOfRow, type Evaluation } from '../evaluation';
 import { rowOfPosition } from '../row-of-position';
 import type { Scope } from '../scope';
-import type { Scratch } from '../scratch';
+import { standingMasks, unmetStanding } from '../standing-masks';
 
-/** Tries a loosened duty on single units without touching the masks of the search itself. */
+/** Tries a changed duty on single units. */
 export class Retrial {
   constructor(
     private readonly index: CatalogueIndex,
     private readonly scope: Scope,
     private readonly evaluation: Evaluation,
-    private readonly scratch: Scratch,
   ) {}
 
   /** The units that a duty meets; none where it contradicts itself. */
   met(duty: Duty, units: readonly number[]): number[] {
     const requirement = possibleRequirement(duty);
-    if (requirement === undefined || units.length === 0) return [];
-    const positions = units.flatMap((unit) => this.scope.positionsOf(unit));
-    const { policy } = this.evaluation;
-    evaluateRows(this.index, this.slices(positions), requirement, policy, this.scratch, 'all parts');
-    const { masks } = this.scratch;
-    const isMet = (position: number): boolean => masks.unmet[position] === 0 && masks.unrated[position] === 0;
-    return units.filter((unit) => this.scope.positionsOf(unit).every(isMet));
+    if (requirement === undefined) return [];
+    const isMet = this.tryPositions(requirement);
+    return units.filter((unit) => this.scope.everyPosition(unit, isMet));
   }
 
-  /** The rows of some positions, each cut to the stretch that holds them. */
-  private slices(positions: readonly number[]): CatalogueRow[] {
-    const sorted = Int32Array.from(positions).sort();
-    const slices: CatalogueRow[] = [];
-    let whole: CatalogueRow | undefined;
-    let slice: CatalogueRow | undefined;
-    for (const position of sorted) {
-      if (whole === undefined || slice === undefined || position >= whole.to) {
-        whole = rowOfPosition(this.index.rows, position);
-        slice = { ...whole, from: position };
-        slices.push(slice);
+  /** The units that a duty meets which asks something else of their standing, and the same as before of their ratings. */
+  metByStanding(duty: Duty, units: readonly number[]): number[] {
+    const { checks, scratch } = this.evaluation;
+    const requirement = requirementOf(duty);
+    const standing = standingMasks(requirement, askedChecks(requirement));
+    const standingBits = checks
+      .filter(({ definition }) => standingChecks.has(definition.name))
+      .reduce((bits, { bit }) => bits | bit, 0);
+    const isMet = (position: number): boolean =>
+      ((scratch.masks.unmet[position] ?? 0) & ~standingBits) === 0 &&
+      scratch.masks.unrated[position] === 0 &&
+      unmetStanding(this.index.columns, standing, position) === 0;
+    return units.filter((unit) => this.scope.everyPosition(unit, isMet));
+  }
+
+  /** Units mostly come row by row, so the conditions of the last row are kept. */
+  private tryPositions(requirement: Requirement): (position: number) => boolean {
+    const { columns, rows } = this.index;
+    const checks: readonly AskedCheck[] = askedChecks(requirement);
+    const standing = standingMasks(requirement, checks);
+    let row = rows[0];
+    let conditions: Conditions[] | undefined;
+    let hopeful: Conditions[] = [];
+    return (position) => {
+      if (unmetStanding(columns, standing, position) !== 0) return false;
+      if (conditions === undefined || row === undefined || position < row.from || position >= row.to) {
+        const next = rowOfPosition(rows, position);
+        const siblings = row !== undefined && next.sizeId === row.sizeId ? conditions : undefined;
+        row = next;
+        conditions = conditionsOfRow(next, requirement, this.evaluation.policy, siblings);
+        hopeful = conditions.filter((mode) => canBeMet(mode, checks));
       }
-      slice.to = position + 1;
-    }
-    return slices;
+      const ohm = columns.resistance[position] ?? NaN;
+      return hopeful.some((mode) => isMetBy(mode, checks, ohm));
+    };
   }
 }
 

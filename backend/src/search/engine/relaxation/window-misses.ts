@@ -26,6 +26,7 @@ export class PartsOutside implements WindowMisses {
   nearest(edge: Edge): number[] {
     const found: number[] = [];
     for (const outcome of this.evaluation.outcomes) {
+      if (outcome.isUnrated) continue;
       for (let position = outcome.from; position < outcome.to; position += 1) {
         if (!this.isCutByOther(edge, outcome, position) && this.isMiss(position)) found.push(position);
       }
@@ -39,6 +40,7 @@ export class PartsOutside implements WindowMisses {
     const { resistance } = this.index.columns;
     const found: number[] = [];
     for (const outcome of this.evaluation.outcomes) {
+      if (outcome.isUnrated && outcome.row.modes.length === 1) continue;
       for (let position = outcome.from; position < outcome.to; position += 1) {
         if (this.isMiss(position)) found.push(position);
       }
