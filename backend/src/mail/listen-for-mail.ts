@@ -1,5 +1,4 @@
-import { buffer } from 'node:stream/consumers';
-import { SMTPServer } from 'smtp-server';
+import { SMTPServer, type SMTPServerDataStream } from 'smtp-server';
 import type { MailBox } from './mail-box';
 
 const LARGEST_LETTER_BYTES = 1_000_000;
@@ -23,7 +22,7 @@ export async function listenForMail(
     authOptional: true,
     size: LARGEST_LETTER_BYTES,
     onData: (stream, _session, done) => {
-      buffer(stream)
+      readLetter(stream)
         .then((source) => box.keep(source))
         .then(
           () => done(),
@@ -37,6 +36,22 @@ export async function listenForMail(
   });
   server.removeAllListeners('error').on('error', onError);
   return server;
+}
+
+/** `size` is only announced to the sender: what is sent all the same is read to its end, so that it can be answered, and not kept. */
+async function readLetter(stream: SMTPServerDataStream): Promise<Buffer> {
+  const pieces: Buffer[] = [];
+  let bytes = 0;
+  for await (const piece of stream as AsyncIterable<Buffer>) {
+    bytes += piece.length;
+    if (bytes <= LARGEST_LETTER_BYTES) pieces.push(piece);
+  }
+  if (bytes > LARGEST_LETTER_BYTES) {
+    throw Object.assign(new Error(`A letter has at most ${LARGEST_LETTER_BYTES} bytes.`), {
+      responseCode: 552,
+    });
+  }
+  return Buffer.concat(pieces);
 }
 
 export function closeMailServer(server: SMTPServer): Promise<void> {

@@ -1,3 +1,4 @@
+import type { AddressInfo } from 'node:net';
 import { ConfigurationError } from '../config/configuration-error';
 import { readEnvironment } from '../config/environment';
 import { closeMailServer, listenForMail } from './listen-for-mail';
@@ -22,7 +23,9 @@ async function main(): Promise<void> {
   };
   process.once('SIGTERM', stop);
   process.once('SIGINT', stop);
-  process.stdout.write(`Keeping mail that arrives at ${environment.host}:${environment.port}\n`);
+  // Asked for port 0, the system gives one that is free.
+  const { port } = server.server.address() as AddressInfo;
+  process.stdout.write(`Keeping mail that arrives at ${environment.host}:${port}\n`);
 }
 
 main().catch((error: unknown) => {
