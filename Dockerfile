@@ -5,9 +5,9 @@ FROM node:20-bookworm-slim AS tools
 RUN apt-get update \
   && DEBIAN_FRONTEND=noninteractive apt-get install -y --no-install-recommends make g++ python3 \
   && rm -rf /var/lib/apt/lists/*
-ENV npm_config_nodedir=/usr/local npm_config_build_from_source=sqlite3 SCARF_ANALYTICS=false
+ENV npm_config_nodedir=/usr/local SCARF_ANALYTICS=false
 WORKDIR /resistry
-COPY .npmrc package.json package-lock.json ./
+COPY .npmrc .prebuild-installrc package.json package-lock.json ./
 COPY backend/engineering/package.json backend/engineering/
 COPY backend/package.json backend/
 COPY frontend/package.json frontend/

@@ -89,6 +89,12 @@ describe('the image', () => {
     expect(images).toHaveLength(2);
   });
 
+  it('installs with the settings of npm and of the SQLite binding in place', () => {
+    const first = instructions.findIndex(({ name, rest }) => name === 'RUN' && rest.startsWith('npm ci'));
+    const copied = copiesOf(instructions.slice(0, first)).flatMap(({ sources }) => sources);
+    expect(copied).toEqual(expect.arrayContaining(['.npmrc', '.prebuild-installrc', 'package-lock.json']));
+  });
+
   it('leaves nothing that it copies out of what is sent to be built', () => {
     const left = read('.dockerignore')
       .split('\n')

@@ -32,8 +32,6 @@ export async function installNodeModules() {
   const { code } = await run('npm', ['ci', '--include=dev', '--no-fund', '--no-audit'], {
     variables: {
       ...headersVariable(),
-      // The binding's ready-made file lies on a host that is no package registry either.
-      npm_config_build_from_source: 'sqlite3',
       SCARF_ANALYTICS: 'false',
     },
     limitMinutes: 20,
