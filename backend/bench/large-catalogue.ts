@@ -157,10 +157,17 @@ async function copyTable(
   );
 }
 
-/** One offer a part that had a price, each at a price of its own, so that the order of a page has no ties. */
+/**
+ * One offer for every approved and preferred part, each at a price of its own (a multiple of its number modulo a prime), so
+ * that price alone orders a page: SQL has nothing to work out an excess with.
+ */
 async function priceEverything(database: Statements): Promise<void> {
   await database.run('DELETE FROM offer_price_breaks');
   await database.run('DELETE FROM offers');
+  await database.run(
+    `UPDATE parts SET derived_unit_price_micro =
+       CASE WHEN approval IN ('approved', 'preferred') THEN 1000 + id * 7919 % 15485863 END`,
+  );
   await database.run(
     `INSERT INTO offers (id, part_id, supplier_id, packaging_code, minimum_order, order_multiple, lead_time_days, valid_from, valid_until, entered_by, entered_at)
      SELECT id, id, (SELECT min(id) FROM suppliers), 'R', 1, 1, 30, '2020-01-01', '2099-12-31', entered_by, entered_at
@@ -168,9 +175,6 @@ async function priceEverything(database: Statements): Promise<void> {
   );
   await database.run(
     `INSERT INTO offer_price_breaks (offer_id, quantity, unit_price_micro)
-     SELECT id, 1, derived_unit_price_micro + id * 7919 % 1000003 FROM parts WHERE derived_unit_price_micro IS NOT NULL`,
-  );
-  await database.run(
-    `UPDATE parts SET derived_unit_price_micro = (SELECT unit_price_micro FROM offer_price_breaks WHERE offer_id = parts.id)`,
+     SELECT id, 1, derived_unit_price_micro FROM parts WHERE derived_unit_price_micro IS NOT NULL`,
   );
 }

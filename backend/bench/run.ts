@@ -1,15 +1,12 @@
 import assert from 'node:assert/strict';
 import { availableParallelism } from 'node:os';
 import { join } from 'node:path';
-import { Clock } from '../src/common/clock';
-import { readEnvironment } from '../src/config/environment';
-import { Readers } from '../src/database/readers';
-import { SizeRatingsReader } from '../src/parts/ratings/size-ratings-reader';
-import { buildIndex } from '../src/search/index/build-index';
 import { signIn, type Client } from './client';
+import { exactness } from './exactness';
 import { dutyOf, loads, nominals, policies, windowKinds, type WindowKind } from './duties';
 import { fiftyDesigners } from './fifty-designers';
 import { largeCatalogue } from './large-catalogue';
+import { openIndex } from './open-index';
 import { quantile } from './quantiles';
 import { startServer } from './server';
 import { SqlPair } from './sql-pair';
@@ -45,6 +42,7 @@ async function main(): Promise<void> {
   } finally {
     await server.stop();
   }
+  await exactness();
 }
 
 async function ourTimes(client: Client): Promise<Line[]> {
@@ -67,9 +65,7 @@ async function ourTimes(client: Client): Promise<Line[]> {
 
 /** Holds some of the same searches to the SQL pair: identical answers, asserted, and its times. */
 async function compare(client: Client, dataDirectory: string, lines: readonly Line[]): Promise<void> {
-  process.env['DATA_DIR'] = dataDirectory;
-  const readers = new Readers(readEnvironment(process.env, process.cwd()));
-  const index = await buildIndex(readers, await new SizeRatingsReader(readers, new Clock()).all());
+  const { index, close } = await openIndex(dataDirectory);
   process.stdout.write(
     `${String(index.columns.partId.length)} parts, ${String(index.ratings.size)} sizes, ${String(index.rows.length)} rows.\n`,
   );
@@ -107,7 +103,7 @@ async function compare(client: Client, dataDirectory: string, lines: readonly Li
     }
   }
   await database.close();
-  await readers.close();
+  await close();
 }
 
 function print(lines: readonly Line[]): void {

@@ -39,9 +39,10 @@ export class SearchIndex implements OnModuleInit, OnApplicationShutdown {
     this.standingChanges.subscribe((partIds) => this.refreshStanding(partIds));
   }
 
-  async search(plan: SearchPlan): Promise<SearchResult> {
+  /** @param gone aborted when nobody waits for the answer any more */
+  async search(plan: SearchPlan, gone?: AbortSignal): Promise<SearchResult> {
     await this.ready();
-    return this.host.search(plan);
+    return this.host.search(plan, gone);
   }
 
   /** The ratings that the index was built with. */

@@ -1,4 +1,4 @@
-import { Body, Controller, HttpCode, Param, Post } from '@nestjs/common';
+import { Body, Controller, HttpCode, Param, Post, Res } from '@nestjs/common';
 import {
   ApiNotFoundResponse,
   ApiOkResponse,
@@ -6,6 +6,8 @@ import {
   ApiTags,
   ApiUnprocessableEntityResponse,
 } from '@nestjs/swagger';
+import type { Response } from 'express';
+import { closedSignal } from '../common/http/closed-signal';
 import { AssessmentDto } from '../assessments/dto/assessment.dto';
 import { AssessPartRequest } from '../assessments/dto/assess-request.dto';
 import { ProblemDocument } from '../common/problems/problem-document';
@@ -33,8 +35,11 @@ export class SearchController {
   })
   @ApiOkResponse({ type: SearchResultDto })
   @ApiUnprocessableEntityResponse({ type: ProblemDocument })
-  async search(@Body() body: SearchRequest): Promise<SearchResultDto> {
-    return this.searches.search(body);
+  async search(
+    @Body() body: SearchRequest,
+    @Res({ passthrough: true }) response: Response,
+  ): Promise<SearchResultDto> {
+    return this.searches.search(body, closedSignal(response));
   }
 
   @Post(':id/assessment')

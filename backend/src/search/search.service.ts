@@ -31,23 +31,27 @@ export class SearchService {
     private readonly policies: PoliciesService,
   ) {}
 
-  async search(request: SearchRequest): Promise<SearchResultDto> {
+  /** @param gone aborted when nobody waits for the answer any more */
+  async search(request: SearchRequest, gone?: AbortSignal): Promise<SearchResultDto> {
     const duty = request.duty ?? {};
     const requirement = requirementOfDuty(duty);
     const resolved = await this.policies.resolve(request.policy);
     const page = request.page ?? 1;
     const pageSize = request.pageSize ?? defaultPageSize;
-    const { items, total, unrated, byApproval, knockouts, relaxations } = await this.index.search({
-      duty,
-      policy: resolved.policy,
-      filters: await this.filtersOf(request),
-      showUnrated: request.show === 'met-and-unrated',
-      byCompanyNumber: request.group === 'company',
-      sort: sortOf(request.sort),
-      offset: (page - 1) * pageSize,
-      limit: pageSize,
-      relaxations: page === 1,
-    });
+    const { items, total, unrated, byApproval, knockouts, relaxations } = await this.index.search(
+      {
+        duty,
+        policy: resolved.policy,
+        filters: await this.filtersOf(request),
+        showUnrated: request.show === 'met-and-unrated',
+        byCompanyNumber: request.group === 'company',
+        sort: sortOf(request.sort),
+        offset: (page - 1) * pageSize,
+        limit: pageSize,
+        relaxations: page === 1,
+      },
+      gone,
+    );
     const shown = await this.present(items, requirement, resolved);
     return { total, unrated, byApproval, items: shown, knockouts, relaxations, page, pageSize };
   }

@@ -3,6 +3,7 @@ export const PROBLEM_KINDS = {
   malformed: { status: 400, title: 'The request cannot be understood' },
   unauthenticated: { status: 401, title: 'Sign in first' },
   forbidden: { status: 403, title: 'This is not yours to do' },
+  abandoned: { status: 408, title: 'The request was given up' },
   'not-found': { status: 404, title: 'Nothing here by that name' },
   stale: { status: 409, title: 'Somebody else has changed this meanwhile' },
   conflict: { status: 409, title: 'This is in the way of something that exists' },

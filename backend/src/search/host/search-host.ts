@@ -5,6 +5,10 @@ import type { SearchPlan, SearchResult } from '../engine/search-plan';
 export interface SearchHost {
   /** Takes a new index; searches from then on use it. */
   take(index: CatalogueIndex): void;
-  search(plan: SearchPlan): Promise<SearchResult>;
+  /**
+   * @param gone aborted when nobody waits for the answer any more
+   * @throws Problem `abandoned` where that was so before the search began
+   */
+  search(plan: SearchPlan, gone?: AbortSignal): Promise<SearchResult>;
   close(): Promise<void>;
 }

@@ -1,8 +1,7 @@
 import type { CatalogueIndex } from '../index/catalogue-index';
 import type { SearchPlan, SearchResult } from '../engine/search-plan';
 
-export type ToSearchThread =
-  { kind: 'index'; index: CatalogueIndex } | { kind: 'search'; id: number; plan: SearchPlan };
+export type ToSearchThread = { kind: 'index'; index: CatalogueIndex } | { kind: 'search'; plan: SearchPlan };
 
 export type FromSearchThread =
-  { id: number; ok: true; result: SearchResult } | { id: number; ok: false; message: string; stack?: string };
+  { ok: true; result: SearchResult } | { ok: false; message: string; stack?: string };

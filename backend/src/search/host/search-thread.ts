@@ -12,7 +12,7 @@ port.on('message', (message: ToSearchThread) => {
     host.take(message.index);
     return;
   }
-  answer(message.id, () => host.search(message.plan)).then(
+  answer(() => host.search(message.plan)).then(
     (reply) => port.postMessage(reply),
     (error: unknown) => {
       throw error;
@@ -20,14 +20,11 @@ port.on('message', (message: ToSearchThread) => {
   );
 });
 
-async function answer(
-  id: number,
-  search: () => ReturnType<InlineSearchHost['search']>,
-): Promise<FromSearchThread> {
+async function answer(search: () => ReturnType<InlineSearchHost['search']>): Promise<FromSearchThread> {
   try {
-    return { id, ok: true, result: await search() };
+    return { ok: true, result: await search() };
   } catch (error) {
     if (!(error instanceof Error)) throw error;
-    return { id, ok: false, message: error.message, stack: error.stack };
+    return { ok: false, message: error.message, stack: error.stack };
   }
 }

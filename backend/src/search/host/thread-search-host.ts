@@ -1,27 +1,34 @@
 import { join } from 'node:path';
 import { Worker } from 'node:worker_threads';
+import { Problem } from '../../common/problems/problem';
 import type { SearchPlan, SearchResult } from '../engine/search-plan';
 import type { CatalogueIndex } from '../index/catalogue-index';
 import type { FromSearchThread, ToSearchThread } from './search-messages';
 import type { SearchHost } from './search-host';
 
 interface Waiting {
+  plan: SearchPlan;
+  gone?: AbortSignal;
   resolve: (result: SearchResult) => void;
   reject: (error: Error) => void;
 }
 
 /**
- * Computes in a thread of its own, so that a search over a large catalogue never keeps other requests waiting. A thread
- * that dies fails the searches it held and is replaced, with the same index.
+ * Computes in a thread of its own, so that a search over a large catalogue never keeps other requests waiting. One search
+ * after another; who types on gives the earlier ones up before they are begun. A thread that dies fails the search it held
+ * and is replaced, with the same index.
  */
 export class ThreadSearchHost implements SearchHost {
   private worker: Worker;
   private index?: CatalogueIndex;
-  private nextId = 1;
   private closing = false;
-  private readonly waiting = new Map<number, Waiting>();
+  private readonly queue: Waiting[] = [];
+  private running?: Waiting;
 
-  constructor() {
+  /** @param newThread starts the thread that searches */
+  constructor(
+    private readonly newThread: () => Worker = () => new Worker(join(__dirname, 'search-thread.js')),
+  ) {
     this.worker = this.start();
   }
 
@@ -30,12 +37,10 @@ export class ThreadSearchHost implements SearchHost {
     this.send({ kind: 'index', index });
   }
 
-  search(plan: SearchPlan): Promise<SearchResult> {
-    const id = this.nextId;
-    this.nextId += 1;
+  search(plan: SearchPlan, gone?: AbortSignal): Promise<SearchResult> {
     return new Promise((resolve, reject) => {
-      this.waiting.set(id, { resolve, reject });
-      this.send({ kind: 'search', id, plan });
+      this.queue.push({ plan, gone, resolve, reject });
+      this.begin();
     });
   }
 
@@ -44,28 +49,43 @@ export class ThreadSearchHost implements SearchHost {
     await this.worker.terminate();
   }
 
+  private begin(): void {
+    while (this.running === undefined) {
+      const next = this.queue.shift();
+      if (next === undefined) return;
+      if (next.gone?.aborted === true) {
+        next.reject(new Problem('abandoned', 'Nobody waited for this search any more.'));
+        continue;
+      }
+      this.running = next;
+      this.send({ kind: 'search', plan: next.plan });
+    }
+  }
+
   private send(message: ToSearchThread): void {
     this.worker.postMessage(message);
   }
 
   private start(): Worker {
-    const worker = new Worker(join(__dirname, 'search-thread.js'));
+    const worker = this.newThread();
     worker.on('message', (reply: FromSearchThread) => {
-      const waiting = this.waiting.get(reply.id);
-      this.waiting.delete(reply.id);
-      if (reply.ok) waiting?.resolve(reply.result);
-      else waiting?.reject(Object.assign(new Error(reply.message), { stack: reply.stack }));
+      const { running } = this;
+      this.running = undefined;
+      if (reply.ok) running?.resolve(reply.result);
+      else running?.reject(Object.assign(new Error(reply.message), { stack: reply.stack }));
+      this.begin();
     });
     worker.on('error', (error: Error) => this.replace(error));
     return worker;
   }
 
   private replace(error: Error): void {
-    const lost = [...this.waiting.values()];
-    this.waiting.clear();
-    for (const { reject } of lost) reject(error);
+    const { running } = this;
+    this.running = undefined;
+    running?.reject(error);
     if (this.closing) return;
     this.worker = this.start();
     if (this.index !== undefined) this.send({ kind: 'index', index: this.index });
+    this.begin();
   }
 }
