@@ -15,3 +15,7 @@ export type Scale = ScaleContinuousNumeric<number, number>;
 export function scaleOf(axis: AxisDefinition, range: readonly [number, number]): Scale {
   return (axis.logarithmic === true ? scaleLog() : scaleLinear()).domain(axis.domain).range(range);
 }
+
+/** A few round values from one end to the other. */
+export const roundTicks = (from: number, to: number, count: number): number[] =>
+  scaleLinear().domain([from, to]).ticks(count);

@@ -3,11 +3,15 @@ import type { PolicyEntry } from '@resistry/engineering/derating/policy-entry';
 import { formatQuantity } from '@resistry/engineering/notation/format-quantity';
 import { formatQuantityParts } from '@resistry/engineering/notation/format-quantity-parts';
 import type { DeratingCurve } from '@resistry/engineering/ratings/ratings';
+import { ChartLegend } from './chart-legend';
+import { roundTicks } from './chart-scales';
 import { deratingLines } from './derating-lines';
 import { LineChart, type Series } from './line-chart';
 import { NumbersTable } from './numbers-table';
 
 export interface DeratingChartProps {
+  /** Where no heading says already what it is. */
+  title?: string;
   /** W */
   ratedDissipation: number;
   curve: DeratingCurve;
@@ -18,7 +22,11 @@ export interface DeratingChartProps {
   operating?: { from: number; to: number; dissipation: number };
 }
 
-const axisWords = { ambient: 'ambient', terminal: 'terminals', case: 'case' } as const;
+const axisWords = {
+  ambient: 'ambient temperature',
+  terminal: 'temperature of the terminals',
+  case: 'temperature of the case',
+} as const;
 const coldestDrawn = -55;
 
 /** A prefix for the whole axis, so that its figures stay short. */
@@ -30,51 +38,48 @@ function powerUnit(watt: number): { factor: number; unit: string } {
 const figure = (value: number): string => String(Number(value.toPrecision(3)));
 const signed = (value: number): string => (value < 0 ? `\u2212${Math.abs(value)}` : String(value));
 
+/** Ticks in the order of what matters, without those whose figures would touch an earlier one's. */
+const apart = (ticks: readonly number[], gap: number): number[] =>
+  ticks.reduce<number[]>(
+    (kept, tick) => (kept.every((other) => Math.abs(other - tick) >= gap) ? [...kept, tick] : kept),
+    [],
+  );
+
 /** The derating curve with the policy's line and the point that the duty asks for. */
-export function DeratingChart({ ratedDissipation, curve, entry, policyName, operating }: DeratingChartProps) {
+export function DeratingChart(props: DeratingChartProps) {
+  const { title, ratedDissipation, curve, entry, policyName, operating } = props;
   const lines = deratingLines(ratedDissipation, curve, entry, coldestDrawn);
   const { factor, unit } = powerUnit(ratedDissipation);
   const [coldest, hottest] = lines.temperatures;
-  const knee = lines.manufacturer[lines.manufacturer.length - 2]?.[0] ?? hottest;
+  const levelTo = lines.levelTo;
+  const last = lines.manufacturer[lines.manufacturer.length - 1]?.[1] ?? 0;
+  const top = Math.max(ratedDissipation, operating?.dissipation ?? 0);
   const series: Series[] = [
-    {
-      name: 'manufacturer',
-      points: lines.manufacturer,
-      look: 'plain',
-      label: { at: [(knee + hottest) / 2, ratedDissipation * 0.62], anchor: 'middle' },
-    },
+    { name: 'manufacturer', points: lines.manufacturer, look: 'plain' },
     ...(lines.policy === undefined
       ? []
-      : [
-          {
-            name: policyName ?? 'policy',
-            points: lines.policy,
-            look: 'accent-dashed' as const,
-            label: {
-              at: [coldest + (knee - coldest) * 0.3, lines.policy[0]?.[1] ?? 0] as const,
-              anchor: 'middle' as const,
-            },
-          },
-        ]),
+      : [{ name: policyName ?? 'policy', points: lines.policy, look: 'accent-dashed' as const }]),
   ];
   return (
     <chakra.figure>
       <chakra.figcaption display="flex" justifyContent="space-between" fontSize="2xs" color="fg.muted">
-        <b>Derating</b>
-        <span>{axisWords[curve.axis]}, °C</span>
+        {title !== undefined && <b>{title}</b>}
+        <span>over the {axisWords[curve.axis]}, °C</span>
       </chakra.figcaption>
       <LineChart
-        label={`Derating: ${formatQuantity(ratedDissipation, 'power')} up to ${signed(knee)} °C, nothing left at ${signed(hottest)} °C`}
+        label={`Derating: ${formatQuantity(ratedDissipation, 'power')} up to ${signed(levelTo)} °C, ${
+          last === 0 ? 'nothing left' : `${formatQuantity(last, 'power', { significantDigits: 3 })} left`
+        } at ${signed(hottest)} °C`}
         x={{
           title: '°C',
           domain: [coldest, hottest],
-          ticks: [...new Set([coldest, 0, knee, hottest])],
+          ticks: apart([coldest, hottest, levelTo, 0], (hottest - coldest) / 12),
           format: signed,
         }}
         y={{
           title: unit,
-          domain: [0, Math.max(ratedDissipation, operating?.dissipation ?? 0)],
-          ticks: [0, 1 / 3, 2 / 3, 1].map((share) => share * ratedDissipation),
+          domain: [0, top],
+          ticks: apart([ratedDissipation, ...roundTicks(0, top, 4)], top / 9),
           format: (watt) => figure(watt * factor),
         }}
         series={series}
@@ -91,6 +96,7 @@ export function DeratingChart({ ratedDissipation, curve, entry, policyName, oper
           )
         }
       </LineChart>
+      {series.length > 1 && <ChartLegend series={series} />}
       <NumbersTable
         caption="Points of the manufacturer’s curve"
         headers={['°C', unit]}

@@ -11,13 +11,26 @@ const curve = {
 
 describe('the lines of a derating chart', () => {
   it('are level from the coldest temperature to the knee', () => {
-    const { manufacturer, temperatures } = deratingLines(0.25, curve, undefined, -55);
+    const { manufacturer, temperatures, levelTo } = deratingLines(0.25, curve, undefined, -55);
     expect(manufacturer).toEqual([
       [-55, 0.25],
       [70, 0.25],
       [155, 0],
     ]);
     expect(temperatures).toEqual([-55, 155]);
+    expect(levelTo).toBe(70);
+  });
+
+  it('are level to where a curve of several slopes begins to fall, or to its end', () => {
+    const points = [
+      [25, 1],
+      [70, 1],
+      [125, 0.5],
+      [155, 0],
+    ] as const;
+    expect(deratingLines(1, { axis: 'ambient', points }, undefined, -55).levelTo).toBe(70);
+    const level = { axis: 'case', points: [[85, 1]] } as const;
+    expect(deratingLines(1, level, undefined, -55).levelTo).toBe(85);
   });
 
   it('follow the policy, and never rise above the manufacturer', () => {

@@ -7,6 +7,8 @@ import type { Point } from './line-chart';
 export interface DeratingLines {
   /** °C */
   temperatures: readonly [number, number];
+  /** °C up to which the manufacturer's curve is level. */
+  levelTo: number;
   /** Points of (°C, W). */
   manufacturer: Point[];
   /** Absent where the manufacturer's ratings hold as they are. */
@@ -50,5 +52,8 @@ export function deratingLines(
       celsius,
       watt(allowedFraction(curve, entry, celsius)),
     ]);
-  return { temperatures: [first, zero], manufacturer, ...(policy && { policy }) };
+  const [[, level] = [first, 0]] = manufacturer;
+  const falling = manufacturer.findIndex(([, each]) => Math.abs(each - level) > level * 1e-9);
+  const [levelTo] = manufacturer[(falling === -1 ? manufacturer.length : falling) - 1] ?? [first];
+  return { temperatures: [first, zero], levelTo, manufacturer, ...(policy && { policy }) };
 }

@@ -5,13 +5,13 @@ import { type AxisDefinition, type Scale, scaleOf } from './chart-scales';
 
 export type Point = readonly [number, number];
 
+export type Look = 'plain' | 'accent-dashed' | 'muted-dotted';
+
 export interface Series {
   name: string;
   points: readonly Point[];
   /** Lines differ by dashes as well as by colour, for print and for those who see no difference of colour. */
-  look: 'plain' | 'accent-dashed' | 'muted-dotted';
-  /** Where the name stands; beside a point of the line. */
-  label?: { at: Point; anchor?: 'start' | 'middle' | 'end'; raise?: number };
+  look: Look;
 }
 
 export interface LineChartProps {
@@ -28,7 +28,7 @@ export interface LineChartProps {
 const width = 340;
 const margin = { top: 16, right: 10, bottom: 22, left: 36 };
 
-const looks = {
+export const looks = {
   plain: { color: 'fg', strokeDasharray: undefined, strokeWidth: 1.4 },
   'accent-dashed': { color: 'accent', strokeDasharray: '4 3', strokeWidth: 1.4 },
   'muted-dotted': { color: 'fg.muted', strokeDasharray: '1 3', strokeWidth: 1.6 },
@@ -76,7 +76,7 @@ export function LineChart({ label, x, y, series, height = 190, children }: LineC
         {y.title}
       </text>
       {children?.({ x: scaleX, y: scaleY })}
-      {series.map(({ name, points, look, label: place }) => (
+      {series.map(({ name, points, look }) => (
         <chakra.g key={name} color={looks[look].color}>
           <path
             d={path(points) ?? undefined}
@@ -85,15 +85,6 @@ export function LineChart({ label, x, y, series, height = 190, children }: LineC
             strokeWidth={looks[look].strokeWidth}
             strokeDasharray={looks[look].strokeDasharray}
           />
-          {place !== undefined && (
-            <text
-              x={scaleX(place.at[0])}
-              y={scaleY(place.at[1]) - (place.raise ?? 5)}
-              textAnchor={place.anchor ?? 'middle'}
-            >
-              {name}
-            </text>
-          )}
         </chakra.g>
       ))}
     </chakra.svg>

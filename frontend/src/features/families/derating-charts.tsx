@@ -30,7 +30,7 @@ function sharedCurves(sizes: readonly FamilySize[]): SharedCurve[] {
 }
 
 const Grid = chakra('div', {
-  base: { display: 'grid', gap: 6, gridTemplateColumns: 'repeat(auto-fill, minmax(min(17rem, 100%), 1fr))' },
+  base: { display: 'grid', gap: 6, gridTemplateColumns: 'repeat(auto-fill, minmax(min(20rem, 100%), 1fr))' },
 });
 
 /** The derating curves of a family; what states none is in the table as not stated. */

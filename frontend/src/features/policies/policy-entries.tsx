@@ -9,7 +9,8 @@ const readingWords = {
   multiplied: 'the manufacturer’s curve times the share',
 } as const;
 
-const unset = <span className="not-stated">none</span>;
+/** Absent in the policy: it sets no such limit, which is no value of one. */
+const unset = <span className="not-stated">not stated</span>;
 
 function Line({ entry }: { entry: PolicyEntry }) {
   if (entry.reading === 'multiplied') return <>{readingWords.multiplied}</>;

@@ -79,6 +79,7 @@ export function AssessmentSection({ part, assessment, duty, policyName }: Assess
       <div>
         {derating !== undefined && ratedDissipation !== undefined && !link && (
           <DeratingChart
+            title="Derating"
             ratedDissipation={ratedDissipation}
             curve={derating}
             entry={entry}

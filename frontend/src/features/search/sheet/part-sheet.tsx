@@ -104,6 +104,7 @@ function SheetBody({ part, assessment, duty, policyName }: SheetBodyProps) {
       {derating !== undefined && ratedDissipation !== undefined && (
         <Suspense fallback={<Loading label="Drawing the derating curve" lines={4} />}>
           <DeratingChart
+            title="Derating"
             ratedDissipation={ratedDissipation}
             curve={derating}
             entry={entry}
