@@ -20,20 +20,35 @@ const Table = chakra('table', {
     '& thead th': { color: 'fg.muted', fontSize: 'xs', fontWeight: 'semibold', whiteSpace: 'nowrap' },
     '& tbody th': { fontWeight: 'semibold' },
     '& [data-number]': { textAlign: 'end', whiteSpace: 'nowrap' },
+    '& small': { color: 'fg.muted', fontSize: 'xs' },
+    '& .not-stated': { whiteSpace: 'nowrap' },
+    // What a row is about stays in sight while the rest of it is scrolled past.
+    '& tr > :first-child': {
+      position: 'sticky',
+      insetInlineStart: 0,
+      zIndex: 1,
+      bg: 'bg',
+      maxWidth: { base: '9.5rem', md: 'none' },
+      overflowWrap: 'anywhere',
+    },
   },
 });
 
 export interface RuledTableProps {
   /** Names the table, and the strip that scrolls it where the screen is narrow. */
   label: string;
+  /** Below this the table is scrolled rather than squeezed. */
+  minWidth?: string;
   children: ReactNode;
 }
 
 /** A table short enough to be read as a whole, with hairlines between its rows. */
-export function RuledTable({ label, children }: RuledTableProps) {
+export function RuledTable({ label, minWidth, children }: RuledTableProps) {
   return (
     <Scroller role="group" aria-label={label} tabIndex={0}>
-      <Table aria-label={label}>{children}</Table>
+      <Table aria-label={label} style={{ minWidth }}>
+        {children}
+      </Table>
     </Scroller>
   );
 }

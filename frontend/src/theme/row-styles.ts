@@ -25,8 +25,15 @@ export const rowStyles = defineGlobalStyles({
   '.margin-word[data-status=unmet]': { color: 'unmet' },
   '.margin-word[data-status=unrated]': { color: 'unrated', fontWeight: 'normal' },
 
-  '.status-word': { display: 'inline-flex', alignItems: 'center', gap: 1.5, whiteSpace: 'nowrap' },
-  '.status-word svg': { width: '0.75rem', height: '0.75rem' },
+  '.status-word': { display: 'inline-flex', alignItems: 'baseline', gap: 1.5, whiteSpace: 'nowrap' },
+  // Its own bottom would stand on the line of the words; a shape is centred on their height.
+  '.status-word svg': {
+    width: '0.75rem',
+    height: '0.75rem',
+    position: 'relative',
+    top: '0.1em',
+    flexShrink: 0,
+  },
   '.status-word[data-strong]': { fontWeight: 'semibold' },
   '.status-word[data-tone=preferred] svg': { color: 'preferred' },
   '.status-word[data-tone=met] svg': { color: 'met' },

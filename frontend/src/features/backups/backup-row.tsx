@@ -43,7 +43,7 @@ export function BackupRow({ backup: { name, details } }: { backup: ListedBackup 
   const check = useCheckBackup();
   return (
     <tr>
-      <chakra.th scope="row" whiteSpace="nowrap">
+      <chakra.th scope="row" whiteSpace={{ md: 'nowrap' }}>
         {details === undefined ? name : momentWords(details.createdAt)}
         <chakra.span display="block" fontWeight="normal" color="fg.muted">
           {details === undefined ? 'damaged: it cannot say what it holds' : reasonWords[details.reason]}

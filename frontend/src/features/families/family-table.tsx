@@ -28,7 +28,7 @@ export function FamilyTable({ families }: { families: readonly FamilySummary[] }
       <tbody>
         {families.map((family) => (
           <tr key={family.id}>
-            <chakra.th scope="row" minWidth="10rem">
+            <chakra.th scope="row" minWidth={{ md: '10rem' }}>
               <Link to={`/families/${family.id}`}>{family.code}</Link>
               <chakra.span display="block" fontWeight="normal" color="fg.muted">
                 {family.name}

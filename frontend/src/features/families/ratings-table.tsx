@@ -56,7 +56,7 @@ export function RatingsTable({ revision }: { revision: FamilyRevision }) {
             </tr>
             {rows.map(({ label, field, show }) => (
               <tr key={label}>
-                <chakra.th scope="row" minWidth="12rem">
+                <chakra.th scope="row" minWidth={{ md: '12rem' }}>
                   <Cited
                     label={label}
                     citations={revision.citations.filter((citation) => citation.field === field)}

@@ -43,11 +43,11 @@ export function OffersSection({ part }: { part: OfferedPart }) {
           headers={[
             { words: 'Supplier' },
             { words: 'Valid' },
-            { words: 'Order', align: 'end' },
-            { words: 'Lead time', align: 'end' },
+            { words: 'Order', number: true },
+            { words: 'Lead time', number: true },
             ...quantities.map((quantity) => ({
               words: `€ from ${count.format(quantity)}`,
-              align: 'end' as const,
+              number: true,
             })),
             ...(mayChange ? [{ words: 'Change' }] : []),
           ]}
@@ -61,13 +61,13 @@ export function OffersSection({ part }: { part: OfferedPart }) {
                 {dayWords(offer.validFrom)} to {dayWords(offer.validUntil)}
                 <small>{stateWords(offer, today)}</small>
               </td>
-              <td data-align="end">
+              <td data-number>
                 {count.format(offer.minimumOrder)}
                 <small> by {count.format(offer.orderMultiple)}</small>
               </td>
-              <td data-align="end">{offer.leadTimeDays} days</td>
+              <td data-number>{offer.leadTimeDays} days</td>
               {quantities.map((quantity) => (
-                <td key={quantity} data-align="end">
+                <td key={quantity} data-number>
                   {words(offer, quantity)}
                 </td>
               ))}

@@ -13,7 +13,7 @@ const mayWords = { always: 'may', conditional: 'may, if' } as const;
 function Line({ line, roles }: { line: PermissionLine; roles: readonly Schema<'Role'>[] }) {
   return (
     <tr>
-      <chakra.th scope="row" whiteSpace="nowrap">
+      <chakra.th scope="row" whiteSpace={{ md: 'nowrap' }}>
         {actionWords(line.action)} <chakra.span fontWeight="normal">{subjectWords(line.subject)}</chakra.span>
       </chakra.th>
       {roles.map((role) => {

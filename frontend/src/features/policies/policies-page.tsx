@@ -22,7 +22,7 @@ function Versions({ label, policies }: { label: string; policies: readonly Polic
       <tbody>
         {policies.map((policy) => (
           <tr key={policy.id}>
-            <chakra.th scope="row" whiteSpace="nowrap">
+            <chakra.th scope="row" whiteSpace={{ md: 'nowrap' }}>
               <Link to={`/policies/${policy.id}`}>
                 {policy.name} {policy.version}
               </Link>

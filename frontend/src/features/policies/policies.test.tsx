@@ -26,6 +26,10 @@ describe('a policy', () => {
       },
     }));
     renderApplication('/policies/1');
-    expect(await screen.findByRole('row', { name: /Wirewound 50 % .*80 % not stated not stated not stated not stated$/ })).toBeVisible();
+    expect(
+      await screen.findByRole('row', {
+        name: /Wirewound 50 % .*80 % not stated not stated not stated not stated$/,
+      }),
+    ).toBeVisible();
   });
 });

@@ -47,7 +47,7 @@ export function PolicyEntries({ entries }: { entries: readonly PolicyEntry[] }) 
       <tbody>
         {entries.map((entry, place) => (
           <tr key={`${place} ${policyMatchWords(entry.match)}`}>
-            <chakra.th scope="row" minWidth="9rem">
+            <chakra.th scope="row" minWidth={{ md: '9rem' }}>
               {policyMatchWords(entry.match)}
             </chakra.th>
             <td>
