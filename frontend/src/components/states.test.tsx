@@ -15,13 +15,20 @@ const clash = new Problem(
 );
 
 describe('the designed states', () => {
-  it('shows a failure in words, with its fields, the request to quote and a way to try again', async () => {
-    const retry = jest.fn();
-    renderInTheme(<Failed error={clash} onRetry={retry} />);
+  it('shows a refusal in words, with its fields where they say more, and nothing to try again', () => {
+    renderInTheme(<Failed error={clash} onRetry={jest.fn()} />);
     const alert = screen.getByRole('alert');
     expect(alert).toHaveTextContent('The duty contradicts itself');
     expect(alert).toHaveTextContent('/duty/window/lower lies above 4.9 kΩ');
-    expect(alert).toHaveTextContent('quote request req-7');
+    expect(alert).not.toHaveTextContent('quote request');
+    expect(screen.queryByRole('button', { name: 'Try again' })).not.toBeInTheDocument();
+  });
+
+  it('shows a failure of the server with the request to quote and a way to try again', async () => {
+    const retry = jest.fn();
+    const failure = new Problem('unexpected', 500, 'It went wrong', undefined, 'req-9', [], undefined);
+    renderInTheme(<Failed error={failure} onRetry={retry} />);
+    expect(screen.getByRole('alert')).toHaveTextContent('quote request req-9');
     await userEvent.click(screen.getByRole('button', { name: 'Try again' }));
     expect(retry).toHaveBeenCalledTimes(1);
   });
@@ -37,6 +44,7 @@ describe('the designed states', () => {
   it('says what it waits for', () => {
     renderInTheme(<Loading label="Reading the part" />);
     expect(screen.getByRole('status')).toHaveTextContent('Reading the part');
+    expect(screen.getByRole('status')).toHaveAttribute('aria-busy', 'true');
   });
 
   it('says what to do where nothing is', () => {

@@ -10,6 +10,7 @@ import { Failed, Loading } from '../../components/states';
 import { roleWords } from '../../wording/role-words';
 import { AuthFrame } from './auth-frame';
 import { tokenOfFragment } from './fragment-token';
+import { IncompleteLink } from './incomplete-link';
 import { newPassword, repeatedPassword } from './password-rules';
 import { useAcceptInvitation } from './requests/accept-invitation';
 import { useInvitationPreview } from './requests/preview-invitation';
@@ -35,6 +36,7 @@ export function Component() {
       </AuthFrame>
     );
   }
+  if (token === '') return <IncompleteLink title="This invitation cannot be read" />;
   if (preview.isPending) {
     return (
       <AuthFrame title="Accept the invitation">

@@ -8,6 +8,7 @@ import { FormField } from '../../components/form-field';
 import { FormRefusal } from '../../components/form-refusal';
 import { AuthFrame } from './auth-frame';
 import { tokenOfFragment } from './fragment-token';
+import { IncompleteLink } from './incomplete-link';
 import { newPassword, repeatedPassword } from './password-rules';
 import { useResetPassword } from './requests/reset-password';
 
@@ -16,6 +17,13 @@ const schema = object({ password: newPassword, repeated: repeatedPassword });
 export function Component() {
   const token = tokenOfFragment(useLocation().hash);
   const reset = useResetPassword();
+  if (token === '') {
+    return (
+      <IncompleteLink title="This link cannot be used">
+        <Link to="/forgotten-password">Ask for another link</Link>
+      </IncompleteLink>
+    );
+  }
   if (reset.isSuccess) {
     return (
       <AuthFrame title="The new password holds" lead="Every other sign-in of yours has been ended.">

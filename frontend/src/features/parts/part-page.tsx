@@ -1,7 +1,7 @@
 import { chakra } from '@chakra-ui/react';
 import { useCallback, useMemo } from 'react';
 import { Link, useParams } from 'react-router-dom';
-import { Failed, Loading } from '../../components/states';
+import { Failed, Loading, NotReadAgain } from '../../components/states';
 import { OffersSection } from '../offers/offers-section';
 import { usePolicies } from '../policies/requests/list-policies';
 import { readDuty } from '../search/duty/read-duty';
@@ -54,25 +54,30 @@ const Pair = chakra('div', {
 export function Component() {
   const id = Number(useParams().id);
   const part = usePart(id);
-  if (part.isError) {
-    return (
-      <Frame>
-        <title>Part · Resistry</title>
-        <chakra.h1 srOnly>Part</chakra.h1>
-        <Failed error={part.error} onRetry={() => void part.refetch()} />
-      </Frame>
-    );
-  }
+  const again = (): void => void part.refetch();
   if (part.data === undefined) {
     return (
       <Frame>
         <title>Part · Resistry</title>
         <chakra.h1 srOnly>Part</chakra.h1>
-        <Loading label="Reading the part" lines={14} />
+        {part.isError ? (
+          <Failed error={part.error} onRetry={again} />
+        ) : (
+          <Loading label="Reading the part" lines={14} />
+        )}
       </Frame>
     );
   }
-  return <PartPage key={id} part={part.data} />;
+  return (
+    <>
+      {part.isError && (
+        <Frame>
+          <NotReadAgain error={part.error} onRetry={again} />
+        </Frame>
+      )}
+      <PartPage key={id} part={part.data} />
+    </>
+  );
 }
 
 function PartPage({ part }: { part: PartDetails }) {

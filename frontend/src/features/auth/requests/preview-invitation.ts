@@ -20,6 +20,7 @@ export const invitationPreview = (token: string) =>
     queryKey: ['invitations', 'preview', token],
     queryFn: ({ signal }) => previewInvitation(token, signal),
     staleTime: Infinity,
+    enabled: token !== '',
   });
 
 export const useInvitationPreview = (token: string) => useQuery(invitationPreview(token));

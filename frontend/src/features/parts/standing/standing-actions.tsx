@@ -18,7 +18,7 @@ function offeredOf(transitions: Transitions): Offered[] {
     })),
     ...transitions.supplyTransitions.map((transition): Offered => ({
       door: 'supply',
-      deed: supplyDeed(transition.to),
+      deed: supplyDeed(transitions.supply, transition.to),
       transition,
     })),
   ];
@@ -37,7 +37,8 @@ export function StandingActions({ part }: { part: PartDetails }) {
   const transitions = useTransitions(part.id);
   const [chosen, setChosen] = useState<Offered>();
   if (transitions.isPending) return <Loading label="Reading what may become of it" lines={2} />;
-  if (transitions.isError)
+  // Read again and failed, what was read before stays, and with it what is being typed.
+  if (transitions.data === undefined)
     return <Failed error={transitions.error} onRetry={() => void transitions.refetch()} />;
   const all = offeredOf(transitions.data);
   // Read again after a stale change, it may demand something else by now.
