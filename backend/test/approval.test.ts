@@ -218,7 +218,7 @@ describe('changing the approval of a part', () => {
       ],
     });
     await application.delivered();
-    expect((await lettersTo(administrator, engineer.person.email))[0]?.subject).toContain('is now in-review');
+    expect((await lettersTo(administrator, engineer.person.email))[0]?.subject).toContain('is now in review');
     await engineer
       .post(`/api/parts/${id}/approval`, { to: 'approved', reason: 'Good', version: 2 })
       .expect(200);
@@ -228,7 +228,7 @@ describe('changing the approval of a part', () => {
     await application.delivered();
     for (const person of [submitter, librarian]) {
       const [letter] = await lettersTo(administrator, person.person.email);
-      expect(letter?.subject).toBe('SKUA0603FS is now approved; it was in-review');
+      expect(letter?.subject).toBe('SKUA0603FS is now approved; it was in review');
     }
     expect((await engineer.get('/api/reviews').expect(200)).body).toEqual({ total: 0, items: [] });
   });
@@ -256,7 +256,7 @@ describe('changing the approval of a part', () => {
     });
     await application.delivered();
     const [letter] = await lettersTo(administrator, submitter.person.email);
-    expect(letter?.subject).toBe('SKUA0603FB is now draft; it was in-review');
+    expect(letter?.subject).toBe('SKUA0603FB is now a draft; it was in review');
     await submit(3).expect(200);
   });
 

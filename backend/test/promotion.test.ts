@@ -46,7 +46,10 @@ describe('what a promotion demands', () => {
     expect(problem.errors).toEqual([
       { pointer: '/to', message: expect.stringContaining('No datasheet is on record') as string },
       { pointer: '/exception', message: expect.stringContaining('no second source') as string },
-      { pointer: '/to', message: expect.stringContaining('not-recommended, not active') as string },
+      {
+        pointer: '/to',
+        message: expect.stringContaining('not recommended for new designs, not active') as string,
+      },
       { pointer: '/to', message: expect.stringContaining('No offer is in force') as string },
     ]);
     expect(await catalogueState(application.nest)).toEqual(before);

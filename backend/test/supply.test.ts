@@ -65,7 +65,7 @@ describe('changing the supply status of a part', () => {
     });
     await application.delivered();
     const [letter] = await lettersTo(administrator, engineer.person.email);
-    expect(letter?.subject).toBe(`SKUA0603F${made} is now last-time-buy in supply; it was active`);
+    expect(letter?.subject).toBe(`SKUA0603F${made} is now a last-time buy in supply; it was active`);
     expect(letter?.text).toContain('a review of it is open');
 
     await set(id, 'discontinued', 2).expect(200);

@@ -23,7 +23,7 @@ const ENTERED = `SELECT entered_at AS at, entered_by AS actor, 'create' AS actio
   SELECT o.entered_at, o.entered_by, 'create', 'Offer', o.id, NULL,
     json_object('part', p.manufacturer_part_number, 'supplier', s.name, 'packaging', o.packaging_code,
       'minimumOrder', o.minimum_order, 'orderMultiple', o.order_multiple, 'leadTimeDays', o.lead_time_days,
-      'validFrom', o.valid_from, 'validUntil', o.valid_until, 'prices', json(${pricesSql})), NULL
+      'validFrom', o.valid_from, 'validUntil', o.valid_until, 'prices', json(${pricesSql})), 'Entered from the supplier’s quotation.'
     FROM offers AS o JOIN parts AS p ON p.id = o.part_id JOIN suppliers AS s ON s.id = o.supplier_id
   UNION ALL
   SELECT v.entered_at, v.entered_by, 'create', 'Policy', v.policy_id, NULL,

@@ -1,4 +1,5 @@
 import type { Approval } from '@resistry/engineering/ratings/technology';
+import { supplyWords } from '../parts/standing/standing-words';
 import type { Columns } from './family';
 import { momentOf } from './moments';
 import type { ApprovalStep, SupplyStep } from './standing';
@@ -107,7 +108,7 @@ function supplyReviews(approval: readonly ApprovalStep[], supply: readonly Suppl
   const before = approval.findLast((step) => step.decided.on <= leaving.decided.on);
   if (!before || !inUse.includes(before.to)) return [];
   const after = approval.find((step) => step.decided.on > leaving.decided.on);
-  const words = `Supply changed to ${leaving.to}: ${leaving.reason}`;
+  const words = `Its supply is now ${supplyWords[leaving.to]}: ${leaving.reason}`;
   return [reviewRow('left-active-supply', words, leaving, momentOf(leaving.decided.on, 11), after)];
 }
 

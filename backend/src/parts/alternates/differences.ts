@@ -107,5 +107,5 @@ function curveWords(curve: DeratingCurve | undefined): string | undefined {
 function driftWords({ drift }: Ratings): string | undefined {
   if (!drift) return undefined;
   const test = `${drift.hours} h at ${formatQuantity(drift.temperature, 'temperature')}`;
-  return `${formatQuantity(drift.fraction, 'tolerance')} in ${test}`;
+  return `${formatQuantity(drift.fraction, 'fraction')} in ${test}`;
 }

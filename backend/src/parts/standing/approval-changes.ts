@@ -13,6 +13,7 @@ import { PartReviews } from './part-reviews';
 import type { PartStanding } from './part-standing';
 import { StandingDoor } from './standing-door';
 import { StandingLetters } from './standing-letters';
+import { approvalWords } from './standing-words';
 
 export interface ApprovalChange extends ApprovalInput {
   to: Approval;
@@ -57,7 +58,7 @@ export class ApprovalChanges {
           reason: change.reason,
         });
         await this.follow(transaction, actor, part, change);
-        return `is now ${change.to}`;
+        return `is now ${approvalWords[change.to]}`;
       },
     });
   }
@@ -99,7 +100,8 @@ export class ApprovalChanges {
     part: PartStanding,
     { to, reason }: ApprovalChange,
   ): Promise<void> {
-    const event = to === part.approval ? `stays ${to}` : `is now ${to}; it was ${part.approval}`;
+    const was = approvalWords[part.approval];
+    const event = to === part.approval ? `stays ${was}` : `is now ${approvalWords[to]}; it was ${was}`;
     const news = { part, actor, reason, event };
     if (to === 'in-review') {
       await this.reviews.open(transaction, part.id, { cause: 'submitted', words: reason, actor });
@@ -118,13 +120,16 @@ function refuse(part: PartStanding, change: ApprovalChange): void {
   const name = part.manufacturer_part_number;
   const reachable = reachableApprovals(part);
   if (!reachable.includes(change.to)) {
-    const message = `A part that is ${part.approval} can only become ${reachable.join(', ')}.`;
-    throw new ClashProblem(`${name} cannot become ${change.to}. ${message}`, [{ pointer: '/to', message }]);
+    const ends = reachable.map((approval) => approvalWords[approval]).join(', ');
+    const message = `A part that is ${approvalWords[part.approval]} can only become ${ends}.`;
+    throw new ClashProblem(`${name} cannot become ${approvalWords[change.to]}. ${message}`, [
+      { pointer: '/to', message },
+    ]);
   }
   const errors = [...misplaced(change), ...unmet(approvalDemands(change.to, part, change))];
   if (errors.length > 0) {
     const words = errors.map(({ message }) => message).join(' ');
-    throw new ClashProblem(`${name} cannot become ${change.to}: ${words}`, errors);
+    throw new ClashProblem(`${name} cannot become ${approvalWords[change.to]}: ${words}`, errors);
   }
 }
 

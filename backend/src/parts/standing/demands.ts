@@ -1,6 +1,7 @@
 import type { Approval, SupplyStatus } from '@resistry/engineering/ratings/technology';
 import type { FieldError } from '../../common/problems/problem';
 import type { PartStanding } from './part-standing';
+import { supplyWords } from './standing-words';
 
 export const demandNames = [
   'datasheet',
@@ -75,7 +76,9 @@ function demandsOfPreference(part: PartStanding, { exception }: ApprovalInput): 
       field: 'to',
       met: part.supply === 'active',
       words:
-        part.supply === 'active' ? 'It is in active supply.' : `Its supply is ${part.supply}, not active.`,
+        part.supply === 'active'
+          ? 'It is in active supply.'
+          : `Its supply is ${supplyWords[part.supply]}, not active.`,
     },
     {
       name: 'offer',

@@ -13,6 +13,7 @@ import { PartReviews } from './part-reviews';
 import type { PartStanding } from './part-standing';
 import { StandingDoor } from './standing-door';
 import { StandingLetters } from './standing-letters';
+import { approvalWords, supplyWords } from './standing-words';
 import { supplyTransitions } from './supply-transitions';
 
 export interface SupplyChange {
@@ -69,7 +70,7 @@ export class SupplyChanges {
           reason: change.reason,
         });
         await this.follow(transaction, actor, part, change);
-        return `is now ${change.to} in supply`;
+        return `is now ${supplyWords[change.to]} in supply`;
       },
     });
   }
@@ -110,7 +111,7 @@ export class SupplyChanges {
     { to, reason }: SupplyChange,
   ): Promise<void> {
     if (!approvalsInUse.includes(part.approval)) return;
-    const words = `Supply changed from ${part.supply} to ${to}: ${reason}`;
+    const words = `Its supply was ${supplyWords[part.supply]} and is now ${supplyWords[to]}: ${reason}`;
     const opened =
       part.supply === 'active' &&
       (await this.reviews.open(transaction, part.id, { cause: 'left-active-supply', words, actor }));
@@ -118,8 +119,8 @@ export class SupplyChanges {
       part,
       actor,
       reason,
-      event: `is now ${to} in supply; it was ${part.supply}`,
-      request: opened ? `The part is ${part.approval}: a review of it is open.` : undefined,
+      event: `is now ${supplyWords[to]} in supply; it was ${supplyWords[part.supply]}`,
+      request: opened ? `The part is ${approvalWords[part.approval]}: a review of it is open.` : undefined,
     });
   }
 }
@@ -128,8 +129,11 @@ function refuse(part: PartStanding, change: SupplyChange, today: string): void {
   const name = part.manufacturer_part_number;
   const reachable = supplyTransitions[part.supply];
   if (!reachable.includes(change.to)) {
-    const message = `A supply that is ${part.supply} can only become ${reachable.join(', ')}.`;
-    throw new ClashProblem(`${name} cannot become ${change.to}. ${message}`, [{ pointer: '/to', message }]);
+    const ends = reachable.map((supply) => supplyWords[supply]).join(', ');
+    const message = `A supply that is ${supplyWords[part.supply]} can only become ${ends}.`;
+    throw new ClashProblem(`${name} cannot become ${supplyWords[change.to]}. ${message}`, [
+      { pointer: '/to', message },
+    ]);
   }
   const errors = [
     ...misplaced(change, today),
@@ -137,7 +141,7 @@ function refuse(part: PartStanding, change: SupplyChange, today: string): void {
   ];
   if (errors.length > 0) {
     const words = errors.map(({ message }) => message).join(' ');
-    throw new ClashProblem(`${name} cannot become ${change.to}: ${words}`, errors);
+    throw new ClashProblem(`${name} cannot become ${supplyWords[change.to]}: ${words}`, errors);
   }
 }
 
