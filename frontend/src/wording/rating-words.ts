@@ -19,6 +19,12 @@ const words: Record<string, string> = {
   inductance: 'Inductance',
   capacitance: 'Capacitance',
   pulses: 'Pulses',
+  'pulses.single': 'Single pulses',
+  'pulses.continuous': 'Repeated pulses',
+  'pulses.voltage': 'Pulse voltage',
+  'pulses.energy': 'Pulse energy',
+  'pulses.shift': 'Shift by pulses',
+  failureRateStyle: 'Style in the failure-rate handbook',
   drift: 'Drift in the load-life test',
   solderShift: 'Shift by soldering',
   humidityShift: 'Shift by humidity',
@@ -42,3 +48,9 @@ const words: Record<string, string> = {
 
 /** A field that has no words of its own is shown by its name rather than left out. */
 export const ratingWords = (field: string): string => words[field] ?? field;
+
+/** As it stands within a sentence; what is written in capitals stays so. */
+export function ratingWordsInLine(field: string): string {
+  const name = ratingWords(field);
+  return /^[A-Z][A-Z]/.test(name) ? name : name.charAt(0).toLowerCase() + name.slice(1);
+}

@@ -1,3 +1,4 @@
+import type { Schema } from '../api/schema';
 import type { Approval, SupplyStatus } from '@resistry/engineering/ratings/technology';
 
 export const approvalWords: Record<Approval, string> = {
@@ -14,4 +15,11 @@ export const supplyWords: Record<SupplyStatus, string> = {
   'not-recommended': 'Not for new designs',
   'last-time-buy': 'Last-time buy',
   discontinued: 'Discontinued',
+};
+
+/** Why a part is looked at. */
+export const reviewWords: Record<Schema<'OpenReviewDto'>['cause'], string> = {
+  submitted: 'Submitted',
+  'left-active-supply': 'Left active supply',
+  'lost-second-source': 'Lost its second source',
 };

@@ -1,13 +1,26 @@
 import { chakra } from '@chakra-ui/react';
+import { Link } from 'react-router-dom';
 import { DrawnPart } from '../../components/drawn-part/drawn-part';
 import { StatusWord } from '../../components/status-word';
 import { dayWords } from '../../wording/date-words';
+import { reviewWords } from '../../wording/standing-words';
 import { technologyWords } from '../../wording/technology-words';
 import { bodyOfPart, sizeCode, valueWords } from '../search/results/part-figures';
 import { leadingNumber } from '../search/search-part';
 import type { PartDetails } from './requests/get-part';
 
-/** Who the part is and how it stands. */
+const Notice = chakra('p', {
+  base: {
+    borderInlineStart: '3px solid',
+    borderColor: 'caution',
+    ps: 3,
+    mt: 1.5,
+    fontSize: 'sm',
+    whiteSpace: 'pre-line',
+  },
+});
+
+/** Who the part is, how it stands and what it waits for. */
 export function PartHead({ part }: { part: PartDetails }) {
   const body = bodyOfPart(part);
   return (
@@ -19,7 +32,8 @@ export function PartHead({ part }: { part: PartDetails }) {
         </chakra.h1>
         <p>
           {part.companyPartNumber !== undefined && <b>{part.manufacturerPartNumber} </b>}
-          {part.manufacturer.name} {part.family.code}, {part.family.name}
+          {part.manufacturer.name} <Link to={`/families/${part.family.id}`}>{part.family.code}</Link>,{' '}
+          {part.family.name}
         </p>
         <chakra.p color="fg.muted" fontSize="sm">
           {technologyWords[part.technology]}, {sizeCode(part)}, {valueWords(part)}
@@ -31,13 +45,19 @@ export function PartHead({ part }: { part: PartDetails }) {
           <span>{part.secondSource ? 'has a second source' : 'no second source'}</span>
         </chakra.p>
         {part.restriction !== undefined && (
-          <chakra.p fontSize="sm" mt={1.5} borderInlineStart="3px solid" borderColor="caution" ps={3}>
+          <Notice>
             <b>Restricted.</b> {part.restriction.words}{' '}
             {part.restriction.scope === undefined
               ? 'It holds everywhere.'
-              : `It holds for ${part.restriction.scope}.`}
-          </chakra.p>
+              : `Scope: ${part.restriction.scope}.`}
+          </Notice>
         )}
+        {part.openReviews.map((review) => (
+          <Notice key={review.id}>
+            <b>{reviewWords[review.cause]}, waits for a review</b> since {dayWords(review.openedAt)}, opened
+            by {review.openedBy.name}: {review.words}
+          </Notice>
+        ))}
       </chakra.div>
     </chakra.header>
   );

@@ -128,10 +128,11 @@ describe('the page of a part', () => {
 
   it('judges an alternate, names what it lacks and how it differs, and offers with their prices', async () => {
     renderApplication(address);
-    const alternates = await table('Alternates');
+    const alternates = await screen.findByRole('list', { name: 'Alternates' });
     expect(alternates).toHaveTextContent('Not equalrated dissipation 400 mW → 250 mW in the mode “power”');
     expect(alternates).toHaveTextContent('Cannot be said for limiting element voltage 200 V → not stated');
-    expect(alternates).toHaveTextContent('Worse: tcr 100 ppm/K → 200 ppm/K');
+    expect(alternates).toHaveTextContent('Differences: 1 worse');
+    expect(alternates).toHaveTextContent('Worse: TCR 100 ppm/K → 200 ppm/K');
     expect(within(alternates).getByRole('link', { name: 'LKP1206-4K7' })).toHaveAttribute(
       'href',
       expect.stringContaining('/parts/200?'),
@@ -172,7 +173,7 @@ describe('the page of a part', () => {
       { to: 'restricted', reason: 'Salt mist.', version: 4, words: 'Indoors only.', scope: 'buoys' },
     ]);
     const history = screen.getByRole('region', { name: 'Approval history' });
-    expect(history).toHaveTextContent('Indoors only. Holds for buoys.');
+    expect(history).toHaveTextContent('Indoors only. Scope: buoys.');
   });
 
   it('says that somebody else was quicker, reads the part again and keeps what was written', async () => {

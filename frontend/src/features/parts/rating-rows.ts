@@ -1,7 +1,15 @@
 import { formatQuantity } from '@resistry/engineering/notation/format-quantity';
 import type { Quantity } from '@resistry/engineering/notation/quantity';
 import type { Ratings } from '@resistry/engineering/ratings/ratings';
-import { featureWords } from '../../wording/technology-words';
+import { featureWords, mountingWords } from '../../wording/technology-words';
+import {
+  bodyText,
+  deratingText,
+  driftText,
+  pulseVoltageText,
+  repeatedPulsesText,
+  singlePulsesText,
+} from './rating-texts';
 
 /** One rating as a line of the table: its field, under which it is cited, and its words in each mode. */
 export interface RatingRow {
@@ -11,8 +19,6 @@ export interface RatingRow {
   /** Of links only, or of resistors only; of both where absent. */
   only?: 'link' | 'resistor';
 }
-
-const secondsPerHour = 3600;
 
 const figure = (
   field: string,
@@ -28,32 +34,6 @@ const figure = (
   },
 });
 
-function driftWords({ drift }: Ratings): string | undefined {
-  if (drift === undefined) return undefined;
-  const hours = formatQuantity(drift.hours * secondsPerHour, 'time');
-  const at = formatQuantity(drift.temperature, 'temperature');
-  const law =
-    drift.law === undefined
-      ? ''
-      : `; grows by (t/t₀)^${drift.law.exponent}, doubles per ${drift.law.doubling} K`;
-  return `${formatQuantity(drift.fraction, 'fraction')} after ${hours} at ${at}${law}`;
-}
-
-function bodyWords({ body }: Ratings): string | undefined {
-  if (body === undefined) return undefined;
-  return [body.length, body.width, body.height].map((side) => formatQuantity(side, 'length')).join(' × ');
-}
-
-function deratingWords({ derating }: Ratings): string | undefined {
-  if (derating === undefined) return undefined;
-  const points = derating.points.map(
-    ([celsius, fraction]) =>
-      `${formatQuantity(fraction, 'fraction')} at ${formatQuantity(celsius, 'temperature')}`,
-  );
-  const axis = { ambient: 'ambient', terminal: 'at the terminals', case: 'of the case' }[derating.axis];
-  return `${points.join(', ')} (${axis})`;
-}
-
 /** The ratings in the order in which a datasheet is read. */
 export const ratingRows: readonly RatingRow[] = [
   figure('resistance', 'resistance', (ratings) => ratings.resistance, 'resistor'),
@@ -63,7 +43,7 @@ export const ratingRows: readonly RatingRow[] = [
   figure('link.ratedCurrent', 'current', (ratings) => ratings.link?.ratedCurrent, 'link'),
   figure('link.residualResistance', 'resistance', (ratings) => ratings.link?.residualResistance, 'link'),
   figure('ratedDissipation', 'power', (ratings) => ratings.ratedDissipation, 'resistor'),
-  { field: 'derating', words: deratingWords },
+  { field: 'derating', words: deratingText },
   figure('limitingElementVoltage', 'voltage', (ratings) => ratings.limitingElementVoltage, 'resistor'),
   figure('overloadVoltage', 'voltage', (ratings) => ratings.overloadVoltage, 'resistor'),
   figure('insulationVoltage', 'voltage', (ratings) => ratings.insulationVoltage),
@@ -76,13 +56,19 @@ export const ratingRows: readonly RatingRow[] = [
   figure('maxElementTemperature', 'temperature', (ratings) => ratings.maxElementTemperature),
   figure('thermalResistance', 'thermal-resistance', (ratings) => ratings.thermalResistance, 'resistor'),
   figure('voltageCoefficient', 'voltage-coefficient', (ratings) => ratings.voltageCoefficient, 'resistor'),
-  { field: 'drift', only: 'resistor', words: driftWords },
+  { field: 'drift', only: 'resistor', words: driftText },
   figure('solderShift', 'fraction', (ratings) => ratings.solderShift, 'resistor'),
   figure('humidityShift', 'fraction', (ratings) => ratings.humidityShift, 'resistor'),
   figure('noiseIndex', 'noise-index', (ratings) => ratings.noiseIndex, 'resistor'),
+  { field: 'pulses.single', only: 'resistor', words: singlePulsesText },
+  { field: 'pulses.continuous', only: 'resistor', words: repeatedPulsesText },
+  { field: 'pulses.voltage', only: 'resistor', words: pulseVoltageText },
+  figure('pulses.energy', 'energy', (ratings) => ratings.pulses?.energy, 'resistor'),
+  figure('pulses.shift', 'fraction', (ratings) => ratings.pulses?.shift, 'resistor'),
   figure('inductance', 'inductance', (ratings) => ratings.inductance),
   figure('capacitance', 'capacitance', (ratings) => ratings.capacitance),
-  { field: 'body', words: bodyWords },
+  { field: 'mounting', words: ({ mounting }) => mounting && mountingWords[mounting] },
+  { field: 'body', words: bodyText },
   {
     field: 'features',
     words: ({ features = [] }) =>
@@ -90,6 +76,7 @@ export const ratingRows: readonly RatingRow[] = [
         ? 'none claimed'
         : features.map((feature) => featureWords[feature].toLowerCase()).join(', '),
   },
+  { field: 'failureRateStyle', only: 'resistor', words: ({ failureRateStyle }) => failureRateStyle },
 ];
 
 /** The rows that make sense for a part: a link has no tolerance, and a resistor no residual resistance. */

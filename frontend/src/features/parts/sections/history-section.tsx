@@ -36,9 +36,9 @@ function Step({ status, at, by, reason, more }: StepProps) {
       <div>
         {status}
         {more !== undefined && more !== '' && <small>{more}</small>}
-        <small>
-          {reason} {by}
-        </small>
+        <chakra.small whiteSpace="pre-line">
+          {by}: {reason}
+        </chakra.small>
       </div>
     </li>
   );
@@ -60,7 +60,7 @@ export function HistorySection({ part }: { part: PartDetails }) {
               reason={step.reason}
               more={[
                 step.words,
-                step.scope && `Holds for ${step.scope}.`,
+                step.scope && `Scope: ${step.scope}.`,
                 step.exception && `Exception: ${step.exception}`,
               ]
                 .filter(Boolean)
@@ -87,11 +87,6 @@ export function HistorySection({ part }: { part: PartDetails }) {
             ))}
           </Steps>
         )}
-        {part.openReviews.map((review) => (
-          <Quiet key={review.id}>
-            Waits for a review since {dayWords(review.openedAt)}: {review.words}
-          </Quiet>
-        ))}
       </Section>
     </>
   );

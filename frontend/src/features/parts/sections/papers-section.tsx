@@ -1,3 +1,4 @@
+import { Link } from 'react-router-dom';
 import { PlainTable } from '../../../components/plain-table';
 import { dayWords } from '../../../wording/date-words';
 import type { PartDetails } from '../requests/get-part';
@@ -36,7 +37,9 @@ export function PapersSection({ part }: { part: PartDetails }) {
         </PlainTable>
       )}
       <Quiet>
-        Ratings of revision {revision.number}, published {dayWords(revision.publishedAt)}
+        Ratings of{' '}
+        <Link to={`/families/${part.family.id}?revision=${revision.number}`}>revision {revision.number}</Link>
+        , published {dayWords(revision.publishedAt)}
         {revision.datasheet !== undefined &&
           `, after ${revision.datasheet.documentNumber}, revision ${revision.datasheet.revision}`}
         .

@@ -1,3 +1,4 @@
+import { chakra } from '@chakra-ui/react';
 import { Link } from 'react-router-dom';
 import { PlainTable } from '../../../components/plain-table';
 import { StatusWord } from '../../../components/status-word';
@@ -21,17 +22,16 @@ export function SourcesSection({ part, search }: { part: PartDetails; search: st
       <PlainTable
         label={`Sources under ${number}`}
         headers={[
-          { words: 'Place', align: 'end' },
           { words: 'Part' },
+          { words: 'Place', number: true },
           { words: 'Approval' },
           { words: 'Supply' },
-          { words: '€ at 1,000', align: 'end' },
+          { words: '€ at 1,000', number: true },
         ]}
       >
         {part.sources.map((source) => (
           <tr key={source.id}>
-            <td data-align="end">{source.position}</td>
-            <td>
+            <chakra.th scope="row" fontWeight="normal">
               {source.id === part.id ? (
                 <b>{source.manufacturerPartNumber}</b>
               ) : (
@@ -40,7 +40,8 @@ export function SourcesSection({ part, search }: { part: PartDetails; search: st
               <small>
                 {source.manufacturer.name} {source.family.code}
               </small>
-            </td>
+            </chakra.th>
+            <td data-number>{source.position}</td>
             <td>
               <StatusWord kind="approval" status={source.approval} />
             </td>
@@ -48,7 +49,7 @@ export function SourcesSection({ part, search }: { part: PartDetails; search: st
               <StatusWord kind="supply" status={source.supply} />
               {source.lastOrderOn !== undefined && <small> last order {dayWords(source.lastOrderOn)}</small>}
             </td>
-            <td data-align="end">{priceWords(source.unitPrice)}</td>
+            <td data-number>{priceWords(source.unitPrice)}</td>
           </tr>
         ))}
       </PlainTable>

@@ -1,5 +1,4 @@
 import type { Approval, SupplyStatus } from '@resistry/engineering/ratings/technology';
-import { supplyWords } from '../../../wording/standing-words';
 import type { ApprovalTransition, SupplyTransition } from '../requests/get-transitions';
 
 const approvalDeeds: Record<ApprovalTransition['to'], string> = {
@@ -24,8 +23,15 @@ const fromElsewhere: Partial<Record<`${Approval} ${ApprovalTransition['to']}`, s
 export const approvalDeed = (from: Approval, to: ApprovalTransition['to']): string =>
   fromElsewhere[`${from} ${to}`] ?? approvalDeeds[to];
 
-export const supplyDeed = (to: SupplyStatus): string =>
-  to === 'last-time-buy' ? 'Announce a last-time buy' : `Set to ${supplyWords[to].toLowerCase()}`;
+const supplyDeeds: Record<SupplyStatus, string> = {
+  active: 'Set to active',
+  'not-recommended': 'Advise against new designs',
+  'last-time-buy': 'Announce a last-time buy',
+  discontinued: 'Set to discontinued',
+};
+
+export const supplyDeed = (from: SupplyStatus, to: SupplyStatus): string =>
+  from === 'last-time-buy' && to === from ? 'Change the last order date' : supplyDeeds[to];
 
 /** A transition as the page offers it. */
 export type Offered =
