@@ -4,8 +4,9 @@ import { object, string } from 'yup';
 import { Button } from '../../components/button';
 import { FormField } from '../../components/form-field';
 import { SelectField } from '../../components/select-field';
-import { subjectWords } from '../permissions/permission-words';
+import { actionWords, subjectWords } from '../permissions/permission-words';
 import { useUsers } from '../users/requests/list-users';
+import { auditActions } from './audit-actions';
 import type { AuditFilter } from './audit-address';
 
 /** Kinds of things that leave a trail. */
@@ -65,7 +66,16 @@ export function AuditFilters({ filter, onFilter }: AuditFiltersProps) {
               ]}
               onValue={(actor) => void setFieldValue('actor', actor)}
             />
-            <FormField name="action" label="Action" placeholder="any, as: approve" />
+            <SelectField
+              label="Action"
+              stacked
+              value={values.action}
+              options={[
+                { value: '', words: 'any' },
+                ...auditActions.map((action) => ({ value: action, words: actionWords(action) })),
+              ]}
+              onValue={(action) => void setFieldValue('action', action)}
+            />
             <SelectField
               label="Kind of thing"
               stacked

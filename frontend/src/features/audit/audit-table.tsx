@@ -34,9 +34,9 @@ export function AuditTable({ entries }: { entries: readonly AuditEntry[] }) {
       <tbody>
         {entries.map((entry) => (
           <tr key={entry.id}>
-            <chakra.td whiteSpace="nowrap">{momentWords(entry.recordedAt)}</chakra.td>
+            <chakra.td whiteSpace={{ md: 'nowrap' }}>{momentWords(entry.recordedAt)}</chakra.td>
             <chakra.td whiteSpace="nowrap">{entry.actorName}</chakra.td>
-            <chakra.th scope="row" whiteSpace="nowrap">
+            <chakra.th scope="row" minWidth="10rem">
               {actionWords(entry.action)}{' '}
               <chakra.span fontWeight="normal">
                 <Subject entry={entry} />
@@ -45,7 +45,7 @@ export function AuditTable({ entries }: { entries: readonly AuditEntry[] }) {
             <chakra.td minWidth="14rem">
               <Changes entry={entry} />
             </chakra.td>
-            <chakra.td minWidth="12rem" color="fg.muted">
+            <chakra.td minWidth="12rem" color="fg.muted" whiteSpace="pre-line">
               {entry.reason}
             </chakra.td>
           </tr>

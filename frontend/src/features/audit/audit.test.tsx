@@ -47,7 +47,7 @@ describe('the audit trail', () => {
 
   it('narrows by what is entered, and keeps it in the address', async () => {
     const { addressNow } = renderApplication('/audit?subject=Part');
-    await userEvent.type(await screen.findByRole('textbox', { name: 'Action' }), 'submit');
+    await userEvent.selectOptions(await screen.findByRole('combobox', { name: 'Action' }), 'submit');
     await userEvent.click(screen.getByRole('button', { name: 'Show' }));
     await waitFor(() => expect(addressNow()).toBe('/audit?subject=Part&action=submit'));
     await waitFor(() => expect(asked.at(-1)).toMatchObject({ subjectType: 'Part', action: 'submit' }));

@@ -14,6 +14,10 @@ function words(value: unknown): string | undefined {
   return JSON.stringify(value);
 }
 
+/** `leadTimeDays` as people say it. */
+export const fieldWords = (field: string): string =>
+  field.replace(/(?<=[a-z])[A-Z]/g, (letter) => ` ${letter.toLowerCase()}`);
+
 /** What differs between before and after, in the order in which the fields were recorded. */
 export function changedFields({
   before = {},

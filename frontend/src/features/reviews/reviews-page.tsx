@@ -1,69 +1,51 @@
-import { chakra } from '@chakra-ui/react';
-import { useState } from 'react';
-import { Link } from 'react-router-dom';
-import type { Schema } from '../../api/schema';
+import { useSearchParams } from 'react-router-dom';
 import { Answered } from '../../components/answered';
 import { Page } from '../../components/page';
 import { PageTurner } from '../../components/page-turner';
-import { RuledTable } from '../../components/ruled-table';
+import { SelectField } from '../../components/select-field';
 import { Empty } from '../../components/states';
-import { StatusWord } from '../../components/status-word';
-import { dayWords } from '../../wording/date-words';
-import { reviewsPerPage, useOpenReviews } from './requests/list-reviews';
+import { type ReviewState, reviewsPerPage, useReviews } from './requests/list-reviews';
+import { ReviewTable } from './review-table';
 
-function Reviews({ reviews }: { reviews: readonly Schema<'ReviewDto'>[] }) {
-  return (
-    <RuledTable label="Open reviews">
-      <thead>
-        <tr>
-          <th scope="col">Part</th>
-          <th scope="col">Why it waits</th>
-          <th scope="col">Approval</th>
-          <th scope="col">Opened</th>
-        </tr>
-      </thead>
-      <tbody>
-        {reviews.map(({ id, part, words, openedAt, openedBy }) => (
-          <tr key={id}>
-            <th scope="row">
-              <Link to={`/parts/${part.id}`}>
-                {part.companyPartNumber?.number ?? part.manufacturerPartNumber}
-              </Link>
-              <chakra.span display="block" fontWeight="normal" color="fg.muted">
-                {part.manufacturer.name} {part.manufacturerPartNumber}
-              </chakra.span>
-            </th>
-            <td>{words}</td>
-            <td>
-              <StatusWord kind="approval" status={part.approval} />
-            </td>
-            <td>
-              {dayWords(openedAt)} <span className="not-stated">{openedBy.name}</span>
-            </td>
-          </tr>
-        ))}
-      </tbody>
-    </RuledTable>
-  );
-}
+const states = [
+  { value: 'open', words: 'those that wait, the oldest first' },
+  { value: 'closed', words: 'those decided, the newest first' },
+] as const;
 
-/** Parts that wait for a decision, the oldest first; it is made on the page of the part. */
+const nothing: Record<ReviewState, { title: string; words: string }> = {
+  open: {
+    title: 'Nothing waits',
+    words:
+      'Parts that are submitted, that leave active supply, or that are preferred and lose their second source come here.',
+  },
+  closed: { title: 'Nothing has been decided', words: 'A decision on a part under review is kept here.' },
+};
+
+/** Parts that wait for a decision, and those that got one; it is made on the page of the part. */
 export function Component() {
-  const [page, setPage] = useState(1);
-  const reviews = useOpenReviews(page);
+  const [address, setAddress] = useSearchParams();
+  const state: ReviewState = address.get('state') === 'closed' ? 'closed' : 'open';
+  const asked = Number(address.get('page') ?? 1);
+  const page = Number.isInteger(asked) && asked > 0 ? asked : 1;
+  const reviews = useReviews(state, page);
+  const show = (change: { state?: string; page?: number }): void =>
+    setAddress({ state: change.state ?? state, page: String(change.page ?? 1) });
   return (
-    <Page title="Reviews" lead="Parts that wait for a decision, the oldest first.">
+    <Page title="Reviews" lead="Parts that wait for a decision. It is made on the page of the part.">
+      <SelectField label="Show" value={state} options={states} onValue={(value) => show({ state: value })} />
       <Answered query={reviews} label="Reading the reviews">
         {({ total, items }) =>
           items.length === 0 ? (
-            <Empty title="Nothing waits">
-              Parts that are submitted, that leave active supply, or that are preferred and lose their second
-              source come here.
-            </Empty>
+            <Empty title={nothing[state].title}>{nothing[state].words}</Empty>
           ) : (
             <>
-              <Reviews reviews={items} />
-              <PageTurner page={page} pageSize={reviewsPerPage} total={total} onPage={setPage} />
+              <ReviewTable state={state} reviews={items} />
+              <PageTurner
+                page={page}
+                pageSize={reviewsPerPage}
+                total={total}
+                onPage={(turned) => show({ page: turned })}
+              />
             </>
           )
         }

@@ -2,21 +2,28 @@ import { keepPreviousData, queryOptions, useQuery } from '@tanstack/react-query'
 import { client } from '../../../api/client';
 import type { Schema } from '../../../api/schema';
 
+export type Review = Schema<'ReviewDto'>;
+export type ReviewState = Review['state'];
+
 export const reviewsPerPage = 50;
 
-async function listOpenReviews(page: number, signal: AbortSignal): Promise<Schema<'ReviewList'>> {
+async function listReviews(
+  state: ReviewState,
+  page: number,
+  signal: AbortSignal,
+): Promise<Schema<'ReviewList'>> {
   const { data } = await client.get<Schema<'ReviewList'>>('/reviews', {
-    params: { state: 'open', page, pageSize: reviewsPerPage },
+    params: { state, page, pageSize: reviewsPerPage },
     signal,
   });
   return data;
 }
 
-const openReviews = (page: number) =>
+const reviews = (state: ReviewState, page: number) =>
   queryOptions({
-    queryKey: ['reviews', 'open', page],
-    queryFn: ({ signal }) => listOpenReviews(page, signal),
+    queryKey: ['reviews', state, page],
+    queryFn: ({ signal }) => listReviews(state, page, signal),
     placeholderData: keepPreviousData,
   });
 
-export const useOpenReviews = (page: number) => useQuery(openReviews(page));
+export const useReviews = (state: ReviewState, page: number) => useQuery(reviews(state, page));
