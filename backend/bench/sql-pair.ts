@@ -2,7 +2,6 @@ import { evaluateRows, type Evaluation } from '../src/search/engine/evaluation';
 import { allocateScratch, type Scratch } from '../src/search/engine/scratch';
 import type { CatalogueIndex } from '../src/search/index/catalogue-index';
 import type { Policy } from '@resistry/engineering/derating/policy-entry';
-import { requirementOf } from '@resistry/engineering/duty/requirement';
 import type { Duty } from '@resistry/engineering/duty/duty';
 import { approvals, supplyStatuses } from '@resistry/engineering/ratings/technology';
 import type { SearchAnswer } from './client';
@@ -54,14 +53,7 @@ export class SqlPair {
 
   /** Gives SQL the stretches of one duty; not timed. */
   async give(duty: Duty, policy: Policy): Promise<Evaluation> {
-    const evaluation = evaluateRows(
-      this.index,
-      this.index.rows,
-      requirementOf(duty),
-      policy,
-      this.scratch,
-      'all parts',
-    );
+    const evaluation = evaluateRows(this.index, this.index.rows, duty, policy, this.scratch, 'all parts');
     const standingBits = bitsOf(evaluation, 'approval') | bitsOf(evaluation, 'supply');
     await this.database.run('DROP TABLE IF EXISTS stretches');
     await this.database.run(

@@ -27,7 +27,10 @@ export class SearchIndex implements OnModuleInit, OnApplicationShutdown {
   private readonly host: SearchHost = __filename.endsWith('.ts')
     ? new InlineSearchHost()
     : new ThreadSearchHost();
-  private building?: Promise<{ index: CatalogueIndex; positions: ReadonlyMap<number, number> }>;
+  private current?: CatalogueIndex;
+  private building?: Promise<CatalogueIndex>;
+  /** Parts whose standing changed while the catalogue was read: theirs may have been read before or after. */
+  private readonly changedMeanwhile = new Set<number>();
 
   constructor(
     private readonly readers: Readers,
@@ -47,49 +50,52 @@ export class SearchIndex implements OnModuleInit, OnApplicationShutdown {
 
   /** The ratings that the index was built with. */
   async ratings(): Promise<ReadonlyMap<number, SizeRatings>> {
-    const { index } = await this.ready();
-    return index.ratings;
+    const { ratings } = await this.ready();
+    return ratings;
   }
 
   /** Builds the index if it is not built; a failed build is tried again at the next call. */
-  async ready(): Promise<{ index: CatalogueIndex; positions: ReadonlyMap<number, number> }> {
-    this.building ??= this.build();
-    try {
-      return await this.building;
-    } catch (error) {
-      this.building = undefined;
-      throw error;
-    }
+  async ready(): Promise<CatalogueIndex> {
+    return this.current ?? (await this.rebuild());
   }
 
   /** Reads the whole catalogue again: after parts, ratings or company part numbers have come or gone, and each day. */
   @Cron(CronExpression.EVERY_DAY_AT_1AM)
-  async rebuild(): Promise<void> {
-    const next = this.build();
-    await next;
-    this.building = next;
+  async rebuild(): Promise<CatalogueIndex> {
+    this.building ??= this.build().finally(() => (this.building = undefined));
+    return this.building;
   }
 
   /** Reads the standing of parts again after a change was committed, so that the next search shows it. */
   async refreshStanding(partIds: readonly number[]): Promise<void> {
-    if (this.building === undefined) return;
-    const { index, positions } = await this.ready();
-    const rows = await this.readers.select<StandingRow>(standingSql, { ids: JSON.stringify(partIds) });
-    for (const row of rows) {
-      const position = positions.get(row.id);
-      if (position !== undefined) fillStanding(index.columns, position, row);
-    }
+    if (this.building !== undefined) for (const id of partIds) this.changedMeanwhile.add(id);
+    if (this.current !== undefined) await this.readStanding(this.current, partIds);
+    else await this.building;
   }
 
   async onApplicationShutdown(): Promise<void> {
     await this.host.close();
   }
 
-  private async build(): Promise<{ index: CatalogueIndex; positions: ReadonlyMap<number, number> }> {
+  private async build(): Promise<CatalogueIndex> {
+    this.changedMeanwhile.clear();
     const index = await buildIndex(this.readers, await this.sizeRatings.all());
-    const positions = new Map<number, number>();
-    index.columns.partId.forEach((id, position) => positions.set(id, position));
+    while (this.changedMeanwhile.size > 0) {
+      const changed = [...this.changedMeanwhile];
+      this.changedMeanwhile.clear();
+      await this.readStanding(index, changed);
+    }
+    // No waiting from here on: a change is either in the set above or finds the new index.
     this.host.take(index);
-    return { index, positions };
+    this.current = index;
+    return index;
+  }
+
+  private async readStanding({ columns }: CatalogueIndex, partIds: readonly number[]): Promise<void> {
+    const rows = await this.readers.select<StandingRow>(standingSql, { ids: JSON.stringify(partIds) });
+    for (const row of rows) {
+      const position = columns.positionOfId[row.id] ?? -1;
+      if (position >= 0) fillStanding(columns, position, row);
+    }
   }
 }

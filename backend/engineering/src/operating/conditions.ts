@@ -2,6 +2,7 @@ import { allowedFraction } from '../derating/policy-line';
 import { driftOverLife, type DriftOverLife } from '../deviation/drift';
 import { altitudeFactor } from '../derating/altitude-factor';
 import { entryFor, type Policy, type PolicyEntry } from '../derating/policy-entry';
+import type { Duty } from '../duty/duty';
 import type { Requirement } from '../duty/requirement';
 import type { SteadyLoad } from '../duty/steady-load';
 import { standardReferenceTemperature, type Ratings } from '../ratings/ratings';
@@ -45,13 +46,19 @@ export interface Conditions {
   hours: number;
 }
 
-/** What every part of one size and operating mode shares, whatever its tolerance and TCR. */
-type SharedConditions = Omit<Conditions, 'ratings' | 'fixedSum' | 'fixedSquares' | 'tcr'>;
+/**
+ * What every part of one size and operating mode shares under the same surroundings, whatever its tolerance and TCR and
+ * whatever the load and the window.
+ */
+type SharedConditions = Omit<
+  Conditions,
+  'ratings' | 'requirement' | 'load' | 'rootSumSquare' | 'fixedSum' | 'fixedSquares' | 'tcr'
+>;
 
 /**
  * Flattens one set of ratings under a requirement and a policy.
- * @param sibling conditions of another tolerance or TCR of the same size and operating mode under the same requirement and
- *   policy, if there are any: what they share is not worked out again
+ * @param sibling conditions of the same size and operating mode, with any tolerance, TCR and duty, if there are any: what
+ *   they share is not worked out again. Surroundings and policy entries are the same if they are the same objects.
  */
 export function conditionsOf(
   ratings: Ratings,
@@ -59,18 +66,28 @@ export function conditionsOf(
   policy: Policy,
   sibling?: Conditions,
 ): Conditions {
+  const { duty } = requirement;
   const entry = policy === 'none' ? undefined : entryFor(policy.entries, ratings);
-  const shared =
-    sibling !== undefined && sibling.entry === entry
-      ? sibling
-      : sharedConditionsOf(ratings, requirement, policy, entry);
+  const policyUnmatched = policy !== 'none' && entry === undefined;
+  const shares =
+    sibling !== undefined &&
+    sibling.entry === entry &&
+    sibling.policyUnmatched === policyUnmatched &&
+    haveSameSurroundings(sibling.requirement.duty, duty);
+  const shared = shares ? sibling : sharedConditionsOf(ratings, duty, entry, policyUnmatched);
   const pulseShift = hasPulses(requirement) ? (ratings.pulses?.shift ?? 0) : 0;
   const tolerance = ratings.tolerance ?? 0;
   const solderShift = ratings.solderShift ?? 0;
   const humidityShift = ratings.humidityShift ?? 0;
   // Field by field: this is made for every row of a catalogue at every search, and a spread costs ten times as much.
   return {
+    ratings,
     requirement,
+    load: requirement.load,
+    rootSumSquare: duty.deviation === 'root-sum-square',
+    fixedSum: tolerance + solderShift + humidityShift + pulseShift,
+    fixedSquares: tolerance ** 2 + solderShift ** 2 + humidityShift ** 2 + pulseShift ** 2,
+    tcr: duty.ambient === undefined ? 0 : (ratings.tcr ?? 0),
     entry: shared.entry,
     policyUnmatched: shared.policyUnmatched,
     axis: shared.axis,
@@ -79,34 +96,29 @@ export function conditionsOf(
     altitude: shared.altitude,
     allowedDissipation: shared.allowedDissipation,
     allowedVoltage: shared.allowedVoltage,
-    load: shared.load,
-    rootSumSquare: shared.rootSumSquare,
     referenceTemperature: shared.referenceTemperature,
     coldSpan: shared.coldSpan,
     voltageCoefficient: shared.voltageCoefficient,
     driftOverLife: shared.driftOverLife,
     hours: shared.hours,
-    ratings,
-    fixedSum: tolerance + solderShift + humidityShift + pulseShift,
-    fixedSquares: tolerance ** 2 + solderShift ** 2 + humidityShift ** 2 + pulseShift ** 2,
-    tcr: requirement.duty.ambient === undefined ? 0 : (ratings.tcr ?? 0),
   };
+}
+
+function haveSameSurroundings(first: Duty, second: Duty): boolean {
+  return first.ambient === second.ambient && first.life === second.life;
 }
 
 function sharedConditionsOf(
   ratings: Ratings,
-  requirement: Requirement,
-  policy: Policy,
+  duty: Duty,
   entry: PolicyEntry | undefined,
+  policyUnmatched: boolean,
 ): SharedConditions {
-  const duty = requirement.duty;
-  const policyUnmatched = policy !== 'none' && entry === undefined;
   const axis = axisTemperature(duty, ratings.derating?.axis ?? 'ambient');
   const referenceTemperature = ratings.referenceTemperature ?? standardReferenceTemperature;
   const fraction = fractionOf(ratings, entry, policyUnmatched, axis);
   const altitude = altitudeOf(entry, duty.ambient?.altitude);
   return {
-    requirement,
     entry,
     policyUnmatched,
     axis,
@@ -115,8 +127,6 @@ function sharedConditionsOf(
     altitude,
     allowedDissipation: allowedDissipationOf(ratings, fraction, altitude),
     allowedVoltage: allowedVoltageOf(ratings, entry, policyUnmatched),
-    load: requirement.load,
-    rootSumSquare: duty.deviation === 'root-sum-square',
     referenceTemperature,
     coldSpan: duty.ambient === undefined ? 0 : referenceTemperature - duty.ambient.min,
     voltageCoefficient: ratings.voltageCoefficient ?? 0,

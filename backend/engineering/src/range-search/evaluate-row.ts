@@ -30,15 +30,22 @@ export function evaluateRow(row: Row, from: number, to: number, masks: RowMasks)
   }
 }
 
-/** The positions of [from, to) that the window leaves to be judged: every other part fails it by its nominal alone. */
+/**
+ * The positions of [from, to) that the window leaves to be judged: every other part fails it by its nominal resistance and
+ * its tolerance at delivery alone. `to` is not below `from`; where they are equal none is left.
+ * @param tolerance fraction
+ */
 export function insideWindow(
   window: { lower: number; upper: number },
+  tolerance: number,
   resistances: Float64Array,
   from: number,
   to: number,
 ): [from: number, to: number] {
-  const first = firstNotBelow(resistances, from, to, window.lower * (1 - guard));
-  return [first, firstAbove(resistances, first, to, window.upper * (1 + guard))];
+  const lowest = tolerance < 1 ? window.lower / (1 - tolerance) : Infinity;
+  const highest = window.upper / (1 + tolerance);
+  const first = firstNotBelow(resistances, from, to, lowest * (1 - guard));
+  return [first, firstAbove(resistances, first, to, highest * (1 + guard))];
 }
 
 function evaluateValue(
@@ -50,7 +57,8 @@ function evaluateValue(
 ): void {
   const window = conditions.requirement.window;
   if (window === undefined) return;
-  const [first, last] = insideWindow(window, resistances, from, to);
+  const tolerance = conditions.ratings.tolerance ?? 0;
+  const [first, last] = insideWindow(window, tolerance, resistances, from, to);
   setBit(masks.unmet, from, first, bit);
   setBit(masks.unmet, last, to, bit);
   if (first < last)

@@ -1,4 +1,4 @@
-/** Bounds of the largest value of x · share(x), proven from below and from above. */
+/** Bounds of the largest value of x · share(x), proven from above, and from below with room to settle in. */
 export interface Peak {
   least: number;
   most: number;
@@ -16,6 +16,13 @@ const narrowness = 1.001;
 /** Where the share has fallen this far, a part deviates beyond all measure and may count as without an operating point. */
 const leastShare = 1e-5;
 
+/**
+ * Where an operating point is only just left, settling creeps: each step is nearly as long as the one before. At a value
+ * smaller by this factor every step is at most 1 / 1.01 of the one before (the curve is convex, so its slope there is
+ * below that of the chord to the peak), and a few thousand steps settle it.
+ */
+const roomToSettle = 1.01;
+
 const golden = (Math.sqrt(5) - 1) / 2;
 
 /**
@@ -25,8 +32,11 @@ const golden = (Math.sqrt(5) - 1) / 2;
  */
 export function peakOf(share: (x: number) => number, end: number): Peak {
   const atEnd = share(end);
-  if (atEnd > leastShare && share(end * (1 + chord)) * (1 + chord) >= atEnd) {
-    return { least: end * atEnd, most: end * atEnd, atEnd: true };
+  const beyond = share(end * (1 + chord));
+  if (atEnd > leastShare && beyond * (1 + chord) >= atEnd) {
+    const stepRatio = (atEnd / beyond - 1) / chord;
+    const room = stepRatio < 1 / roomToSettle ? 1 : roomToSettle;
+    return { least: (end * atEnd) / room, most: end * atEnd, atEnd: true };
   }
   const product = (logarithm: number): number => Math.exp(logarithm) * share(Math.exp(logarithm));
   let low = Math.log(end / reach);
@@ -50,8 +60,7 @@ export function peakOf(share: (x: number) => number, end: number): Peak {
       atRight = product(right);
     }
   }
-  // Settling creeps where only just an operating point is left; below this it is quick.
-  const found = Math.max(0, atLeft, atRight) / narrowness;
+  const found = Math.max(0, atLeft, atRight) / roomToSettle;
   const shareBelow = share(Math.exp(low));
   return {
     least: shareBelow > leastShare ? found : 0,

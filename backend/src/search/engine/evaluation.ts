@@ -1,5 +1,6 @@
 import type { Policy } from '@resistry/engineering/derating/policy-entry';
-import type { Requirement } from '@resistry/engineering/duty/requirement';
+import type { Duty } from '@resistry/engineering/duty/duty';
+import { requirementOf, type Requirement } from '@resistry/engineering/duty/requirement';
 import { conditionsOf, type Conditions } from '@resistry/engineering/operating/conditions';
 import { askedChecks, type AskedCheck } from '@resistry/engineering/range-search/asked-checks';
 import { evaluateRow, insideWindow, type Row } from '@resistry/engineering/range-search/evaluate-row';
@@ -12,8 +13,8 @@ import { addStanding, anyStands, standingMasks, type StandingMasks } from './sta
 
 /**
  * How one row stands. Its parts at [from, to) have been judged by every check. The others lie outside the window by their
- * nominal resistance: of them it is only known in which stretches nothing but the window, and perhaps their standing in
- * the catalogue, removes them.
+ * nominal resistance and their tolerance: of them it is only known in which stretches nothing but the window, and perhaps
+ * their standing in the catalogue, removes them.
  */
 export interface RowOutcome {
   row: CatalogueRow;
@@ -34,6 +35,8 @@ interface Question {
   valueBit: number;
   standing: StandingMasks;
   scratch: Scratch;
+  /** Conditions of each operating mode that was looked at, by the number of the row. */
+  conditions: (Conditions[] | undefined)[];
 }
 
 /** How the rows of a catalogue stand under a requirement; the masks are in its scratch. */
@@ -66,29 +69,31 @@ export function conditionsOfRow(
 export function evaluateRows(
   index: CatalogueIndex,
   rows: readonly CatalogueRow[],
-  requirement: Requirement,
+  duty: Duty,
   policy: Policy,
   scratch: Scratch,
   extent: Extent,
 ): Evaluation {
+  const surroundings = scratch.surroundings.of(duty, policy);
+  const { ambient, life, conditions } = surroundings;
+  const requirement = requirementOf({ ...duty, ambient, life });
   const checks = askedChecks(requirement);
   const question: Question = {
     requirement,
-    policy,
+    policy: surroundings.policy,
     checks,
     valueBit: checks.find(({ definition }) => definition.name === 'value')?.bit ?? 0,
     standing: standingMasks(requirement, checks),
     scratch,
+    conditions,
   };
   scratch.masks.exact = 0;
   scratch.other.exact = 0;
-  // Rows of one size follow each other, and their conditions have most in common.
-  let siblings: Conditions[] = [];
-  let sizeId = 0;
+  let previous: CatalogueRow | undefined;
   const outcomes = rows.map((row) => {
-    if (row.sizeId !== sizeId) siblings = [];
-    sizeId = row.sizeId;
-    return outcomeOf(index, row, question, extent, siblings);
+    const sameSize = previous?.sizeId === row.sizeId ? conditions[previous.number] : undefined;
+    previous = row;
+    return outcomeOf(index, row, question, extent, conditions[row.number] ?? sameSize ?? []);
   });
   return { ...question, outcomes, exact: scratch.masks.exact + scratch.other.exact };
 }
@@ -96,28 +101,37 @@ export function evaluateRows(
 function outcomeOf(
   index: CatalogueIndex,
   row: CatalogueRow,
-  { requirement, checks, policy, scratch, standing }: Question,
+  { requirement, checks, policy, scratch, standing, conditions }: Question,
   extent: Extent,
-  siblings: Conditions[],
+  siblings: readonly Conditions[],
 ): RowOutcome {
   const { resistance } = index.columns;
   const { window, link } = requirement;
   const windowDecides = extent === 'inside the window' && window !== undefined && !link && !row.isLink;
-  const [from, to] = windowDecides ? insideWindow(window, resistance, row.from, row.to) : [row.from, row.to];
+  const [from, to] = windowDecides
+    ? insideWindow(window, row.tolerance ?? 0, resistance, row.from, row.to)
+    : [row.from, row.to];
   // Most rows hold no part that is approved at all; outside the window nothing is to be counted there.
   const around = anyStands(index.columns, standing, row.from, row.to) ? outside(row, from, to) : [];
   let passingOutside: readonly number[] = [];
   let isUnrated = true;
+  const ofModes: Conditions[] = [];
   for (const [mode, ratings] of row.modes.entries()) {
     // Outside the window every operating mode is unmet, and of equals the first stands.
     if (from >= to && (mode > 0 || around.length === 0)) break;
-    const conditions = conditionsOf(ratings, requirement, policy, siblings[mode]);
-    siblings[mode] = conditions;
-    const judged: Row = { conditions, answers: answersOf(conditions, checks), resistances: resistance };
+    const ofMode = conditionsOf(ratings, requirement, policy, siblings[mode]);
+    ofModes.push(ofMode);
+    const judged: Row = {
+      conditions: ofMode,
+      answers: answersOf(ofMode, checks),
+      resistances: resistance,
+    };
     if (mode === 0) passingOutside = passingStretches(judged, around);
     isUnrated &&= judged.answers.some(({ unloaded }) => unloaded === 'unrated');
     judgeMode(judged, mode, from, to, scratch);
   }
+  // What rows share does not change, so the first conditions are kept: new ones at every search would only grow old.
+  if (ofModes.length > (conditions[row.number]?.length ?? 0)) conditions[row.number] = ofModes;
   addStanding(index.columns, standing, scratch, from, to);
   return { row, from, to, passingOutside, isUnrated };
 }

@@ -50,6 +50,12 @@ export class Scope {
     return this.byCompanyNumber ? judgedSources(this.index, unit).every(holds) : holds(unit);
   }
 
+  /** Calls back for the positions that decide about a unit. */
+  forEachPosition(unit: number, visit: (position: number) => void): void {
+    if (this.byCompanyNumber) judgedSources(this.index, unit).forEach(visit);
+    else visit(unit);
+  }
+
   /** Calls back for every unit, or for those whose parts lie in an interval of resistance (Ω). */
   forEach(
     visit: (unit: number) => void,

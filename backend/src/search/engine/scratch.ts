@@ -1,12 +1,14 @@
 import type { RowMasks } from '@resistry/engineering/range-search/row-masks';
+import { SurroundingsMemory } from './surroundings';
 
-/** Masks of all parts of the catalogue; kept between searches, because a million parts are not worth allocating twice. */
+/** What is kept between searches over one index: a million parts are not worth allocating twice. */
 export interface Scratch {
   masks: RowMasks;
   /** For the second and further operating modes of a row. */
   other: RowMasks;
   /** Of parts with several operating modes, the checks that are unmet in every mode. */
   unmetInEveryMode: Uint32Array;
+  surroundings: SurroundingsMemory;
 }
 
 export function allocateScratch(length: number): Scratch {
@@ -15,5 +17,10 @@ export function allocateScratch(length: number): Scratch {
     unrated: new Uint32Array(length),
     exact: 0,
   });
-  return { masks: masks(), other: masks(), unmetInEveryMode: new Uint32Array(length) };
+  return {
+    masks: masks(),
+    other: masks(),
+    unmetInEveryMode: new Uint32Array(length),
+    surroundings: new SurroundingsMemory(),
+  };
 }

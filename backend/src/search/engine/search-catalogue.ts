@@ -1,5 +1,4 @@
 import { approvals } from '@resistry/engineering/ratings/technology';
-import { requirementOf } from '@resistry/engineering/duty/requirement';
 import type { CatalogueIndex } from '../index/catalogue-index';
 import { judgedSources } from './company-numbers';
 import { countNumbers, countParts } from './count-units';
@@ -18,11 +17,10 @@ import { relaxationsOf } from './relaxation/relaxations';
  * @throws DutyConflict where the duty contradicts itself
  */
 export function searchCatalogue(index: CatalogueIndex, plan: SearchPlan, scratch: Scratch): SearchResult {
-  const requirement = requirementOf(plan.duty);
   const scope = new Scope(index, plan);
   // The sources of a company part number can stand in rows that the filters leave out.
   const rows = plan.byCompanyNumber ? index.rows : scope.rows;
-  const evaluation = evaluateRows(index, rows, requirement, plan.policy, scratch, extentOf(plan));
+  const evaluation = evaluateRows(index, rows, plan.duty, plan.policy, scratch, extentOf(plan));
   const tally = plan.byCompanyNumber ? countNumbers(scope, evaluation) : countParts(index, scope, evaluation);
   const order = new PartOrder(index, evaluation);
   const compare = plan.byCompanyNumber

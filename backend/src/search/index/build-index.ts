@@ -8,13 +8,8 @@ import {
   type CompanyNumbers,
 } from './catalogue-columns';
 import type { CatalogueIndex } from './catalogue-index';
-import {
-  companyNumbersSql,
-  partColumnsSql,
-  sizesSql,
-  type PartColumnsRow,
-  type SizeRow,
-} from './part-columns-row';
+import { companyNumbersSql, sizesSql, type PartColumnsRow, type SizeRow } from './part-columns-row';
+import { countParts, readNumberRanks, readParts } from './read-parts';
 import { seriesBits } from './series-bits';
 
 /**
@@ -27,17 +22,28 @@ export async function buildIndex(
 ): Promise<CatalogueIndex> {
   const sizes = await readers.select<SizeRow>(sizesSql);
   const numbers = await readers.select<{ id: number }>(companyNumbersSql);
-  const all = await readers.select<PartColumnsRow>(partColumnsSql);
-  const parts = all.filter((part) => ratings.has(part.size_id));
   const companyPosition = new Map(numbers.map(({ id }, position) => [id, position]));
-  const columns = allocateColumns(parts.length);
+  const counts = await countParts(readers, (sizeId) => ratings.has(sizeId));
+  const lastId = counts.reduce((last, { last_id }) => Math.max(last, last_id), 0);
+  const ranks = await readNumberRanks(readers, lastId);
+  const columns = allocateColumns(
+    counts.reduce((sum, { parts }) => sum + parts, 0),
+    lastId,
+  );
   const bitsOf = remembered(seriesBits);
   const rows: CatalogueRow[] = [];
-  for (const [position, part] of parts.entries()) {
-    fill(columns, position, part, companyPosition);
-    columns.series[position] = bitsOf(part.resistance_ohm);
-    extendRows(rows, position, part, ratings);
+  let position = 0;
+  for await (const parts of readParts(readers, counts)) {
+    for (const part of parts) {
+      fill(columns, position, part, companyPosition);
+      columns.series[position] = bitsOf(part.resistance_ohm);
+      columns.numberRank[position] = ranks[part.id] ?? 0;
+      extendRows(rows, position, part, ratings);
+      position += 1;
+    }
   }
+  if (position !== columns.partId.length)
+    throw new Error('Parts came or went while the catalogue was read; it is read again at the next search.');
   return {
     columns,
     rows,
@@ -83,7 +89,7 @@ function fill(
   columns.resistance[position] = part.resistance_ohm;
   columns.company[position] =
     part.company_part_number_id === null ? -1 : (companyPosition.get(part.company_part_number_id) ?? -1);
-  columns.numberRank[position] = part.number_rank;
+  columns.positionOfId[part.id] = position;
   fillStanding(columns, position, part);
 }
 
@@ -121,6 +127,7 @@ function extendRows(
   const size = ratings.get(part.size_id);
   if (size === undefined) throw new Error(`Size ${String(part.size_id)} of the index has no ratings.`);
   rows.push({
+    number: rows.length,
     from: position,
     to: position + 1,
     sizeId: part.size_id,

@@ -19,12 +19,16 @@ export interface CatalogueColumns {
   company: Int32Array;
   /** One bit a series of preferred values that holds the resistance. */
   series: Uint8Array;
+  /** Position of the part with an id; −1 where the columns hold none. Indexed by id, not by position. */
+  positionOfId: Int32Array;
   /** Rank of the manufacturer part number in alphabetical order. */
   numberRank: Int32Array;
 }
 
 /** Parts of one size with one tolerance and TCR: positions [from, to). */
 export interface CatalogueRow {
+  /** Its place among the rows. */
+  number: number;
   from: number;
   to: number;
   sizeId: number;
@@ -57,8 +61,8 @@ export interface CompanyNumbers {
   source: Int32Array;
 }
 
-/** Columns of a given length in shared memory. */
-export function allocateColumns(length: number): CatalogueColumns {
+/** Columns of a given length in shared memory, for parts with ids up to `lastId`. */
+export function allocateColumns(length: number, lastId: number): CatalogueColumns {
   return {
     partId: new Int32Array(new SharedArrayBuffer(length * 4)),
     resistance: new Float64Array(new SharedArrayBuffer(length * 8)),
@@ -68,6 +72,7 @@ export function allocateColumns(length: number): CatalogueColumns {
     price: new Float64Array(new SharedArrayBuffer(length * 8)),
     company: new Int32Array(new SharedArrayBuffer(length * 4)),
     series: new Uint8Array(new SharedArrayBuffer(length)),
+    positionOfId: new Int32Array(new SharedArrayBuffer((lastId + 1) * 4)).fill(-1),
     numberRank: new Int32Array(new SharedArrayBuffer(length * 4)),
   };
 }

@@ -12,16 +12,24 @@ export interface PartColumnsRow {
   derived_second_source: number;
   derived_unit_price_micro: number | null;
   company_part_number_id: number | null;
-  number_rank: number;
 }
 
+/** Parts of the sizes from `$first` to `$last`. */
 export const partColumnsSql = `
   SELECT p.id, p.size_id, p.resistance_ohm, p.tolerance_fraction, p.tcr_per_kelvin, p.approval, p.supply,
-    p.derived_second_source, p.derived_unit_price_micro, a.company_part_number_id,
-    row_number() OVER (ORDER BY p.manufacturer_part_number) AS number_rank
+    p.derived_second_source, p.derived_unit_price_micro, a.company_part_number_id
   FROM parts p
   LEFT JOIN approved_sources a ON a.part_id = p.id
+  WHERE p.size_id BETWEEN $first AND $last
   ORDER BY p.size_id, p.tolerance_fraction, p.tcr_per_kelvin, p.resistance_ohm, p.id`;
+
+export const partCountsSql =
+  'SELECT size_id, count(*) AS parts, max(id) AS last_id FROM parts GROUP BY size_id ORDER BY size_id';
+
+/** Part numbers in alphabetical order, after `$after`. */
+export const partNumbersSql = `
+  SELECT id, manufacturer_part_number AS number FROM parts
+  WHERE manufacturer_part_number > $after ORDER BY manufacturer_part_number LIMIT $limit`;
 
 export interface SizeRow {
   id: number;

@@ -44,7 +44,7 @@ export function relaxNumber(
 }
 
 /** Of very many misses an even sample is looked at: the smallest change among them stands for all. */
-const sampled = 1000;
+const sampled = 300;
 
 /** The units nearest to being met; beside those with an unmet check some that only lack data, which a change can spare. */
 function nearestOf(units: readonly number[], nearness: (unit: number) => number): number[] {

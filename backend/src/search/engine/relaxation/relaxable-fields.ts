@@ -105,15 +105,13 @@ export function numberAt(duty: Duty, pointer: string): number {
   return value;
 }
 
-/** A copy of the duty with another value at a JSON pointer. */
+/** The duty with another value at a JSON pointer; what is not on the way to it stays the same object. */
 export function withValueAt(duty: Duty, pointer: string, value: unknown): Duty {
-  const copy = structuredClone(duty);
-  const names = pointer.slice(1).split('/');
-  const last = names.pop() ?? '';
-  let holder = copy as Record<string, unknown>;
-  for (const name of names) holder = holder[name] as Record<string, unknown>;
-  holder[last] = value;
-  return copy;
+  const replace = (holder: unknown, [name, ...rest]: readonly string[]): unknown =>
+    name === undefined
+      ? value
+      : { ...(holder as object), [name]: replace((holder as Record<string, unknown>)[name], rest) };
+  return replace(duty, pointer.slice(1).split('/')) as Duty;
 }
 
 /** A number moved outward to the next one of three significant digits (or whole degrees), never past the loosest. */

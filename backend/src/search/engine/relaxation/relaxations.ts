@@ -6,7 +6,7 @@ import { conditionsOfRow, type Evaluation } from '../evaluation';
 import { rowOfPosition } from '../row-of-position';
 import type { Scope } from '../scope';
 import type { Relaxation } from '../search-plan';
-import { bitsDependingOn, NearMisses, outsideByTolerance } from './near-misses';
+import { bitsDependingOn, NearMisses } from './near-misses';
 import { choicesOf, relaxChoice } from './relax-choice';
 import { relaxNumber } from './relax-number';
 import { relaxWindow, type Reach } from './relax-window';
@@ -20,15 +20,15 @@ import { NumbersOutside, PartsOutside } from './window-misses';
  */
 export function relaxationsOf(index: CatalogueIndex, scope: Scope, evaluation: Evaluation): Relaxation[] {
   const { checks, requirement } = evaluation;
-  const { duty, window } = requirement;
+  const { duty } = requirement;
   const retrial = new Retrial(index, scope, evaluation);
   const { valueBit } = evaluation;
   // Only a change of the window itself, or of the limits it follows from, brings back what lies outside it.
   const everywhere =
     valueBit === 0 || !(scope.byCompanyNumber || duty.limits !== undefined)
       ? undefined
-      : new NearMisses(scope, evaluation);
-  const inWindow = new NearMisses(scope, evaluation, window, outsideByTolerance(index, evaluation));
+      : new NearMisses(scope, evaluation, 'everywhere');
+  const inWindow = new NearMisses(scope, evaluation, 'inside the window');
   const nearness = nearnessOf(index, scope, evaluation);
   const found: (Relaxation | undefined)[] = [];
   if (duty.window !== undefined && !requirement.link) {

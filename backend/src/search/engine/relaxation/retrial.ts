@@ -53,10 +53,9 @@ export class Retrial {
     return (position) => {
       if (unmetStanding(columns, standing, position) !== 0) return false;
       if (conditions === undefined || row === undefined || position < row.from || position >= row.to) {
-        const next = rowOfPosition(rows, position);
-        const siblings = row !== undefined && next.sizeId === row.sizeId ? conditions : undefined;
-        row = next;
-        conditions = conditionsOfRow(next, requirement, this.evaluation.policy, siblings);
+        row = rowOfPosition(rows, position);
+        const { conditions: known, policy } = this.evaluation;
+        conditions = conditionsOfRow(row, requirement, policy, known[row.number]);
         hopeful = conditions.filter((mode) => canBeMet(mode, checks));
       }
       const ohm = columns.resistance[position] ?? NaN;

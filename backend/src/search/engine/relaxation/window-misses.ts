@@ -1,4 +1,4 @@
-import { firstAbove, firstNotBelow } from '@resistry/engineering/range-search/row-masks';
+import { insideWindow } from '@resistry/engineering/range-search/evaluate-row';
 import type { CatalogueIndex } from '../../index/catalogue-index';
 import type { Evaluation, RowOutcome } from '../evaluation';
 import type { Scope } from '../scope';
@@ -15,7 +15,7 @@ export interface WindowMisses {
   within(edge: Edge, to: number): number[];
 }
 
-/** Parts: those inside the window that its edge cuts off over life, and in every row the first ones beyond it. */
+/** Parts: those that were judged, and in every row the first ones beyond them that nothing but the window removes. */
 export class PartsOutside implements WindowMisses {
   constructor(
     private readonly index: CatalogueIndex,
@@ -28,9 +28,9 @@ export class PartsOutside implements WindowMisses {
     for (const outcome of this.evaluation.outcomes) {
       if (outcome.isUnrated) continue;
       for (let position = outcome.from; position < outcome.to; position += 1) {
-        if (!this.isCutByOther(edge, outcome, position) && this.isMiss(position)) found.push(position);
+        if (this.isMiss(position)) found.push(position);
       }
-      const outside = this.firstOutside(edge, outcome);
+      const outside = edge === 'upper' ? this.firstAbove(outcome) : this.lastBelow(outcome);
       if (outside !== undefined) found.push(outside);
     }
     return found;
@@ -38,48 +38,45 @@ export class PartsOutside implements WindowMisses {
 
   within(edge: Edge, to: number): number[] {
     const { resistance } = this.index.columns;
+    const { window } = this.evaluation.requirement;
+    if (window === undefined) return [];
     const found: number[] = [];
-    for (const outcome of this.evaluation.outcomes) {
-      if (outcome.isUnrated && outcome.row.modes.length === 1) continue;
-      for (let position = outcome.from; position < outcome.to; position += 1) {
-        if (this.isMiss(position)) found.push(position);
+    for (const { row, from, to: end, isUnrated } of this.evaluation.outcomes) {
+      if (isUnrated && row.modes.length === 1) continue;
+      const moved = { ...window, [edge]: to };
+      const [first, last] = insideWindow(moved, row.tolerance ?? 0, resistance, row.from, row.to);
+      for (let position = first; position < last; position += 1) {
+        const judged = position >= from && position < end;
+        if (judged ? this.isMiss(position) : this.couldStand(position)) found.push(position);
       }
-      const { row } = outcome;
-      const [first, last] =
-        edge === 'upper'
-          ? [outcome.to, firstAbove(resistance, outcome.to, row.to, to)]
-          : [firstNotBelow(resistance, row.from, outcome.from, to), outcome.from];
-      for (let position = first; position < last; position += 1)
-        if (this.couldStand(position)) found.push(position);
     }
     return found;
   }
 
-  /** Whether the tolerance alone reaches past the edge that is not moved. */
-  private isCutByOther(edge: Edge, { row }: RowOutcome, position: number): boolean {
+  /** The first part above the judged ones that the lower edge leaves alone. */
+  private firstAbove({ row, to, passingOutside }: RowOutcome): number | undefined {
     const { window } = this.evaluation.requirement;
-    const ohm = this.index.columns.resistance[position] ?? NaN;
-    const tolerance = row.tolerance ?? 0;
-    if (window === undefined) return true;
-    return edge === 'upper' ? ohm * (1 - tolerance) < window.lower : ohm * (1 + tolerance) > window.upper;
+    if (window === undefined) return undefined;
+    const uncut = { lower: window.lower, upper: Infinity };
+    const [first] = insideWindow(uncut, row.tolerance ?? 0, this.index.columns.resistance, row.from, row.to);
+    for (let place = 0; place < passingOutside.length; place += 2) {
+      const last = passingOutside[place + 1] ?? 0;
+      for (let position = Math.max(first, to, passingOutside[place] ?? 0); position < last; position += 1)
+        if (this.couldStand(position)) return position;
+    }
+    return undefined;
   }
 
-  private firstOutside(edge: Edge, { from, to, passingOutside }: RowOutcome): number | undefined {
-    if (edge === 'upper') {
-      for (let place = 0; place < passingOutside.length; place += 2) {
-        const last = passingOutside[place + 1] ?? 0;
-        for (let position = Math.max(to, passingOutside[place] ?? 0); position < last; position += 1)
-          if (this.couldStand(position)) return position;
-      }
-      return undefined;
-    }
+  /** The last part below the judged ones that the upper edge leaves alone. */
+  private lastBelow({ row, from, passingOutside }: RowOutcome): number | undefined {
+    const { window } = this.evaluation.requirement;
+    if (window === undefined) return undefined;
+    const uncut = { lower: 0, upper: window.upper };
+    const [, end] = insideWindow(uncut, row.tolerance ?? 0, this.index.columns.resistance, row.from, row.to);
     for (let place = passingOutside.length - 2; place >= 0; place -= 2) {
       const first = passingOutside[place] ?? 0;
-      for (
-        let position = Math.min(from, passingOutside[place + 1] ?? 0) - 1;
-        position >= first;
-        position -= 1
-      )
+      const last = Math.min(end, from, passingOutside[place + 1] ?? 0) - 1;
+      for (let position = last; position >= first; position -= 1)
         if (this.couldStand(position)) return position;
     }
     return undefined;
