@@ -15,7 +15,15 @@ export interface Server {
 export async function startServer(dataDirectory: string): Promise<Server> {
   const port = await freePort();
   const child = spawn(process.execPath, [join(__dirname, '..', '..', 'main.js')], {
-    env: { ...process.env, DATA_DIR: dataDirectory, SEED: 'demo', PORT: String(port), HOST: '127.0.0.1' },
+    // As `npm start` sets it.
+    env: {
+      MALLOC_ARENA_MAX: '2',
+      ...process.env,
+      DATA_DIR: dataDirectory,
+      SEED: 'demo',
+      PORT: String(port),
+      HOST: '127.0.0.1',
+    },
     stdio: ['ignore', 'ignore', 'inherit'],
   });
   const url = `http://127.0.0.1:${String(port)}`;

@@ -17,7 +17,7 @@ export const WRITER_PRAGMAS = [
 export const READER_PRAGMAS = [
   'PRAGMA busy_timeout = 10000',
   'PRAGMA query_only = ON',
-  'PRAGMA cache_size = -32000',
+  'PRAGMA cache_size = -16000',
   'PRAGMA temp_store = MEMORY',
 ];
 

@@ -6,6 +6,15 @@ import type { CatalogueIndex } from '../index/catalogue-index';
 import type { FromSearchThread, ToSearchThread } from './search-messages';
 import type { SearchHost } from './search-host';
 
+/** Searches leave little behind that lives on: a small nursery keeps the thread small. */
+const nurseryMegabytes = 16;
+
+function startThread(): Worker {
+  return new Worker(join(__dirname, 'search-thread.js'), {
+    resourceLimits: { maxYoungGenerationSizeMb: nurseryMegabytes },
+  });
+}
+
 interface Waiting {
   plan: SearchPlan;
   gone?: AbortSignal;
@@ -26,9 +35,7 @@ export class ThreadSearchHost implements SearchHost {
   private running?: Waiting;
 
   /** @param newThread starts the thread that searches */
-  constructor(
-    private readonly newThread: () => Worker = () => new Worker(join(__dirname, 'search-thread.js')),
-  ) {
+  constructor(private readonly newThread: () => Worker = startThread) {
     this.worker = this.start();
   }
 

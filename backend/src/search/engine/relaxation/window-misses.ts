@@ -40,14 +40,20 @@ export class PartsOutside implements WindowMisses {
     const { resistance } = this.index.columns;
     const { window } = this.evaluation.requirement;
     if (window === undefined) return [];
+    const moved = { ...window, [edge]: to };
     const found: number[] = [];
-    for (const { row, from, to: end, isUnrated } of this.evaluation.outcomes) {
-      if (isUnrated && row.modes.length === 1) continue;
-      const moved = { ...window, [edge]: to };
+    for (const { row, from, to: end, isUnrated, passingOutside } of this.evaluation.outcomes) {
+      const single = row.modes.length === 1;
+      if (isUnrated && single) continue;
       const [first, last] = insideWindow(moved, row.tolerance ?? 0, resistance, row.from, row.to);
-      for (let position = first; position < last; position += 1) {
-        const judged = position >= from && position < end;
-        if (judged ? this.isMiss(position) : this.couldStand(position)) found.push(position);
+      for (let position = Math.max(first, from); position < Math.min(last, end); position += 1)
+        if (this.isMiss(position)) found.push(position);
+      // In a second operating mode another stretch may pass, which nobody has looked at.
+      const outside = single ? passingOutside : [row.from, from, end, row.to];
+      for (let place = 0; place < outside.length; place += 2) {
+        const stretchEnd = Math.min(last, outside[place + 1] ?? 0);
+        for (let position = Math.max(first, outside[place] ?? 0); position < stretchEnd; position += 1)
+          if (this.couldStand(position)) found.push(position);
       }
     }
     return found;
