@@ -20,7 +20,8 @@ const Table = chakra('table', {
     '& thead th': { color: 'fg.muted', fontSize: 'xs', fontWeight: 'semibold', whiteSpace: 'nowrap' },
     '& tbody th': { fontWeight: 'semibold' },
     '& [data-number]': { textAlign: 'end', whiteSpace: 'nowrap' },
-    '& small': { color: 'fg.muted', fontSize: 'xs' },
+    '& [data-date]': { whiteSpace: 'nowrap' },
+    '& small': { color: 'fg.muted', fontSize: 'xs', fontWeight: 'normal' },
     '& .not-stated': { whiteSpace: 'nowrap' },
     // What a row is about stays in sight while the rest of it is scrolled past.
     '& tr > :first-child': {
@@ -28,8 +29,9 @@ const Table = chakra('table', {
       insetInlineStart: 0,
       zIndex: 1,
       bg: 'bg',
+      minWidth: { base: '8rem', md: '0' },
       maxWidth: { base: '9.5rem', md: 'none' },
-      overflowWrap: 'anywhere',
+      overflowWrap: { base: 'anywhere', md: 'break-word' },
     },
   },
 });

@@ -36,7 +36,7 @@ const Grid = chakra('div', {
       display: 'grid',
       gap: 4,
       alignItems: 'end',
-      gridTemplateColumns: { base: '1fr', sm: '1fr 1fr', lg: 'repeat(4, minmax(0, 1fr))' },
+      gridTemplateColumns: { base: 'repeat(2, minmax(0, 1fr))', lg: 'repeat(4, minmax(0, 1fr))' },
     },
     mb: 5,
   },

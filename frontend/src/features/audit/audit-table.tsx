@@ -42,10 +42,10 @@ export function AuditTable({ entries }: { entries: readonly AuditEntry[] }) {
                 <Subject entry={entry} />
               </chakra.span>
             </chakra.th>
-            <chakra.td minWidth="14rem">
+            <chakra.td minWidth="20rem">
               <Changes entry={entry} />
             </chakra.td>
-            <chakra.td minWidth="12rem" color="fg.muted" whiteSpace="pre-line">
+            <chakra.td minWidth="14rem" color="fg.muted" whiteSpace="pre-line">
               {entry.reason}
             </chakra.td>
           </tr>

@@ -1,3 +1,4 @@
+import { chakra } from '@chakra-ui/react';
 import { useSearchParams } from 'react-router-dom';
 import { Answered } from '../../components/answered';
 import { Page } from '../../components/page';
@@ -32,7 +33,15 @@ export function Component() {
     setAddress({ state: change.state ?? state, page: String(change.page ?? 1) });
   return (
     <Page title="Reviews" lead="Parts that wait for a decision. It is made on the page of the part.">
-      <SelectField label="Show" value={state} options={states} onValue={(value) => show({ state: value })} />
+      <chakra.div maxWidth="form" mb={4}>
+        <SelectField
+          label="Show"
+          stacked
+          value={state}
+          options={states}
+          onValue={(value) => show({ state: value })}
+        />
+      </chakra.div>
       <Answered query={reviews} label="Reading the reviews">
         {({ total, items }) =>
           items.length === 0 ? (

@@ -17,7 +17,7 @@ export function PapersSection({ part }: { part: PartDetails }) {
                 {certificate.kind === 'safety' ? 'Safety certificate' : 'Automotive evidence'}{' '}
                 {certificate.number}, {certificate.standard}
               </td>
-              <td>
+              <td data-date>
                 {dayWords(certificate.issuedOn)}
                 {certificate.expiresOn !== undefined &&
                   ` to ${dayWords(certificate.expiresOn)}${certificate.expired ? ', expired' : ''}`}
@@ -31,7 +31,7 @@ export function PapersSection({ part }: { part: PartDetails }) {
                 {declaration.exemption !== undefined && `, exemption ${declaration.exemption}`}{' '}
                 <small>{declaration.statement}</small>
               </td>
-              <td>{dayWords(declaration.datedOn)}</td>
+              <td data-date>{dayWords(declaration.datedOn)}</td>
             </tr>
           ))}
         </PlainTable>

@@ -1,3 +1,4 @@
+import { chakra } from '@chakra-ui/react';
 import { PlainTable } from '../../../components/plain-table';
 import { ratingWords } from '../../../wording/rating-words';
 import { rowsFor } from '../rating-rows';
@@ -53,11 +54,11 @@ export function RatingsSection({ part }: { part: PartDetails }) {
                 {words(mode.ratings) ?? <span className="not-stated">not stated</span>}
               </td>
             ))}
-            <td>
+            <chakra.td minWidth="13rem">
               {part.modes.some((mode) => words(mode.ratings) !== undefined) && (
                 <Cited citation={citationOf(part.citations, field)} />
               )}
-            </td>
+            </chakra.td>
           </tr>
         ))}
         {form.map(([field, value]) => (
