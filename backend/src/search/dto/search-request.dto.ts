@@ -11,10 +11,8 @@ import {
 import {
   ArrayMaxSize,
   IsArray,
-  IsBoolean,
   IsIn,
   IsInt,
-  IsNumber,
   IsOptional,
   IsString,
   Matches,
@@ -26,6 +24,7 @@ import { PolicyRequest } from '../../assessments/dto/assess-request.dto';
 import { DutyDto } from '../../assessments/dto/duty.dto';
 import { Nested } from '../../common/validation/nested';
 import { sortColumns } from '../engine/search-plan';
+import { AnyId, AnyNumber, AnyOf, Whether } from './filter-fields';
 
 const sortPattern = new RegExp(`^-?(${sortColumns.join('|')})$`);
 
@@ -37,27 +36,13 @@ export class FiltersDto {
   @MaxLength(100)
   text?: string;
 
-  @ApiPropertyOptional({ type: [Number] })
-  @IsOptional()
-  @IsArray()
-  @ArrayMaxSize(500)
-  @IsInt({ each: true })
-  @Min(1, { each: true })
+  @AnyId()
   manufacturers?: number[];
 
-  @ApiPropertyOptional({ type: [Number] })
-  @IsOptional()
-  @IsArray()
-  @ArrayMaxSize(500)
-  @IsInt({ each: true })
-  @Min(1, { each: true })
+  @AnyId()
   families?: number[];
 
-  @ApiPropertyOptional({ enum: technologies, isArray: true })
-  @IsOptional()
-  @IsArray()
-  @ArrayMaxSize(technologies.length)
-  @IsIn(technologies, { each: true })
+  @AnyOf(technologies)
   technologies?: Technology[];
 
   @ApiPropertyOptional({ type: [String], description: 'Size codes' })
@@ -68,59 +53,31 @@ export class FiltersDto {
   @MaxLength(40, { each: true })
   sizes?: string[];
 
-  @ApiPropertyOptional({
-    enum: seriesNames,
-    isArray: true,
-    description:
-      'Series of preferred values; E48, E96 and E192 accept E24 values too, which families offer at 1 %',
-  })
-  @IsOptional()
-  @IsArray()
-  @ArrayMaxSize(seriesNames.length)
-  @IsIn(seriesNames, { each: true })
+  @AnyOf(
+    seriesNames,
+    'Series of preferred values; E48, E96 and E192 accept E24 values too, which families offer at 1 %',
+  )
   series?: SeriesName[];
 
-  @ApiPropertyOptional({ type: [Number], description: 'Fractions' })
-  @IsOptional()
-  @IsArray()
-  @ArrayMaxSize(100)
-  @IsNumber({}, { each: true })
+  @AnyNumber('Fractions')
   tolerances?: number[];
 
-  @ApiPropertyOptional({ type: [Number], description: '1/K' })
-  @IsOptional()
-  @IsArray()
-  @ArrayMaxSize(100)
-  @IsNumber({}, { each: true })
+  @AnyNumber('1/K')
   tcrs?: number[];
 
-  @ApiPropertyOptional({ description: 'Has a safety certificate in date' })
-  @IsOptional()
-  @IsBoolean()
+  @Whether('Has a safety certificate in date')
   certificate?: boolean;
 
-  @ApiPropertyOptional({ enum: approvals, isArray: true })
-  @IsOptional()
-  @IsArray()
-  @ArrayMaxSize(approvals.length)
-  @IsIn(approvals, { each: true })
+  @AnyOf(approvals)
   approvals?: Approval[];
 
-  @ApiPropertyOptional({ enum: supplyStatuses, isArray: true })
-  @IsOptional()
-  @IsArray()
-  @ArrayMaxSize(supplyStatuses.length)
-  @IsIn(supplyStatuses, { each: true })
+  @AnyOf(supplyStatuses)
   supply?: SupplyStatus[];
 
-  @ApiPropertyOptional({ description: 'Stands under a company part number' })
-  @IsOptional()
-  @IsBoolean()
+  @Whether('Stands under a company part number')
   companyPartNumber?: boolean;
 
-  @ApiPropertyOptional({ description: 'Has an offer in force at 1000 pieces' })
-  @IsOptional()
-  @IsBoolean()
+  @Whether('Has an offer in force at 1000 pieces')
   offer?: boolean;
 }
 
