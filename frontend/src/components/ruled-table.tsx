@@ -22,7 +22,7 @@ const Table = chakra('table', {
     '& [data-number]': { textAlign: 'end', whiteSpace: 'nowrap' },
     '& [data-date]': { whiteSpace: 'nowrap' },
     '& small': { color: 'fg.muted', fontSize: 'xs', fontWeight: 'normal' },
-    '& .not-stated': { whiteSpace: 'nowrap' },
+    '& td > .not-stated:only-child': { whiteSpace: 'nowrap' },
     // What a row is about stays in sight while the rest of it is scrolled past.
     '& tr > :first-child': {
       position: 'sticky',

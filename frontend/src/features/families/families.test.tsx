@@ -85,6 +85,8 @@ beforeEach(() => {
   asked.length = 0;
   startSession(sessionOf());
   serve(({ url, params }) => {
+    if (url === '/families/7/revisions/1')
+      return { status: 200, data: { ...revision, number: 1, current: false } };
     if (url === '/families/7') return { status: 200, data: details };
     if (url === '/families') {
       asked.push(params);
@@ -118,5 +120,12 @@ describe('families', () => {
     expect(screen.getByRole('row', { name: /Safety S-1/ })).toHaveTextContent('expired');
     expect(screen.getByRole('img', { name: /Derating: 250 mW up to 70 °C/ })).toBeInTheDocument();
     expect(screen.getByRole('link', { name: 'Find its parts' })).toHaveAttribute('href', '/find?family=7');
+  });
+
+  it('say of an earlier revision that it is not in force any more, and which is', async () => {
+    renderApplication('/families/7?revision=1');
+    expect(await screen.findByText('Not in force any more.')).toBeVisible();
+    expect(screen.getByRole('link', { name: 'revision 2' })).toHaveAttribute('href', '/families/7');
+    expect(screen.getByRole('heading', { name: 'Revision 1' })).toBeVisible();
   });
 });

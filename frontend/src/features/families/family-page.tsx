@@ -1,4 +1,5 @@
-import { useParams, useSearchParams } from 'react-router-dom';
+import { chakra } from '@chakra-ui/react';
+import { Link, useParams, useSearchParams } from 'react-router-dom';
 import { Answered } from '../../components/answered';
 import { LinkButton } from '../../components/button';
 import { Page } from '../../components/page';
@@ -13,11 +14,25 @@ import { useFamilyRevision } from './requests/get-family-revision';
 import { RevisionSections } from './revision-sections';
 import { RevisionTable } from './revision-table';
 
+const Notice = chakra('p', {
+  base: { borderInlineStart: '3px solid', borderColor: 'caution', ps: 3, mb: 5, fontSize: 'sm' },
+});
+
 function OtherRevision({ family, number }: { family: FamilyDetails; number: number }) {
   const revision = useFamilyRevision(family.id, number);
   return (
     <Answered query={revision} label={`Reading revision ${number}`}>
-      {(read) => <RevisionSections revision={read} technology={family.technology} />}
+      {(read) => (
+        <>
+          {read.state === 'published' && family.revision !== undefined && (
+            <Notice>
+              <b>Not in force any more.</b> Parts are rated by{' '}
+              <Link to={`/families/${family.id}`}>revision {family.revision.number}</Link>.
+            </Notice>
+          )}
+          <RevisionSections revision={read} technology={family.technology} />
+        </>
+      )}
     </Answered>
   );
 }
@@ -55,7 +70,8 @@ function Family({ family }: { family: FamilyDetails }) {
 
 function KnownFamily({ id }: { id: number }) {
   const family = useFamily(id);
-  if (family.isSuccess) return <Family family={family.data} />;
+  // Read again and failed, what was read before stays.
+  if (family.data !== undefined) return <Family family={family.data} />;
   return (
     <Page title="Family">
       <Answered query={family} label="Reading the family" lines={12}>

@@ -61,7 +61,10 @@ export function Component() {
         <title>Part · Resistry</title>
         <chakra.h1 srOnly>Part</chakra.h1>
         {part.isError ? (
-          <Failed error={part.error} onRetry={again} />
+          <>
+            <Failed error={part.error} onRetry={again} />
+            <Link to="/find">To Find</Link>
+          </>
         ) : (
           <Loading label="Reading the part" lines={14} />
         )}
