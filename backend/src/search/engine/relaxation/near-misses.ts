@@ -1,6 +1,7 @@
 import type { AskedCheck } from '@resistry/engineering/range-search/asked-checks';
 import type { Evaluation } from '../evaluation';
 import type { Scope } from '../scope';
+import { Units } from './units';
 
 /**
  * Units that a search does not count as met, by the checks that are unmet in every operating mode. One that is unrated has
@@ -36,21 +37,17 @@ export class NearMisses {
   }
 
   /** The units whose unmet checks are all among these. */
-  within(bits: number): number[] {
+  within(bits: number): Units {
     return this.unitsWhere((mask) => (mask & ~bits) === 0);
   }
 
   /** The units that these checks, and only these, remove. */
-  removedOnlyBy(bits: number): number[] {
+  removedOnlyBy(bits: number): Units {
     return this.unitsWhere((mask) => mask !== 0 && (mask & ~bits) === 0);
   }
 
-  private unitsWhere(wanted: (mask: number) => boolean): number[] {
-    const found: number[] = [];
-    for (const [mask, units] of this.unitsByMask) {
-      if (wanted(mask)) for (const unit of units) found.push(unit);
-    }
-    return found;
+  private unitsWhere(wanted: (mask: number) => boolean): Units {
+    return new Units([...this.unitsByMask].flatMap(([mask, units]) => (wanted(mask) ? [units] : [])));
   }
 }
 

@@ -4,6 +4,7 @@ import type { Requirement } from '@resistry/engineering/duty/requirement';
 import type { Relaxation } from '../search-plan';
 import { withValueAt } from './relaxable-fields';
 import type { Retrial } from './retrial';
+import type { Units } from './units';
 
 /** Loosened choices in the order in which they are offered: the first that brings a unit back is the smallest change. */
 export interface Choice {
@@ -54,14 +55,15 @@ export function choicesOf(requirement: Requirement): Choice[] {
 export function relaxChoice(
   requirement: Requirement,
   choice: Choice,
-  units: readonly number[],
+  units: Units,
   retrial: Retrial,
 ): Relaxation | undefined {
-  if (units.length === 0) return undefined;
+  if (units.size === 0) return undefined;
   for (const to of choice.values) {
     const duty = withValueAt(requirement.duty, choice.pointer, to);
-    const met = choice.standingOnly ? retrial.metByStanding(duty, units) : retrial.met(duty, units);
-    const gains = met.length;
+    const gains = choice.standingOnly
+      ? retrial.countMetByStanding(duty, units)
+      : retrial.countMet(duty, units);
     if (gains > 0) return { field: choice.pointer, to, gains };
   }
   return undefined;

@@ -2,6 +2,7 @@ import type { Duty } from '@resistry/engineering/duty/duty';
 import type { Relaxation } from '../search-plan';
 import { numberAt, roundedOutward, withValueAt, type RelaxableField } from './relaxable-fields';
 import type { Retrial } from './retrial';
+import type { Units } from './units';
 
 /** Halvings of a bisection: a thousandth of the way from the stated value to the loosest. */
 const halvings = 12;
@@ -17,12 +18,12 @@ const tried = 24;
 export function relaxNumber(
   duty: Duty,
   field: RelaxableField,
-  units: readonly number[],
+  units: Units,
   nearness: (unit: number) => number,
   retrial: Retrial,
 ): Relaxation | undefined {
   const loosest = field.loosest(duty);
-  if (loosest === undefined || units.length === 0) return undefined;
+  if (loosest === undefined || units.size === 0) return undefined;
   const stated = numberAt(duty, field.pointer);
   if (stated === loosest) return undefined;
   const at = (value: number): Duty => withValueAt(duty, field.pointer, value);
@@ -40,22 +41,21 @@ export function relaxNumber(
   }
   const rounded = roundedOutward(field, loose, loosest);
   const to = retrial.met(at(rounded), held).length > 0 ? rounded : loose;
-  return { field: field.pointer, to, gains: retrial.met(at(to), units).length };
+  return { field: field.pointer, to, gains: retrial.countMet(at(to), units) };
 }
 
 /** Of very many misses an even sample is looked at: the smallest change among them stands for all. */
 const sampled = 300;
 
 /** The units nearest to being met; beside those with an unmet check some that only lack data, which a change can spare. */
-function nearestOf(units: readonly number[], nearness: (unit: number) => number): number[] {
-  if (units.length <= tried) return [...units];
-  const step = Math.ceil(units.length / sampled);
-  const sample = units
-    .filter((_, place) => place % step === 0)
+function nearestOf(units: Units, nearness: (unit: number) => number): number[] {
+  const sample = units.sample(units.size <= tried ? tried : sampled);
+  if (sample.length <= tried) return sample;
+  const byNearness = sample
     .map((unit) => ({ unit, near: nearness(unit) }))
     .sort((first, second) => second.near - first.near || first.unit - second.unit);
-  const lacking = sample.filter(({ near }) => near === Infinity).slice(0, tried / 3);
-  const unmet = sample.filter(({ near }) => near < Infinity).slice(0, tried - lacking.length);
+  const lacking = byNearness.filter(({ near }) => near === Infinity).slice(0, tried / 3);
+  const unmet = byNearness.filter(({ near }) => near < Infinity).slice(0, tried - lacking.length);
   return [...unmet, ...lacking].map(({ unit }) => unit);
 }
 

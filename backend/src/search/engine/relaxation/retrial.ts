@@ -10,6 +10,7 @@ import { conditionsOfRow, type Evaluation } from '../evaluation';
 import { rowOfPosition } from '../row-of-position';
 import type { Scope } from '../scope';
 import { standingMasks, unmetStanding } from '../standing-masks';
+import type { Units } from './units';
 
 /** Tries a changed duty on single units. */
 export class Retrial {
@@ -21,14 +22,16 @@ export class Retrial {
 
   /** The units that a duty meets; none where it contradicts itself. */
   met(duty: Duty, units: readonly number[]): number[] {
-    const requirement = possibleRequirement(duty);
-    if (requirement === undefined) return [];
-    const isMet = this.tryPositions(requirement);
-    return units.filter((unit) => this.scope.everyPosition(unit, isMet));
+    return units.filter(this.unitMeets(duty));
   }
 
-  /** The units that a duty meets which asks something else of their standing, and the same as before of their ratings. */
-  metByStanding(duty: Duty, units: readonly number[]): number[] {
+  /** How many units a duty meets. */
+  countMet(duty: Duty, units: Units): number {
+    return units.countWhere(this.unitMeets(duty));
+  }
+
+  /** How many units a duty meets that asks something else of their standing, and the same as before of their ratings. */
+  countMetByStanding(duty: Duty, units: Units): number {
     const { checks, scratch } = this.evaluation;
     const requirement = requirementOf(duty);
     const standing = standingMasks(requirement, askedChecks(requirement));
@@ -39,7 +42,14 @@ export class Retrial {
       ((scratch.masks.unmet[position] ?? 0) & ~standingBits) === 0 &&
       scratch.masks.unrated[position] === 0 &&
       unmetStanding(this.index.columns, standing, position) === 0;
-    return units.filter((unit) => this.scope.everyPosition(unit, isMet));
+    return units.countWhere((unit) => this.scope.everyPosition(unit, isMet));
+  }
+
+  private unitMeets(duty: Duty): (unit: number) => boolean {
+    const requirement = possibleRequirement(duty);
+    if (requirement === undefined) return () => false;
+    const isMet = this.tryPositions(requirement);
+    return (unit) => this.scope.everyPosition(unit, isMet);
   }
 
   /** Units mostly come row by row, so the conditions of the last row are kept. */

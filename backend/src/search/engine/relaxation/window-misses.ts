@@ -111,7 +111,7 @@ export class NumbersOutside implements WindowMisses {
   private readonly numbers: number[];
 
   constructor(misses: NearMisses, valueBit: number) {
-    this.numbers = misses.removedOnlyBy(valueBit);
+    this.numbers = misses.removedOnlyBy(valueBit).toArray();
   }
 
   nearest(): number[] {
