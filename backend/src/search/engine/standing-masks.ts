@@ -3,15 +3,11 @@ import { wantedSupply } from '@resistry/engineering/checks/supply';
 import type { Requirement } from '@resistry/engineering/duty/requirement';
 import type { AskedCheck } from '@resistry/engineering/range-search/asked-checks';
 import { approvals, supplyStatuses } from '@resistry/engineering/ratings/technology';
-import type { CatalogueColumns } from '../index/catalogue-columns';
+import { standingKey, type CatalogueColumns } from '../index/catalogue-columns';
 import type { Scratch } from './scratch';
 
 /** Bits of the standing checks that are unmet, by key of approval, supply status and second source. */
 export type StandingMasks = Uint32Array;
-
-function keyOf(approval: number, supply: number, secondSource: number): number {
-  return approval | (supply << 3) | (secondSource << 5);
-}
 
 export function standingMasks(requirement: Requirement, checks: readonly AskedCheck[]): StandingMasks {
   const bitOf = (name: string): number => checks.find((check) => check.definition.name === name)?.bit ?? 0;
@@ -20,7 +16,7 @@ export function standingMasks(requirement: Requirement, checks: readonly AskedCh
   for (const [approval, approvalName] of approvals.entries()) {
     for (const [supply, supplyName] of supplyStatuses.entries()) {
       for (const secondSource of [0, 1]) {
-        masks[keyOf(approval, supply, secondSource)] =
+        masks[standingKey(approval, supply, secondSource)] =
           (wanted.approvals.includes(approvalName) ? 0 : bitOf('approval')) |
           (wanted.supply.includes(supplyName) ? 0 : bitOf('supply')) |
           (secondSource === 1 ? 0 : bitOf('second-source'));
@@ -32,12 +28,7 @@ export function standingMasks(requirement: Requirement, checks: readonly AskedCh
 
 /** Bits of the standing checks that the part at a position does not meet. */
 export function unmetStanding(columns: CatalogueColumns, masks: StandingMasks, position: number): number {
-  const key = keyOf(
-    columns.approval[position] ?? 0,
-    columns.supply[position] ?? 0,
-    columns.secondSource[position] ?? 0,
-  );
-  return masks[key] ?? 0;
+  return masks[columns.standing[position] ?? 0] ?? 0;
 }
 
 /** Whether any part at [from, to) meets the standing checks. */

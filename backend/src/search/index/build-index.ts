@@ -3,11 +3,13 @@ import type { Readers } from '../../database/readers';
 import { modesOfPart, type SizeRatings } from '../../parts/ratings/size-ratings';
 import {
   allocateColumns,
+  standingKey,
   type CatalogueColumns,
   type CatalogueRow,
   type CompanyNumbers,
 } from './catalogue-columns';
 import type { CatalogueIndex } from './catalogue-index';
+import { inOneShape } from './one-shape';
 import { companyNumbersSql, sizesSql, type PartColumnsRow, type SizeRow } from './part-columns-row';
 import { countParts, readNumberRanks, readParts } from './read-parts';
 import { seriesBits } from './series-bits';
@@ -73,9 +75,12 @@ export function fillStanding(
   position: number,
   part: Pick<PartColumnsRow, 'approval' | 'supply' | 'derived_second_source' | 'derived_unit_price_micro'>,
 ): void {
-  columns.approval[position] = approvals.indexOf(part.approval);
-  columns.supply[position] = supplyStatuses.indexOf(part.supply);
+  const approval = approvals.indexOf(part.approval);
+  const supply = supplyStatuses.indexOf(part.supply);
+  columns.approval[position] = approval;
+  columns.supply[position] = supply;
   columns.secondSource[position] = part.derived_second_source;
+  columns.standing[position] = standingKey(approval, supply, part.derived_second_source);
   columns.price[position] = part.derived_unit_price_micro ?? Infinity;
 }
 
@@ -139,7 +144,7 @@ function extendRows(
       resistance: isLink ? 0 : 1,
       tolerance: part.tolerance_fraction,
       tcr: part.tcr_per_kelvin,
-    }).map((mode) => mode.ratings),
+    }).map((mode) => inOneShape(mode.ratings)),
   });
 }
 

@@ -13,6 +13,8 @@ export interface CatalogueColumns {
   /** Position in `supplyStatuses`. */
   supply: Uint8Array;
   secondSource: Uint8Array;
+  /** The three above in one, as `standingKey` packs them: most searches read nothing else of most parts. */
+  standing: Uint8Array;
   /** Lowest valid unit price at 1000 pieces, millionths; Infinity where there is none. */
   price: Float64Array;
   /** Position of the company part number; −1 where there is none. */
@@ -61,6 +63,11 @@ export interface CompanyNumbers {
   source: Int32Array;
 }
 
+/** Position in `approvals` (6 of them), in `supplyStatuses` (4) and the second source, packed into six bits. */
+export function standingKey(approval: number, supply: number, secondSource: number): number {
+  return approval | (supply << 3) | (secondSource << 5);
+}
+
 /** Columns of a given length in shared memory, for parts with ids up to `lastId`. */
 export function allocateColumns(length: number, lastId: number): CatalogueColumns {
   return {
@@ -69,6 +76,7 @@ export function allocateColumns(length: number, lastId: number): CatalogueColumn
     approval: new Uint8Array(new SharedArrayBuffer(length)),
     supply: new Uint8Array(new SharedArrayBuffer(length)),
     secondSource: new Uint8Array(new SharedArrayBuffer(length)),
+    standing: new Uint8Array(new SharedArrayBuffer(length)),
     price: new Float64Array(new SharedArrayBuffer(length * 8)),
     company: new Int32Array(new SharedArrayBuffer(length * 4)),
     series: new Uint8Array(new SharedArrayBuffer(length)),
