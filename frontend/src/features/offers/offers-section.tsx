@@ -32,7 +32,8 @@ export function OffersSection({ part }: { part: OfferedPart }) {
     dialog === undefined || dialog.deed === 'enter'
       ? undefined
       : part.offers.find(({ id }) => id === dialog.id);
-  const close = (): void => setDialog(undefined);
+  // One that is late to close must not take the next one along.
+  const close = (): void => setDialog((now) => (now === dialog ? undefined : now));
   return (
     <Section title="Offers">
       {part.offers.length === 0 ? (

@@ -15,7 +15,8 @@ type Asked = { what: 'roles' | 'access'; user: UserDetails };
 export function UserTable({ users }: { users: readonly UserDetails[] }) {
   const [asked, setAsked] = useState<Asked>();
   const self = useUser();
-  const close = (): void => setAsked(undefined);
+  // One that is late to close must not take the next one along.
+  const close = (): void => setAsked((now) => (now === asked ? undefined : now));
   return (
     <>
       <RuledTable label="People">

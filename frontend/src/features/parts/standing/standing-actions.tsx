@@ -83,7 +83,8 @@ export function StandingActions({ part }: { part: PartDetails }) {
           part={part}
           offered={current ?? chosen}
           version={transitions.data.version}
-          onClose={() => setChosen(undefined)}
+          // One that is late to close must not take the next one along.
+          onClose={() => setChosen((now) => (now === chosen ? undefined : now))}
         />
       )}
     </chakra.section>
