@@ -28,7 +28,7 @@ export function ConfirmWithReason<Values extends Record<string, string>>(
 ) {
   const { title, description, act, initialValues, rules = {}, children, error, onConfirm, onClose } = props;
   return (
-    <Dialog.Root open onOpenChange={({ open }) => !open && onClose()}>
+    <Dialog.Root open closeOnInteractOutside={false} onOpenChange={({ open }) => !open && onClose()}>
       <Portal>
         <Dialog.Backdrop />
         <Dialog.Positioner>
@@ -37,6 +37,8 @@ export function ConfirmWithReason<Values extends Record<string, string>>(
             <Dialog.Description>{description}</Dialog.Description>
             <Dialog.Body>
               <Formik
+                // A message that appears while one presses the button would move the button from under the press.
+                validateOnBlur={false}
                 initialValues={{ ...initialValues, reason: '' }}
                 validationSchema={object({ ...rules, reason: reasonRule })}
                 onSubmit={(values) =>

@@ -21,6 +21,7 @@ export function NameForm({ name }: { name: string }) {
   const rename = useRenameSelf();
   return (
     <Formik
+      validateOnBlur={false}
       initialValues={{ name }}
       validationSchema={schema}
       onSubmit={(values) => rename.mutateAsync(values.name.trim()).catch(() => undefined)}

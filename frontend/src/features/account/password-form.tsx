@@ -24,6 +24,7 @@ export function PasswordForm() {
   const problem = change.isError ? problemOf(change.error) : undefined;
   return (
     <Formik
+      validateOnBlur={false}
       initialValues={nothingEntered}
       validationSchema={schema}
       onSubmit={({ current, password }, { resetForm }) =>

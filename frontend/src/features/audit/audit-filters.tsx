@@ -51,7 +51,13 @@ export interface AuditFiltersProps {
 export function AuditFilters({ filter, onFilter }: AuditFiltersProps) {
   const users = useUsers();
   return (
-    <Formik initialValues={filter} enableReinitialize validationSchema={schema} onSubmit={onFilter}>
+    <Formik
+      validateOnBlur={false}
+      initialValues={filter}
+      enableReinitialize
+      validationSchema={schema}
+      onSubmit={onFilter}
+    >
       {({ values, setFieldValue }) => (
         <Grid role="search" aria-label="Narrow the trail">
           <Form noValidate>

@@ -56,6 +56,7 @@ export function Component() {
   return (
     <AuthFrame title="Accept the invitation" lead={`For ${preview.data.email}, as ${roles}.`}>
       <Formik
+        validateOnBlur={false}
         initialValues={{ name: '', password: '', repeated: '' }}
         validationSchema={schema}
         onSubmit={({ name, password }) =>

@@ -27,6 +27,7 @@ export function Component() {
   return (
     <AuthFrame title="Forgotten password" lead="A link to choose a new one comes by mail.">
       <Formik
+        validateOnBlur={false}
         initialValues={{ email: '' }}
         validationSchema={schema}
         onSubmit={({ email }) => request.mutateAsync(email.trim()).catch(() => undefined)}

@@ -34,6 +34,7 @@ export function Component() {
   return (
     <AuthFrame title="Choose a new password">
       <Formik
+        validateOnBlur={false}
         initialValues={{ password: '', repeated: '' }}
         validationSchema={schema}
         onSubmit={({ password }) => reset.mutateAsync({ token, password }).catch(() => undefined)}

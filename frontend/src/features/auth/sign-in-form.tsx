@@ -22,6 +22,7 @@ export function SignInForm({ email = '', onSignedIn }: SignInFormProps) {
   const signIn = useSignIn();
   return (
     <Formik
+      validateOnBlur={false}
       initialValues={{ email, password: '' }}
       validationSchema={schema}
       onSubmit={(values) =>

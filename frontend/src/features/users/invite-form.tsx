@@ -23,6 +23,7 @@ export function InviteForm() {
   const invite = useInvite();
   return (
     <Formik
+      validateOnBlur={false}
       initialValues={nobody}
       validationSchema={schema}
       onSubmit={({ email, roles }, { resetForm }) =>

@@ -17,7 +17,7 @@ const schema = object({ roles: someRoles, reason: reasonRule });
 export function RolesDialog({ user, onClose }: { user: UserDetails; onClose: () => void }) {
   const change = useChangeUser();
   return (
-    <Dialog.Root open onOpenChange={({ open }) => !open && onClose()}>
+    <Dialog.Root open closeOnInteractOutside={false} onOpenChange={({ open }) => !open && onClose()}>
       <Portal>
         <Dialog.Backdrop />
         <Dialog.Positioner>
@@ -26,6 +26,7 @@ export function RolesDialog({ user, onClose }: { user: UserDetails; onClose: () 
             <Dialog.Description>They hold from the next thing this person does.</Dialog.Description>
             <Dialog.Body>
               <Formik
+                validateOnBlur={false}
                 initialValues={{ roles: user.roles, reason: '' }}
                 validationSchema={schema}
                 onSubmit={({ roles, reason }) =>

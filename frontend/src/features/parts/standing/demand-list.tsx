@@ -16,7 +16,12 @@ export function DemandList({ demands }: { demands: readonly Demand[] }) {
     <List aria-label="What it demands">
       {demands.map((demand) => (
         <li key={demand.name}>
-          <StatusWord kind="verdict" status={demand.met ? 'met' : 'unmet'} />
+          {/* What whoever makes the change fills in is no fault of the part. */}
+          {demand.field === 'to' || demand.met ? (
+            <StatusWord kind="verdict" status={demand.met ? 'met' : 'unmet'} />
+          ) : (
+            <chakra.span color="fg.muted">asked for</chakra.span>
+          )}
           <span>{demand.words}</span>
         </li>
       ))}

@@ -6,7 +6,6 @@ import { FormField } from '../../../components/form-field';
 import { approvalWords, supplyWords } from '../../../wording/standing-words';
 import { type StandingChange, useChangeStanding } from '../requests/change-standing';
 import type { PartDetails } from '../requests/get-part';
-import { leadingNumber } from '../../search/search-part';
 import { DemandList } from './demand-list';
 import type { Offered } from './transition-words';
 
@@ -47,6 +46,14 @@ function entriesFor({ transition }: Offered): Partial<Record<EntryName, Entry>> 
 type Values = Record<EntryName, string>;
 const noValues: Values = { words: '', scope: '', exception: '', lastOrderDate: '' };
 
+/** A restriction is changed from what it says now, a last order date from what it is. */
+function valuesOf({ restriction, lastOrderOn }: PartDetails, { transition }: Offered): Values {
+  if (transition.to === 'restricted' && restriction !== undefined) {
+    return { ...noValues, words: restriction.words, scope: restriction.scope ?? '' };
+  }
+  return transition.to === 'last-time-buy' ? { ...noValues, lastOrderDate: lastOrderOn ?? '' } : noValues;
+}
+
 /** What was filled in, as the server takes it: an entry left empty is left out. */
 function changeOf(offered: Offered, version: number, values: Values & { reason: string }): StandingChange {
   const said = (name: EntryName) => {
@@ -77,6 +84,11 @@ export interface TransitionDialogProps {
   onClose: () => void;
 }
 
+const namesOf = ({ companyPartNumber, manufacturerPartNumber }: PartDetails): string =>
+  companyPartNumber === undefined
+    ? manufacturerPartNumber
+    : `${companyPartNumber.number}, ${manufacturerPartNumber}`;
+
 /** One change of approval or supply, with what it demands, asked about once more. */
 export function TransitionDialog({ part, offered, version, onClose }: TransitionDialogProps) {
   const change = useChangeStanding(part.id);
@@ -86,9 +98,9 @@ export function TransitionDialog({ part, offered, version, onClose }: Transition
   return (
     <ConfirmWithReason
       title={offered.deed}
-      description={`${leadingNumber(part)}, ${part.manufacturerPartNumber}. It is ${now.toLowerCase()} now.`}
+      description={`${namesOf(part)}. It is ${now.toLowerCase()} now.`}
       act={offered.deed}
-      initialValues={noValues}
+      initialValues={valuesOf(part, offered)}
       rules={Object.fromEntries(entries.map(([name, { rule }]) => [name, rule]))}
       error={change.error}
       onConfirm={(values) => change.mutateAsync(changeOf(offered, version, values))}
