@@ -69,7 +69,13 @@ for (const colorScheme of SCHEMES) {
 
   test(`the pages before the sign-in are accessible, ${colorScheme}`, async ({ openContext }) => {
     const page = await (await openContext({ colorScheme, reducedMotion: 'reduce' })).newPage();
-    for (const address of ['/sign-in', '/forgotten-password', '/reset-password', '/accept-invitation']) {
+    for (const address of [
+      '/sign-in',
+      '/forgotten-password',
+      '/reset-password',
+      '/reset-password#token=whole',
+      '/accept-invitation',
+    ]) {
       await page.goto(address);
       await ready(page);
       await expectAccessible(page);

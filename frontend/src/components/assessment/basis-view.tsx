@@ -74,7 +74,7 @@ function InputLine({ input }: { input: AnsweredInput }) {
             <Formula text={input.symbol} />{' '}
           </chakra.b>
         )}
-        {input.name}
+        <Formula text={input.name} />
       </dt>
       <dd>{unitWords(input.value, input.unit)}</dd>
       <dd>

@@ -10,7 +10,7 @@ const Table = chakra('table', {
   base: {
     fontSize: 'xs',
     borderCollapse: 'collapse',
-    '& caption': { textAlign: 'start', color: 'fg.muted' },
+    '& caption': { textAlign: 'start', color: 'fg.muted', whiteSpace: 'nowrap' },
     '& th, & td': { textAlign: 'end', pe: 4, py: 0.5, borderBottom: '1px solid', borderColor: 'border' },
     '& th': { color: 'fg.muted', fontWeight: 'semibold' },
   },

@@ -32,7 +32,7 @@ export function SignInForm({ email = '', onSignedIn }: SignInFormProps) {
       {({ isSubmitting }) => (
         <chakra.div css={{ '& > form': { display: 'grid', gap: 4 } }}>
           <Form noValidate>
-            {signIn.isError && <FormRefusal error={signIn.error} />}
+            {signIn.isError && <FormRefusal error={signIn.error} unauthenticated="Not signed in" />}
             <FormField name="email" label="E-mail" type="email" autoComplete="username" />
             <FormField name="password" label="Password" type="password" autoComplete="current-password" />
             <Button type="submit" variant="solid" disabled={isSubmitting}>

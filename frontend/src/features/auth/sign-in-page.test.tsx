@@ -11,7 +11,7 @@ beforeEach(() => {
     if (request.url !== '/auth/sign-in') return { status: 404, data: {} };
     const { password } = JSON.parse(String(request.data)) as { password: string };
     if (password === 'right') return { status: 200, data: sessionOf() };
-    return { status: 401, data: { title: 'That address and password do not go together' } };
+    return { status: 401, data: { title: 'Sign in first', detail: 'They do not go together.' } };
   });
 });
 
@@ -29,7 +29,7 @@ describe('signing in', () => {
       'designer@brackwater.example.com',
     );
     await enter('wrong');
-    expect(await screen.findByRole('alert')).toHaveTextContent('do not go together');
+    expect(await screen.findByRole('alert')).toHaveTextContent('Not signed inThey do not go together.');
     expect(screen.getByRole('textbox', { name: 'E-mail' })).toHaveValue('designer@brackwater.example.com');
     await enter('right');
     await waitFor(() => expect(addressNow()).toBe('/nowhere?lower=4k5'));
