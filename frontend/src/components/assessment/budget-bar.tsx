@@ -25,7 +25,9 @@ const Rows = chakra('ol', {
     mt: 3,
     '& > li': {
       display: 'grid',
-      gridTemplateColumns: '1.2rem 8rem 4.5rem minmax(0, 1fr)',
+      gridTemplateColumns: { base: '1.2rem minmax(0, 1fr) 4.5rem', sm: '1.2rem 8rem 4.5rem minmax(0, 1fr)' },
+      // Where the screen is narrow, where an amount comes from stands beneath it.
+      '& > :nth-child(4)': { gridColumn: { base: '2 / -1', sm: 'auto' } },
       columnGap: 2,
       py: 1,
       borderBottom: '1px solid',
@@ -80,7 +82,7 @@ export function BudgetBar({ lines, allowance, adds }: BudgetBarProps) {
             {percent(sum)} known{allowance !== null && ` of the ${percent(allowance)} that the window leaves`}
             .
             {missing.length > 0 &&
-              ` Incomplete: ${missing.length} of ${lines.length} contributions are not stated.`}
+              ` Incomplete: ${missing.length} of ${lines.length} contributions ${missing.length === 1 ? 'is' : 'are'} not stated.`}
           </chakra.p>
         </>
       )}

@@ -12,7 +12,10 @@ const Line = chakra('button', {
   base: {
     display: 'grid',
     width: 'full',
-    gridTemplateColumns: '8.6rem minmax(4rem, 1fr) 4.9rem',
+    gridTemplateColumns: {
+      base: 'minmax(0, 8.6rem) minmax(2.5rem, 1fr) 4.4rem',
+      sm: '8.6rem minmax(4rem, 1fr) 4.9rem',
+    },
     alignItems: 'center',
     columnGap: 3,
     minHeight: 8,
