@@ -1,19 +1,9 @@
-import { createHmac } from 'node:crypto';
 import request, { type Response } from 'supertest';
 import { Secrets } from '../src/config/secrets';
 import { startApplication, type StartedApplication } from './support/application';
+import { type Claims, claimsOf, encoded, forge } from './support/forge-token';
 import type { SignedInPerson } from './support/people-builder';
 import type { ProblemBody } from './support/problem-body';
-
-type Claims = Record<string, unknown>;
-
-const encoded = (value: object): string => Buffer.from(JSON.stringify(value)).toString('base64url');
-
-/** A token made by hand (RFC 7519), so that each part of it can be wrong. */
-function forge(claims: Claims, key: string, header: object = { alg: 'HS256', typ: 'JWT' }): string {
-  const body = `${encoded(header)}.${encoded(claims)}`;
-  return `${body}.${createHmac('sha256', key).update(body).digest('base64url')}`;
-}
 
 describe('access tokens', () => {
   let application: StartedApplication;
@@ -23,9 +13,7 @@ describe('access tokens', () => {
   beforeAll(async () => {
     application = await startApplication();
     designer = await application.people.signIn('designer');
-    claims = JSON.parse(
-      Buffer.from(designer.accessToken.split('.')[1] ?? '', 'base64url').toString(),
-    ) as Claims;
+    claims = claimsOf(designer.accessToken);
     key = application.nest.get(Secrets).accessTokenKey;
   });
   afterAll(() => application.stop());
