@@ -76,6 +76,7 @@ test('a last-time buy has its last order date, which can be changed but has not 
     await page.getByRole('button', { name: deed }).click();
     const dialog = page.getByRole('dialog', { name: deed });
     await dialog.getByLabel('Reason').fill('Vendor notice 12');
+    await dialog.getByLabel('Last order date').fill('');
     await dialog.getByRole('button', { name: deed }).click();
     await expect(dialog.getByText('Give the last order date.')).toBeVisible();
     await dialog.getByLabel('Last order date').fill(day(-3));
