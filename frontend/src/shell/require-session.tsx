@@ -1,4 +1,4 @@
-import { type ReactNode, Suspense, lazy } from 'react';
+import { type ReactNode, Suspense, lazy, useDeferredValue } from 'react';
 import { Navigate, useLocation } from 'react-router-dom';
 import { useSession } from '../api/session';
 import { Loading } from '../components/states';
@@ -7,7 +7,8 @@ const SignInAgainDialog = lazy(() => import('../features/auth/sign-in-again-dial
 
 /** Lets nobody in who is not signed in; who was, and is not any more, signs in again over the page as it stands. */
 export function RequireSession({ children }: { children: ReactNode }) {
-  const state = useSession();
+  // The page that a restored sign-in opens is drawn in slices, so that the browser answers meanwhile.
+  const state = useDeferredValue(useSession());
   const location = useLocation();
   switch (state.status) {
     case 'restoring':

@@ -14,8 +14,10 @@ export interface DataColumn<Row> {
   hint?: (row: Row) => string;
   /** Holds the button that unfolds a row, where rows can be unfolded. */
   unfolds?: boolean;
-  /** CSS width; the table is as wide as its columns ask, or as its place. */
-  width: string;
+  /** rem; the table is as wide as its columns ask, or as its place, which they then share in proportion. */
+  width: number;
+  /** Stays in sight while the others scroll sideways beneath it. */
+  stays?: boolean;
   align?: 'start' | 'end';
   /** Whether the server can sort by it, under the column's id. */
   sortable?: boolean;

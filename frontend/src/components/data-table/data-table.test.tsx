@@ -19,7 +19,7 @@ const columns: DataColumn<Line>[] = [
     plainHeader: 'Part',
     cell: (line) => line.name,
     plain: (line) => line.name,
-    width: '8rem',
+    width: 8,
     fixed: true,
   },
   {
@@ -28,7 +28,7 @@ const columns: DataColumn<Line>[] = [
     plainHeader: 'Value, Ω',
     cell: (line) => line.ohm,
     plain: (line) => line.ohm,
-    width: '4rem',
+    width: 4,
     sortable: true,
   },
 ];

@@ -9,14 +9,19 @@ import {
   useRef,
   useState,
 } from 'react';
+import { columnTracks, leastWidth } from './column-widths';
 import type { DataColumn, Sort } from './data-column';
 import { tabSeparated } from './delimited-text';
 import { type GridPosition, nextPosition } from './grid-position';
 import type { RowTree } from './row-tree';
 import { TableHead } from './table-head';
 import { TableRow, cellId } from './table-row';
-import { TableFrame } from './table-styles';
+import { TableFrame, headHeight } from './table-styles';
 import { useScrollMargin } from './use-scroll-margin';
+import { scrollUnlessThere, watchSize } from './watch-scroller';
+
+/** Rows drawn beyond either edge, so that a short movement shows no gap. */
+const overscan = 4;
 
 export interface DataTableProps<Row extends object> {
   /** What the table holds, for screen readers. */
@@ -43,10 +48,15 @@ export interface DataTableProps<Row extends object> {
 
 /** A table of as many rows as the server has, of which only those in sight exist. */
 export function DataTable<Row extends object>(props: DataTableProps<Row>) {
-  const { rowHeight = 48 } = props;
+  const { columns, rowHeight = 48 } = props;
+  const sizes = {
+    '--row-height': `${rowHeight}px`,
+    '--columns': columnTracks(columns),
+    '--least-width': leastWidth(columns),
+  };
   // The frame with its styles stays out of what is drawn while scrolling.
   return (
-    <TableFrame style={{ '--row-height': `${rowHeight}px` } as CSSProperties}>
+    <TableFrame style={sizes as CSSProperties}>
       <VirtualTable {...props} rowHeight={rowHeight} />
     </TableFrame>
   );
@@ -71,15 +81,18 @@ function VirtualTable<Row extends object>(props: DataTableProps<Row> & { rowHeig
   const bodyRef = useRef<HTMLTableSectionElement>(null);
   const [active, setActive] = useState<GridPosition>({ row: 0, column: 0 });
   const scrollMargin = useScrollMargin(bodyRef, scrollRef);
-  const virtualizer = useVirtualizer({
+  const virtualizer = useVirtualizer<HTMLElement, HTMLTableRowElement>({
     count: rowCount,
     getScrollElement: () => scrollRef.current,
     estimateSize: () => rowHeight,
-    overscan: 8,
+    overscan,
     scrollMargin,
     // The head covers the first row that scrolls under it.
-    scrollPaddingStart: rowHeight,
+    scrollPaddingStart: headHeight,
+    initialOffset: () => scrollRef.current?.scrollTop ?? 0,
     initialRect: { width: 800, height: 600 },
+    observeElementRect: watchSize,
+    scrollToFn: scrollUnlessThere,
   });
   const shown = virtualizer.getVirtualItems();
   const first = shown[0]?.index ?? 0;
@@ -125,7 +138,7 @@ function VirtualTable<Row extends object>(props: DataTableProps<Row> & { rowHeig
       if (data !== undefined) void navigator.clipboard.writeText(tabSeparated(columns, [data]));
       return;
     }
-    const page = Math.max(1, last - first - 16);
+    const page = Math.max(1, last - first - 2 * overscan);
     const next = nextPosition(event, { row, column }, { rows: rowCount, columns: columns.length, page });
     if (next === undefined) return;
     event.preventDefault();
@@ -138,8 +151,6 @@ function VirtualTable<Row extends object>(props: DataTableProps<Row> & { rowHeig
     return data !== undefined && rowKey !== undefined ? rowKey(data) : `waiting ${index}`;
   };
 
-  const before = (shown[0]?.start ?? scrollMargin) - scrollMargin;
-  const after = virtualizer.getTotalSize() - ((shown[shown.length - 1]?.end ?? scrollMargin) - scrollMargin);
   return (
     <table
       role="grid"
@@ -150,14 +161,8 @@ function VirtualTable<Row extends object>(props: DataTableProps<Row> & { rowHeig
       tabIndex={0}
       onKeyDown={press}
     >
-      <colgroup>
-        {columns.map((each) => (
-          <col key={each.id} style={{ width: each.width }} />
-        ))}
-      </colgroup>
       <TableHead columns={columns} sort={sort} onSortBy={onSortBy} />
-      <tbody ref={bodyRef}>
-        <Spacer height={before} span={columns.length} />
+      <tbody ref={bodyRef} style={{ height: rowCount * rowHeight, paddingTop: first * rowHeight }}>
         {shown.map(({ index }) => (
           <TableRow
             key={keyAt(index)}
@@ -174,18 +179,7 @@ function VirtualTable<Row extends object>(props: DataTableProps<Row> & { rowHeig
             onToggle={toggle}
           />
         ))}
-        <Spacer height={after} span={columns.length} />
       </tbody>
     </table>
-  );
-}
-
-/** Stands for the rows that are out of sight. */
-function Spacer({ height, span }: { height: number; span: number }) {
-  if (height <= 0) return null;
-  return (
-    <tr data-spacer="" aria-hidden="true">
-      <td colSpan={span} style={{ height }} />
-    </tr>
   );
 }

@@ -12,7 +12,7 @@ const column = (id: 'name' | 'ohm', plainHeader: string): DataColumn<Line> => ({
   plainHeader,
   cell: () => null,
   plain: (line) => line[id],
-  width: '1rem',
+  width: 1,
 });
 
 const columns = [column('name', 'Part'), column('ohm', 'Resistance, Ω')];

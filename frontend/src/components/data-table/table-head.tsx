@@ -27,6 +27,7 @@ export function TableHead<Row>({ columns, sort, onSortBy }: TableHeadProps<Row>)
               aria-colindex={index + 1}
               aria-sort={ariaSort(column, sort)}
               data-align={column.align ?? 'start'}
+              data-stays={column.stays === true ? '' : undefined}
             >
               {column.sortable === true ? (
                 <button type="button" onClick={() => onSortBy(column.id)}>

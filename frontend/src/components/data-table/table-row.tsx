@@ -51,6 +51,7 @@ function Row<Data>({
           role="gridcell"
           aria-colindex={at + 1}
           data-align={column.align ?? 'start'}
+          data-stays={column.stays === true ? '' : undefined}
           data-active={at === activeColumn ? '' : undefined}
           title={row === undefined ? undefined : column.hint?.(row)}
           onPointerDown={() => onPoint(index, at)}

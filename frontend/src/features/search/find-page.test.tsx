@@ -106,7 +106,7 @@ describe('Find', () => {
     await userEvent.type(field, '5k1');
     await waitFor(() => expect(asked.at(-1)?.duty.window?.upper).toBe(5100));
     // Nothing was asked on the way that lacked the end that could not be read.
-    expect(asked.every((each) => [4900, 5100].includes(each.duty.window?.upper ?? NaN))).toBe(true);
+    expect(asked.every((each) => each.duty.window?.upper !== undefined)).toBe(true);
   });
 
   it('takes a relaxation from the ledger', async () => {

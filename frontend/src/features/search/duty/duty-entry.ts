@@ -36,8 +36,12 @@ export interface EntryDefinition {
   pointer: string;
   /** For intervals: what one number alone stands for. */
   interval?: SingleMeaning;
+  /** An example of what can be typed. */
   placeholder?: string;
 }
+
+/** Said to be an example, so that an empty field never looks filled. */
+const example = (text: string | undefined): string | undefined => text && `e.g. ${text}`;
 
 const entry = (
   label: string,
@@ -50,7 +54,7 @@ const entry = (
   quantity,
   unit,
   pointer,
-  placeholder,
+  placeholder: example(placeholder),
 });
 
 const interval = (
@@ -60,7 +64,7 @@ const interval = (
   pointer: string,
   single: SingleMeaning,
   placeholder?: string,
-): EntryDefinition => ({ label, quantity, unit, pointer, interval: single, placeholder });
+): EntryDefinition => ({ label, quantity, unit, pointer, interval: single, placeholder: example(placeholder) });
 
 export const entryDefinitions: Record<EntryName, EntryDefinition> = {
   lower: entry('Lowest', 'resistance', 'Ω', '/window/lower', '4k5'),

@@ -41,19 +41,23 @@ const noFilters = (state: FindState): FindState => ({
   flags: { certificate: false, numbered: false, offered: false },
 });
 
+export interface FilterChipsProps extends Pick<FindState, 'text' | 'filters' | 'flags'> {
+  onChange: ChangeFind;
+}
+
 /** What the list is narrowed to, each to be taken away again. */
-export function FilterChips({ state, onChange }: { state: FindState; onChange: ChangeFind }) {
+export function FilterChips({ text, filters, flags, onChange }: FilterChipsProps) {
   const facets = useFacets();
-  const choices = facets.data && filterChoices(facets.data, { ...state.filters, manufacturer: [] });
+  const choices = facets.data && filterChoices(facets.data, { ...filters, manufacturer: [] });
   const chips: Chip[] = [
-    ...(state.text === ''
+    ...(text === ''
       ? []
-      : [{ words: `named “${state.text}”`, remove: (before: FindState) => ({ ...before, text: '' }) }]),
+      : [{ words: `Named “${text}”`, remove: (before: FindState) => ({ ...before, text: '' }) }]),
     ...filterNames.flatMap((name) =>
-      state.filters[name].map((value): Chip => {
+      filters[name].map((value): Chip => {
         const words = choices?.[name].find((choice) => choice.value === value)?.words ?? value;
         return {
-          words: `${filterWords[name].toLowerCase()} ${words}`,
+          words: `${filterWords[name]}: ${words}`,
           remove: (before) => ({
             ...before,
             filters: { ...before.filters, [name]: before.filters[name].filter((each) => each !== value) },
@@ -62,9 +66,9 @@ export function FilterChips({ state, onChange }: { state: FindState; onChange: C
       }),
     ),
     ...flagNames
-      .filter((name) => state.flags[name])
+      .filter((name) => flags[name])
       .map((name): Chip => ({
-        words: flagWords[name].toLowerCase(),
+        words: flagWords[name],
         remove: (before) => ({ ...before, flags: { ...before.flags, [name]: false } }),
       })),
   ];

@@ -60,11 +60,9 @@ export function filterChoices(
       parts,
     })),
     family: familyChoices(facets, chosen.manufacturer),
-    technology: facets.technologies.map(({ value, parts }) => ({
-      value,
-      words: technologyWords[value],
-      parts,
-    })),
+    technology: facets.technologies
+      .map(({ value, parts }) => ({ value, words: technologyWords[value], parts }))
+      .sort((first, second) => first.words.localeCompare(second.words, 'en')),
     size: facets.sizes.map(({ code, metricCodes, parts }) => ({
       value: code,
       words: [code, ...metricCodes].join('/'),

@@ -1,13 +1,18 @@
 import { chakra } from '@chakra-ui/react';
+import { memo } from 'react';
 import { Failed, Loading } from '../../../components/states';
 import { type FindState, filterNames, flagNames } from '../find-address';
-import { useFacets } from '../requests/get-facets';
+import { type Facets, useFacets } from '../requests/get-facets';
 import type { ChangeFind } from '../use-find-state';
 import { filterChoices, filterWords, flagWords } from './filter-choices';
 import { FilterGroup } from './filter-group';
 
+export interface FilterPanelProps extends Pick<FindState, 'filters' | 'flags'> {
+  onChange: ChangeFind;
+}
+
 /** What narrows the catalogue beside the duty; the numbers are those of the whole catalogue. */
-export function FilterPanel({ state, onChange }: { state: FindState; onChange: ChangeFind }) {
+export const FilterPanel = memo(function FilterPanel({ filters, flags, onChange }: FilterPanelProps) {
   const facets = useFacets();
   return (
     <chakra.section mt={6} aria-label="Only these parts">
@@ -17,14 +22,14 @@ export function FilterPanel({ state, onChange }: { state: FindState; onChange: C
       </chakra.div>
       {facets.isPending && <Loading label="Reading what can be chosen" lines={3} />}
       {facets.isError && <Failed error={facets.error} onRetry={() => void facets.refetch()} />}
-      {facets.data !== undefined && <Filters facets={facets.data} state={state} onChange={onChange} />}
+      {facets.data !== undefined && <Filters facets={facets.data} filters={filters} onChange={onChange} />}
       <chakra.div borderTop="1px solid" borderColor="border" py={1.5}>
         {flagNames.map((name) => (
           <chakra.label key={name} display="flex" gap={2} alignItems="center" minHeight={6} fontSize="sm">
             <chakra.input
               type="checkbox"
               accentColor="accent"
-              checked={state.flags[name]}
+              checked={flags[name]}
               onChange={() =>
                 onChange((before) => ({
                   ...before,
@@ -38,22 +43,22 @@ export function FilterPanel({ state, onChange }: { state: FindState; onChange: C
       </chakra.div>
     </chakra.section>
   );
-}
+});
 
 interface FiltersProps {
-  facets: Parameters<typeof filterChoices>[0];
-  state: FindState;
+  facets: Facets;
+  filters: FindState['filters'];
   onChange: ChangeFind;
 }
 
-function Filters({ facets, state, onChange }: FiltersProps) {
-  const choices = filterChoices(facets, state.filters);
+function Filters({ facets, filters, onChange }: FiltersProps) {
+  const choices = filterChoices(facets, filters);
   return filterNames.map((name) => (
     <FilterGroup
       key={name}
       title={filterWords[name]}
       choices={choices[name]}
-      chosen={state.filters[name]}
+      chosen={filters[name]}
       onChosen={(chosen) =>
         onChange((before) => ({ ...before, filters: { ...before.filters, [name]: chosen } }))
       }

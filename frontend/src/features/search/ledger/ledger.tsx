@@ -8,6 +8,7 @@ import { type ReadyRelaxation, readyRelaxations } from './relaxation-words';
 
 const count = new Intl.NumberFormat('en');
 
+/** All styles of the strip in one class: it is drawn anew with every answer. */
 const Strip = chakra('ul', {
   base: {
     display: 'grid',
@@ -17,18 +18,15 @@ const Strip = chakra('ul', {
     borderBlock: '1px solid',
     borderColor: 'border',
     fontSize: '2xs',
+    color: 'fg.muted',
     '& > li': { px: 3, py: 2, borderInlineStart: '1px solid', borderColor: 'border' },
     '& > li:first-of-type': { ps: 0, borderInlineStart: 0 },
-  },
-});
-
-const Relax = chakra('button', {
-  base: {
-    color: 'accent',
-    display: 'block',
-    textAlign: 'start',
-    minHeight: 6,
-    _hover: { textDecoration: 'underline', textUnderlineOffset: '3px' },
+    '& > li > span': { display: 'block' },
+    '& > li > span[data-counts]': { fontSize: 'sm' },
+    '& b': { color: 'fg', fontWeight: 'semibold' },
+    '& button': { display: 'block', textAlign: 'start', minHeight: 6 },
+    '& button[data-offer]': { color: 'accent' },
+    '& button:hover': { textDecoration: 'underline', textUnderlineOffset: '3px' },
   },
 });
 
@@ -48,21 +46,16 @@ export function Ledger({ answer, duty, onChange }: LedgerProps) {
     <Strip aria-label="What removes parts">
       {removing.map(({ check, removes, removesAlone }) => (
         <li key={check}>
-          <chakra.span color="fg.muted">{checkWords[check].toLowerCase()} removes</chakra.span>
-          <chakra.span display="block" fontSize="sm" color="fg.muted">
-            <chakra.b color="fg" fontWeight="semibold">
-              {count.format(removes)}
-            </chakra.b>{' '}
-            {count.format(removesAlone)} alone
-          </chakra.span>
+          <span>{checkWords[check].toLowerCase()} removes</span>
+          <span data-counts="">
+            <b>{count.format(removes)}</b> {count.format(removesAlone)} alone
+          </span>
           <Offers offers={relaxations.filter((each) => each.under === check)} onChange={onChange} />
         </li>
       ))}
       {homeless.length > 0 && (
         <li>
-          <chakra.span color="fg.muted" display="block">
-            asking less
-          </chakra.span>
+          <span>asking less</span>
           <Offers offers={homeless} onChange={onChange} />
         </li>
       )}
@@ -80,14 +73,14 @@ function Offers({ offers, onChange }: { offers: readonly ReadyRelaxation[]; onCh
   return (
     <>
       {(all ? sorted : sorted.slice(0, shownAtFirst)).map(({ words, gains, relaxed }) => (
-        <Relax key={words} type="button" onClick={() => onChange(relaxed)}>
+        <button key={words} type="button" data-offer="" onClick={() => onChange(relaxed)}>
           {words} brings {count.format(gains)}
-        </Relax>
+        </button>
       ))}
       {rest > 0 && (
-        <Relax type="button" color="fg.muted" aria-expanded={all} onClick={() => setAll(!all)}>
+        <button type="button" aria-expanded={all} onClick={() => setAll(!all)}>
           {all ? 'fewer' : `${rest} more`}
-        </Relax>
+        </button>
       )}
     </>
   );

@@ -1,9 +1,10 @@
+import { memo } from 'react';
 import { IntervalField } from '../../../components/interval-field';
 import { QuantityField } from '../../../components/quantity-field';
-import type { ChangeDuty } from './change-duty';
 import { type EntryName, entryDefinitions } from '../duty/duty-entry';
 import type { DutyText } from '../duty/duty-text';
 import type { EntryErrors } from '../duty/entry-reader';
+import type { ChangeDuty } from './change-duty';
 import { entryPlace } from './panel-places';
 
 export interface DutyEntryFieldProps {
@@ -15,8 +16,25 @@ export interface DutyEntryFieldProps {
   placeholder?: string;
 }
 
-/** One entry of the duty in the panel. */
+/** One entry of the duty in the panel; drawn again only when it itself changes, so that typing into one is quick. */
 export function DutyEntryField({ name, duty, errors, onChange, placeholder }: DutyEntryFieldProps) {
+  return (
+    <OneEntry
+      name={name}
+      text={duty.entries[name] ?? ''}
+      error={errors[name]}
+      placeholder={placeholder}
+      onChange={onChange}
+    />
+  );
+}
+
+interface OneEntryProps extends Pick<DutyEntryFieldProps, 'name' | 'onChange' | 'placeholder'> {
+  text: string;
+  error: string | undefined;
+}
+
+const OneEntry = memo(function OneEntry({ name, text, error, placeholder, onChange }: OneEntryProps) {
   const definition = entryDefinitions[name];
   const common = {
     id: entryPlace(name),
@@ -24,14 +42,14 @@ export function DutyEntryField({ name, duty, errors, onChange, placeholder }: Du
     quantity: definition.quantity,
     unit: definition.unit === '' ? undefined : definition.unit,
     placeholder: placeholder ?? definition.placeholder,
-    text: duty.entries[name] ?? '',
-    error: errors[name],
-    onText: (text: string) =>
-      onChange((before) => ({ ...before, entries: { ...before.entries, [name]: text } })),
+    text,
+    error,
+    onText: (typed: string) =>
+      onChange((before) => ({ ...before, entries: { ...before.entries, [name]: typed } })),
   };
   return definition.interval === undefined ? (
     <QuantityField {...common} />
   ) : (
     <IntervalField {...common} single={definition.interval} />
   );
-}
+});

@@ -1,21 +1,16 @@
 import { chakra } from '@chakra-ui/react';
 import { deviationRules } from '@resistry/engineering/duty/duty';
 import { formatQuantity } from '@resistry/engineering/notation/format-quantity';
+import { memo, useCallback, useMemo } from 'react';
 import { Button } from '../../../components/button';
 import { SelectField } from '../../../components/select-field';
 import type { PolicySummary } from '../../policies/requests/list-policies';
 import { policyOptions } from '../policy-name';
 import type { EntryName } from '../duty/duty-entry';
 import { DutyEntryField } from './duty-entry-field';
-import {
-  BodyGroup,
-  type DutyGroupProps,
-  FeaturesGroup,
-  NoiseAndFrequencyGroup,
-  PulsesGroup,
-  SafetyGroup,
-  StandingGroup,
-} from './folded-groups';
+import { FeaturesGroup, SafetyGroup, StandingGroup } from './chosen-groups';
+import type { DutyGroupProps } from './duty-entries';
+import { BodyGroup, NoiseAndFrequencyGroup, PulsesGroup } from './folded-groups';
 import { FoldedGroup, OpenGroup } from './panel-group';
 import { panelPlaces } from './panel-places';
 
@@ -31,18 +26,34 @@ const deviationOptions = deviationRules.map((value) => ({
 /** What a link is asked for at first: the residual resistance that chips of all usual sizes stay within. */
 const linkResistance = '50m';
 
+/** Drawn again only when the choice changes, not with each key typed elsewhere in the duty. */
+const Select = memo(SelectField);
+
 /** The dissipation that a voltage leaves at the lowest resistance, as a hint in the empty power field. */
 function impliedPower({ read }: DutyGroupProps): string | undefined {
   const volt = read.duty?.load?.voltage;
   const ohm = read.duty?.window?.lower;
   if (volt === undefined || ohm === undefined || ohm === 0) return undefined;
   const highest = Math.max(Math.abs(volt.min), Math.abs(volt.max));
-  return formatQuantity(highest ** 2 / ohm, 'power', { significantDigits: 3 });
+  return `implied ${formatQuantity(highest ** 2 / ohm, 'power', { significantDigits: 3 })}`;
 }
 
 /** What a position demands, grouped as an engineer thinks: a few fields first, the rest folded. */
-export function DutyPanel(props: DutyPanelProps) {
+export const DutyPanel = memo(function DutyPanel(props: DutyPanelProps) {
   const { duty, read, onChange, policies } = props;
+  const policyChoices = useMemo(() => policyOptions(policies), [policies]);
+  const setPolicy = useCallback(
+    (value: string) => onChange((before) => ({ ...before, policy: value === '' ? undefined : value })),
+    [onChange],
+  );
+  const setDeviation = useCallback(
+    (value: string) =>
+      onChange((before) => ({
+        ...before,
+        deviation: deviationRules.find((rule) => rule === value) ?? 'worst-case',
+      })),
+    [onChange],
+  );
   const field = (name: EntryName, placeholder?: string) => (
     <DutyEntryField
       name={name}
@@ -81,27 +92,22 @@ export function DutyPanel(props: DutyPanelProps) {
       </OpenGroup>
       <OpenGroup title="Surroundings">
         {field('ambient')}
-        <SelectField
+        <Select
           id={panelPlaces.policy}
           label="Policy"
           value={duty.policy ?? ''}
-          options={policyOptions(policies)}
-          onValue={(value) => onChange((before) => ({ ...before, policy: value === '' ? undefined : value }))}
+          options={policyChoices}
+          onValue={setPolicy}
         />
       </OpenGroup>
       <OpenGroup title="Life and accuracy">
         {field('life')}
-        <SelectField
+        <Select
           id={panelPlaces.deviation}
           label="Deviations add as"
           value={duty.deviation}
           options={deviationOptions}
-          onValue={(value) =>
-            onChange((before) => ({
-              ...before,
-              deviation: deviationRules.find((rule) => rule === value) ?? 'worst-case',
-            }))
-          }
+          onValue={setDeviation}
         />
       </OpenGroup>
       <PulsesGroup {...props} />
@@ -136,4 +142,4 @@ export function DutyPanel(props: DutyPanelProps) {
       <StandingGroup {...props} />
     </chakra.form>
   );
-}
+});

@@ -1,22 +1,32 @@
 import { chakra } from '@chakra-ui/react';
-import { type ReactNode, useEffect, useRef } from 'react';
+import { type ReactNode, useDeferredValue, useEffect, useRef } from 'react';
 
-const Heading = chakra('h2', { base: { fontSize: '2xs', fontWeight: 'semibold', color: 'fg.muted' } });
+const Group = chakra('section', {
+  base: {
+    display: 'grid',
+    gap: 1.5,
+    mb: 6,
+    '& > header': {
+      display: 'flex',
+      justifyContent: 'space-between',
+      alignItems: 'baseline',
+      mb: 0.5,
+      fontSize: '2xs',
+      color: 'fg.muted',
+    },
+  },
+});
 
 /** A group of the duty that is always open: what most positions need. */
 export function OpenGroup({ title, note, children }: { title: string; note?: string; children: ReactNode }) {
   return (
-    <chakra.section display="grid" gap={1.5} mb={6} aria-label={title}>
-      <chakra.div display="flex" justifyContent="space-between" alignItems="baseline" mb={0.5}>
-        <Heading>{title}</Heading>
-        {note !== undefined && (
-          <chakra.span fontSize="2xs" color="fg.muted">
-            {note}
-          </chakra.span>
-        )}
-      </chakra.div>
+    <Group aria-label={title}>
+      <header>
+        <h2>{title}</h2>
+        {note !== undefined && <span>{note}</span>}
+      </header>
       {children}
-    </chakra.section>
+    </Group>
   );
 }
 
@@ -37,6 +47,8 @@ const Folded = chakra('details', {
     },
     '& > summary::-webkit-details-marker': { display: 'none' },
     '& > summary:hover': { color: 'accent' },
+    '& > summary > b': { fontWeight: 'semibold' },
+    '& > summary > span': { color: 'fg.muted', textAlign: 'end' },
     '&[open] > summary > span': { visibility: 'hidden' },
     '& > div': { display: 'grid', gap: 1.5, pb: 4 },
   },
@@ -54,6 +66,8 @@ export interface FoldedGroupProps {
 /** A group of the duty that is rarely needed: folded to its title and what it holds. */
 export function FoldedGroup({ title, summary, wrong = false, children }: FoldedGroupProps) {
   const groupRef = useRef<HTMLDetailsElement>(null);
+  // What is folded away comes after what is in sight.
+  const drawn = useDeferredValue(true, false);
   // Opened from outside React's view of it, so that mending the entry does not fold the group under one's hands.
   useEffect(() => {
     if (wrong && groupRef.current !== null) groupRef.current.open = true;
@@ -61,12 +75,10 @@ export function FoldedGroup({ title, summary, wrong = false, children }: FoldedG
   return (
     <Folded ref={groupRef}>
       <summary>
-        <chakra.b fontWeight="semibold">{title}</chakra.b>
-        <chakra.span color="fg.muted" textAlign="end">
-          {summary}
-        </chakra.span>
+        <b>{title}</b>
+        <span>{summary}</span>
       </summary>
-      <div>{children}</div>
+      <div>{(drawn || wrong) && children}</div>
     </Folded>
   );
 }

@@ -1,6 +1,6 @@
 import type { CheckName } from '@resistry/engineering/checks/check';
 import type { Approval } from '@resistry/engineering/ratings/technology';
-import { keepPreviousData, queryOptions } from '@tanstack/react-query';
+import { queryOptions } from '@tanstack/react-query';
 import { client } from '../../../api/client';
 import type { AnsweredAssessment } from '../../../components/assessment/answered-assessment';
 import type { SearchPart } from '../search-part';
@@ -12,6 +12,8 @@ export interface SearchItem {
   /** With `group: 'company'`: the approved sources under the number, each with its own assessment. */
   companyPartNumber?: { id: number; number: string };
   sources?: { part: SearchPart; assessment: AnsweredAssessment }[];
+  /** It stands beneath its number, as one of its sources. */
+  beneath?: true;
   /** What it has far more of than is asked, in words, the largest first. */
   overSpecification: string[];
 }
@@ -40,16 +42,18 @@ export interface SearchAnswer {
   relaxations: Relaxation[];
 }
 
-export const pageSize = 50;
+/** As many as fill a tall screen: with its assessment a row weighs more than its search. */
+export const pageSize = 30;
 
 export async function searchParts(
   request: SearchRequest,
   page: number,
+  size: number,
   signal?: AbortSignal,
 ): Promise<SearchAnswer> {
   const { data } = await client.post<SearchAnswer>(
     '/parts/search',
-    { ...request, page, pageSize },
+    { ...request, page, pageSize: size },
     { signal },
   );
   return data;
@@ -61,9 +65,10 @@ export const searchPage = (request: SearchRequest | undefined, page: number) =>
     queryKey: ['parts', 'search', request, page],
     queryFn: ({ signal }) => {
       if (request === undefined) throw new Error('A search that is not enabled was run.');
-      return searchParts(request, page, signal);
+      return searchParts(request, page, pageSize, signal);
     },
     enabled: request !== undefined,
-    placeholderData: keepPreviousData,
     staleTime: 20_000,
+    // A page of assessments is large, and comparing two of them costs more than drawing the rows again.
+    structuralSharing: false,
   });

@@ -1,30 +1,32 @@
 import { useQuery } from '@tanstack/react-query';
 import { useState } from 'react';
+import type { Question } from '../question';
 import { type SearchAnswer, searchPage } from './search-parts';
-import type { SearchRequest } from './search-request';
+
+/** An answer with the question that it answers. */
+export interface Answered {
+  answer: SearchAnswer;
+  question: Question;
+}
 
 export interface Search {
-  /** The answer to `answered`; the rows and the counts are always of the same request. */
-  answer: SearchAnswer | undefined;
-  answered: SearchRequest | undefined;
-  /** A newer request is on its way, and what is shown is still the old answer. */
+  /** The latest answer there is: to this question, or to an earlier one while this is on its way. */
+  latest: Answered | undefined;
   waiting: boolean;
   error: Error | null;
   retry: () => void;
 }
 
 /** Asks the catalogue and keeps the old answer whole until the new one is there. */
-export function useSearch(request: SearchRequest | undefined): Search {
-  const [answered, setAnswered] = useState<SearchRequest>();
-  const head = useQuery(searchPage(request, 1));
-  const shown =
-    request !== undefined && head.data !== undefined && !head.isPlaceholderData ? request : answered;
-  if (shown !== answered) setAnswered(shown);
+export function useSearch(question: Question): Search {
+  const [latest, setLatest] = useState<Answered>();
+  const { data, error, isError, refetch } = useQuery(searchPage(question.request, 1));
+  if (data !== undefined && question.request !== undefined && latest?.answer !== data)
+    setLatest({ answer: data, question });
   return {
-    answer: head.data,
-    answered: shown,
-    waiting: head.isPlaceholderData || (head.isFetching && head.data === undefined),
-    error: head.error,
-    retry: () => void head.refetch(),
+    latest,
+    waiting: question.request !== undefined && data === undefined && !isError,
+    error,
+    retry: () => void refetch(),
   };
 }

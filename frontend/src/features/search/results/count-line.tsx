@@ -30,7 +30,8 @@ const Actions = chakra('div', {
   },
 });
 
-function countWords(total: number, grouped: boolean): string {
+/** "27 parts meet it": the heading of the results, and what is said aloud when they change. */
+export function countWords(total: number, grouped: boolean): string {
   const things = grouped ? ['number meets', 'numbers meet'] : ['part meets', 'parts meet'];
   return `${count.format(total)} ${total === 1 ? things[0] : things[1]} it`;
 }
@@ -49,9 +50,7 @@ export function CountLine(props: CountLineProps) {
   return (
     <chakra.div my={3}>
       <chakra.div display="flex" flexWrap="wrap" alignItems="baseline" columnGap={4}>
-        <chakra.h1 fontSize="xl">
-          <span role="status">{countWords(total, grouped)}</span>
-        </chakra.h1>
+        <chakra.h1 fontSize="xl">{countWords(total, grouped)}</chakra.h1>
         <chakra.span fontSize="sm" color="fg.muted">
           {approvalsWords(byApproval)}
         </chakra.span>

@@ -1,5 +1,8 @@
-import { type SearchItem, pageSize, searchParts } from '../requests/search-parts';
+import { type SearchItem, searchParts } from '../requests/search-parts';
 import type { SearchRequest } from '../requests/search-request';
+
+/** Rows asked for at once. */
+const pageSize = 100;
 
 /** The most rows that are fetched for a file or the clipboard. */
 export const mostRows = { file: 10_000, clipboard: 1_000 } as const;
@@ -16,7 +19,7 @@ export async function fetchRows(
 ): Promise<SearchItem[]> {
   const rows: SearchItem[] = [];
   for (let page = 1; rows.length < most; page += 1) {
-    const { items, total, unrated } = await searchParts(request, page, signal);
+    const { items, total, unrated } = await searchParts(request, page, pageSize, signal);
     rows.push(...items);
     onProgress(rows.length);
     const shown = request.show === 'met' ? total : total + unrated;

@@ -13,8 +13,12 @@ export function BodyCell({ part }: { part: SearchPart }) {
   return body === undefined ? null : <DrawnPart body={body} />;
 }
 
-/** The company's number first, the manufacturer's beneath; where there is none, the manufacturer's alone. */
-export function NumberCell({ part }: { part: SearchPart }) {
+/**
+ * The company's number first, the manufacturer's beneath; where there is none, the manufacturer's alone. A source stands
+ * below the number it shares, so it is told by its own.
+ */
+export function NumberCell({ part, beneath = false }: { part: SearchPart; beneath?: boolean }) {
+  if (beneath) return <span data-beneath="">{part.manufacturerPartNumber}</span>;
   return part.companyPartNumber ? (
     <>
       <b>{part.companyPartNumber.number}</b>
@@ -29,7 +33,10 @@ export function NumberCell({ part }: { part: SearchPart }) {
 }
 
 /** The tightest check as a rule, with its name and figure beneath, and what there is too much of. */
-export function MarginCell({ assessment, overSpecification }: Omit<SearchItem, 'part'>) {
+export function MarginCell({
+  assessment,
+  overSpecification,
+}: Pick<SearchItem, 'assessment' | 'overSpecification'>) {
   const check = tightestCheck(assessment.checks);
   if (check === undefined) return <span data-second="">nothing asked</span>;
   const [excess] = overSpecification;
@@ -58,14 +65,14 @@ const NarrowFrame = chakra('div', {
 });
 
 /** One result on a narrow screen: what decides, in two lines. */
-export function NarrowResult({ part, ...item }: SearchItem) {
+export function NarrowResult({ part, assessment, overSpecification, beneath = false }: SearchItem) {
   return (
     <NarrowFrame>
       <div>
         <BodyCell part={part} />
       </div>
       <div>
-        <b>{leadingNumber(part)}</b>
+        {beneath ? part.manufacturerPartNumber : <b>{leadingNumber(part)}</b>}
         <span data-second="">
           {part.manufacturer.name} {part.family.code}, {valueWords(part)}
         </span>
@@ -77,7 +84,7 @@ export function NarrowResult({ part, ...item }: SearchItem) {
         </chakra.span>
       </div>
       <div>
-        <MarginCell {...item} />
+        <MarginCell assessment={assessment} overSpecification={overSpecification} />
       </div>
     </NarrowFrame>
   );

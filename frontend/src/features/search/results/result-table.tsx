@@ -1,7 +1,9 @@
+import { chakra } from '@chakra-ui/react';
 import { type RefObject, useCallback, useMemo, useState } from 'react';
 import type { DataColumn, Sort } from '../../../components/data-table/data-column';
 import { DataTable } from '../../../components/data-table/data-table';
 import type { RowTree } from '../../../components/data-table/row-tree';
+import { Failed } from '../../../components/states';
 import type { SearchItem } from '../requests/search-parts';
 import type { SearchRequest } from '../requests/search-request';
 import { useSearchRows } from '../requests/use-search-rows';
@@ -28,7 +30,7 @@ const noneUnfolded: Unfolded = new Map();
 
 /** The rows of a search. Scrolling through pages draws nothing but this. */
 export function ResultTable({ answered, rowCount, openPart, onOpen, ...table }: ResultTableProps) {
-  const { itemAt, showRange } = useSearchRows(answered);
+  const { itemAt, showRange, error, retry } = useSearchRows(answered);
   const [openPlace, setOpenPlace] = useState<number>();
   const [unfoldedOf, setUnfolded] = useState<{ question: string; unfolded: Unfolded }>();
   const question = JSON.stringify(answered);
@@ -48,8 +50,8 @@ export function ResultTable({ answered, rowCount, openPart, onOpen, ...table }: 
   };
   const visible = useCallback(
     (first: number, last: number) =>
-      showRange(rowAtPlace(first, unfolded).item, rowAtPlace(last, unfolded).item),
-    [showRange, unfolded],
+      showRange(rowAtPlace(first, unfolded).item, rowAtPlace(last, unfolded).item, rowCount),
+    [showRange, unfolded, rowCount],
   );
   const toggle = (place: number): void => {
     const { item, source } = rowAtPlace(place, unfolded);
@@ -70,16 +72,23 @@ export function ResultTable({ answered, rowCount, openPart, onOpen, ...table }: 
   const shownCount = useMemo(() => countOfRows(rowCount, unfolded), [rowCount, unfolded]);
   const selected = openPlace !== undefined && rowAt(openPlace)?.part.id === openPart ? openPlace : undefined;
   return (
-    <DataTable
-      label="Parts that meet the duty"
-      rowAt={rowAt}
-      rowCount={shownCount}
-      rowKey={keyOf}
-      onVisible={visible}
-      selectedIndex={selected}
-      onOpen={open}
-      tree={answered?.group === 'company' ? tree : undefined}
-      {...table}
-    />
+    <>
+      <DataTable
+        label="Parts that meet the duty"
+        rowAt={rowAt}
+        rowCount={shownCount}
+        rowKey={keyOf}
+        onVisible={visible}
+        selectedIndex={selected}
+        onOpen={open}
+        tree={answered?.group === 'company' ? tree : undefined}
+        {...table}
+      />
+      {error !== null && (
+        <chakra.div position="sticky" bottom={-4} bg="bg" borderTop="1px solid" borderColor="border">
+          <Failed error={error} onRetry={retry} />
+        </chakra.div>
+      )}
+    </>
   );
 }

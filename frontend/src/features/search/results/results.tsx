@@ -1,70 +1,84 @@
-import type { ReactNode, RefObject } from 'react';
+import { type RefObject, memo, useCallback } from 'react';
 import { ColumnChooser } from '../../../components/data-table/column-chooser';
 import type { Sort } from '../../../components/data-table/data-column';
 import { useTableColumns } from '../../../components/data-table/use-table-columns';
-import type { SearchRequest, Show } from '../requests/search-request';
-import type { Search } from '../requests/use-search';
-import { CountLine } from './count-line';
+import { FilterChips } from '../filters/filter-chips';
+import { type FindState, isNarrowed } from '../find-address';
+import { Ledger } from '../ledger/ledger';
+import type { ChangeDuty } from '../panel/change-duty';
+import type { Show } from '../requests/search-request';
+import type { Answered } from '../requests/use-search';
+import type { ChangeFind } from '../use-find-state';
 import { CopyLink } from './copy-link';
+import { CountLine } from './count-line';
+import { NothingMeets } from './nothing-meets';
 import { groupedColumns, narrowColumns, resultColumns } from './result-columns';
 import { ResultTable } from './result-table';
 import { TableActions } from './table-actions';
 
-export interface ResultsProps {
-  search: Search;
-  request: SearchRequest | undefined;
-  show: Show;
-  grouped: boolean;
+export interface ResultsProps extends Pick<FindState, 'text' | 'filters' | 'flags' | 'show' | 'grouped'> {
+  answered: Answered;
   sort: Sort | undefined;
   narrow: boolean;
   /** Id of the part whose sheet is open. */
   openPart: number | undefined;
   scrollRef: RefObject<HTMLElement | null>;
-  onSort: (sort: Sort | undefined) => void;
-  onShow: (show: Show) => void;
-  onGrouped: (grouped: boolean) => void;
-  onOpen: (partId: number) => void;
-  /** What stands between the count and the rows. */
-  ledger: ReactNode;
-  /** What stands in place of the rows where there are none. */
-  nothing: ReactNode;
+  onChange: ChangeFind;
+  onChangeDuty: ChangeDuty;
   /** The whole address of the search. */
   address: () => string;
 }
 
 const rowHeights = { wide: 52, narrow: 112 };
 
-/** The parts that meet the duty, with how many they are and what can be done with the list. */
-export function Results(props: ResultsProps) {
-  const { search, request, show, grouped, sort, narrow, openPart, scrollRef, onSort, onOpen } = props;
+/** The parts that meet the duty, with how many they are, what keeps the others out and what can be done with the list. */
+export const Results = memo(function Results(props: ResultsProps) {
+  const { answered, text, filters, flags, show, grouped, sort, narrow, openPart, scrollRef } = props;
+  const { onChange, onChangeDuty } = props;
+  const { answer, question } = answered;
+  const onSort = useCallback(
+    (next: Sort | undefined) => onChange((before) => ({ ...before, sort: next })),
+    [onChange],
+  );
+  const onShow = useCallback((next: Show) => onChange((before) => ({ ...before, show: next })), [onChange]);
+  const onGrouped = useCallback(
+    (next: boolean) => onChange((before) => ({ ...before, grouped: next })),
+    [onChange],
+  );
+  const onOpen = useCallback((part: number) => onChange((before) => ({ ...before, part })), [onChange]);
   const table = useTableColumns('results', resultColumns, sort, onSort);
-  const total = search.answer?.total ?? 0;
-  const unrated = search.answer?.unrated ?? 0;
-  // What was asked for when it was answered, not what the switch says by now.
-  const rowCount = search.answered?.show === 'met-and-unrated' ? total + unrated : total;
+  // What was asked for when it was answered, not what the switches say by now.
+  const rowCount = question.state.show === 'met-and-unrated' ? answer.total + answer.unrated : answer.total;
   const shown = narrow ? narrowColumns : table.visible;
-  const columns = search.answered?.group === 'company' ? groupedColumns(shown) : shown;
+  const columns = question.state.grouped ? groupedColumns(shown) : shown;
   return (
     <>
       <CountLine
-        total={total}
-        unrated={unrated}
-        byApproval={search.answer?.byApproval ?? {}}
+        total={answer.total}
+        unrated={answer.unrated}
+        byApproval={answer.byApproval}
         show={show}
         grouped={grouped}
-        onShow={props.onShow}
-        onGrouped={props.onGrouped}
+        onShow={onShow}
+        onGrouped={onGrouped}
       >
         {!narrow && <ColumnChooser choices={table.choices} />}
-        <TableActions request={request} rowCount={rowCount} columns={table.visible} />
+        <TableActions request={question.request} rowCount={rowCount} columns={table.visible} />
         <CopyLink address={props.address} />
       </CountLine>
-      {props.ledger}
+      <Ledger answer={answer} duty={question.state.duty} onChange={onChangeDuty} />
+      <FilterChips text={text} filters={filters} flags={flags} onChange={onChange} />
       {rowCount === 0 ? (
-        props.nothing
+        <NothingMeets
+          answer={answer}
+          duty={question.state.duty}
+          narrowed={isNarrowed(question.state)}
+          onChange={onChangeDuty}
+          onShowUnrated={() => onShow('met-and-unrated')}
+        />
       ) : (
         <ResultTable
-          answered={search.answered}
+          answered={question.request}
           rowCount={rowCount}
           columns={columns}
           rowHeight={narrow ? rowHeights.narrow : rowHeights.wide}
@@ -77,4 +91,4 @@ export function Results(props: ResultsProps) {
       )}
     </>
   );
-}
+});

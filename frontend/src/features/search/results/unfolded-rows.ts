@@ -29,5 +29,5 @@ export function rowAtPlace(place: number, unfolded: Unfolded): ShownRow {
 /** A source as a row of its own. What there is too much of is named for the number as a whole only. */
 export function rowOfSource(item: SearchItem, source: number): SearchItem | undefined {
   const found = item.sources?.[source];
-  return found && { ...found, overSpecification: [] };
+  return found && { ...found, overSpecification: [], beneath: true };
 }

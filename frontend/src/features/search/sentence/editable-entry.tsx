@@ -1,5 +1,5 @@
 import { chakra } from '@chakra-ui/react';
-import { type KeyboardEvent, useEffect, useRef, useState } from 'react';
+import { type KeyboardEvent, memo, useEffect, useRef, useState } from 'react';
 import { type EntryName, entryDefinitions } from '../duty/duty-entry';
 import { entryWords } from '../duty/entry-words';
 import { PhraseButton, phrase } from './phrase';
@@ -30,7 +30,8 @@ export interface EditableEntryProps {
 }
 
 /** A number of the sentence: press it and type another. Enter keeps it, Escape brings the old one back. */
-export function EditableEntry({ name, text, error, onText }: EditableEntryProps) {
+export const EditableEntry = memo(function EditableEntry(props: EditableEntryProps) {
+  const { name, text, error } = props;
   const [editing, setEditing] = useState(false);
   const buttonRef = useRef<HTMLButtonElement>(null);
   if (editing) {
@@ -38,7 +39,7 @@ export function EditableEntry({ name, text, error, onText }: EditableEntryProps)
       setEditing(false);
       if (byKeyboard) requestAnimationFrame(() => buttonRef.current?.focus());
     };
-    return <EntryEditor name={name} text={text} error={error} onText={onText} onDone={done} />;
+    return <EntryEditor {...props} onDone={done} />;
   }
   return (
     <PhraseButton
@@ -51,7 +52,7 @@ export function EditableEntry({ name, text, error, onText }: EditableEntryProps)
       {entryWords(name, text)}
     </PhraseButton>
   );
-}
+});
 
 function EntryEditor({
   name,

@@ -1,5 +1,5 @@
 import { chakra } from '@chakra-ui/react';
-import { Fragment } from 'react';
+import { Fragment, memo, useCallback } from 'react';
 import type { PolicySummary } from '../../policies/requests/list-policies';
 import type { EntryName } from '../duty/duty-entry';
 import type { DutyText } from '../duty/duty-text';
@@ -21,14 +21,27 @@ export interface SentenceProps {
   onGoTo?: () => void;
 }
 
+const Words = chakra('p', {
+  base: {
+    fontSize: { base: 'md', md: 'lg' },
+    lineHeight: 1.65,
+    maxWidth: '60rem',
+    '& > span': { whiteSpace: 'nowrap' },
+  },
+});
+
 /** The marks at the start of some words, which belong to what stands before them. */
 const leadingMarks = /^[,.;]*/;
 
 /** The duty as one sentence. Its numbers and its policy are edited in place; its other choices lead to where they are made. */
-export function Sentence({ duty, policies, errors, onChange, onGoTo }: SentenceProps) {
+export const Sentence = memo(function Sentence(props: SentenceProps) {
+  const { duty, policies, errors, onChange, onGoTo } = props;
   const pieces = sentencePieces(duty, policyNameOf(duty.policy, policies));
-  const setEntry = (name: EntryName, text: string): void =>
-    onChange((before) => ({ ...before, entries: { ...before.entries, [name]: text } }));
+  const setEntry = useCallback(
+    (name: EntryName, text: string) =>
+      onChange((before) => ({ ...before, entries: { ...before.entries, [name]: text } })),
+    [onChange],
+  );
 
   const phraseOf = (piece: Exclude<Piece, { kind: 'words' }>) => {
     switch (piece.kind) {
@@ -68,7 +81,7 @@ export function Sentence({ duty, policies, errors, onChange, onGoTo }: SentenceP
   };
 
   return (
-    <chakra.p fontSize={{ base: 'md', md: 'lg' }} lineHeight={1.65} maxWidth="60rem">
+    <Words>
       {pieces.map((piece, index) => {
         const next = pieces[index + 1];
         if (piece.kind === 'words') {
@@ -83,12 +96,12 @@ export function Sentence({ duty, policies, errors, onChange, onGoTo }: SentenceP
         const marks = next?.kind === 'words' ? leadingMarks.exec(next.words)?.[0] : '';
         const key = piece.kind === 'entry' ? piece.name : piece.kind === 'choice' ? piece.place : 'policy';
         return (
-          <chakra.span key={`${key} ${piece.kind === 'entry' ? '' : index}`} whiteSpace="nowrap">
+          <span key={`${key} ${piece.kind === 'entry' ? '' : index}`}>
             {phraseOf(piece)}
             {marks}
-          </chakra.span>
+          </span>
         );
       })}
-    </chakra.p>
+    </Words>
   );
-}
+});
