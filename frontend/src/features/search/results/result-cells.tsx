@@ -65,7 +65,7 @@ const NarrowFrame = chakra('div', {
 });
 
 /** One result on a narrow screen: what decides, in two lines. */
-export function NarrowResult({ part, assessment, overSpecification, beneath = false }: SearchItem) {
+export function NarrowResult({ part, assessment, overSpecification, beneath }: SearchItem) {
   return (
     <NarrowFrame>
       <div>
