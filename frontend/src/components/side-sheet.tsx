@@ -25,6 +25,7 @@ const Sheet = chakra(m.aside, {
     width: { base: '100%', sm: '25.5rem', xl: 'auto' },
     zIndex: { base: 'sheet', xl: 'auto' },
     height: { base: '100dvh', xl: 'full' },
+    outline: 'none',
   },
 });
 
@@ -42,9 +43,21 @@ export function SideSheet({ label, onClose, children }: SideSheetProps) {
     return () => document.removeEventListener('keydown', press);
   }, [onClose]);
 
+  // Where it covers the list, the keyboard goes with it, and back to where it was.
+  useEffect(() => {
+    const sheet = sheetRef.current;
+    const before = document.activeElement;
+    if (sheet === null || getComputedStyle(sheet).position !== 'fixed') return undefined;
+    sheet.focus({ preventScroll: true });
+    return () => {
+      if (before instanceof HTMLElement) before.focus({ preventScroll: true });
+    };
+  }, []);
+
   return (
     <Sheet
       ref={sheetRef}
+      tabIndex={-1}
       aria-label={label}
       initial={{ opacity: 0, x: 16 }}
       animate={{ opacity: 1, x: 0 }}

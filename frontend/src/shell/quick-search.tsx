@@ -1,6 +1,7 @@
 import { chakra } from '@chakra-ui/react';
-import { type SyntheticEvent, useEffect, useRef } from 'react';
+import { type SyntheticEvent, useCallback, useRef } from 'react';
 import { useLocation, useNavigate } from 'react-router-dom';
+import { useSingleKey } from '../components/single-key';
 
 const Field = chakra('input', {
   base: {
@@ -17,28 +18,20 @@ const Field = chakra('input', {
   },
 });
 
-const takesText = (target: EventTarget | null): boolean =>
-  target instanceof HTMLElement && target.closest('input, select, textarea, [contenteditable]') !== null;
-
 /** Looks for a part number, family or manufacturer in Find; a duty that is already stated there stays. */
 export function QuickSearch({ onSearched }: { onSearched?: () => void }) {
   const navigate = useNavigate();
   const location = useLocation();
   const inputRef = useRef<HTMLInputElement>(null);
 
-  useEffect(() => {
-    const press = (event: KeyboardEvent): void => {
-      if (event.key !== '/' || event.ctrlKey || event.metaKey || event.altKey) return;
-      // A field that is hidden (the bar on a narrow screen) takes no focus, and the key stays with the page.
-      if (event.defaultPrevented || takesText(event.target) || inputRef.current === null) return;
-      inputRef.current.focus();
-      if (document.activeElement !== inputRef.current) return;
-      inputRef.current.select();
-      event.preventDefault();
-    };
-    document.addEventListener('keydown', press);
-    return () => document.removeEventListener('keydown', press);
+  // A field that is hidden (the bar on a narrow screen) takes no focus, and the key stays with the page.
+  const focus = useCallback((): boolean => {
+    inputRef.current?.focus();
+    if (inputRef.current === null || document.activeElement !== inputRef.current) return false;
+    inputRef.current.select();
+    return true;
   }, []);
+  useSingleKey('/', focus);
 
   const search = (event: SyntheticEvent): void => {
     event.preventDefault();

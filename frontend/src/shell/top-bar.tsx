@@ -1,13 +1,18 @@
 import { chakra } from '@chakra-ui/react';
+import { Suspense, lazy, useCallback, useState } from 'react';
 import { Link, useLocation } from 'react-router-dom';
 import { useAbility } from '../api/ability';
 import { BrandMark } from '../components/brand-mark';
+import { Button } from '../components/button';
 import { FloatingPanel } from '../components/floating-panel';
+import { useSingleKey } from '../components/single-key';
 import { useDisclosure } from '../components/use-disclosure';
 import { AccountMenu } from './account-menu';
 import { type NavigationItem, navigationFor } from './navigation';
 import { NavigationLink } from './navigation-link';
 import { QuickSearch } from './quick-search';
+
+const KeyHelp = lazy(() => import('./key-help'));
 
 const Bar = chakra('header', {
   base: {
@@ -104,6 +109,12 @@ function NarrowMenu({ items }: { items: NavigationItem[] }) {
 
 /** The bar at the head of every page: mark, places by permission, text search, the person. */
 export function TopBar() {
+  const [keysShown, setKeysShown] = useState(false);
+  const showKeys = useCallback(() => {
+    setKeysShown(true);
+    return true;
+  }, []);
+  useSingleKey('?', showKeys);
   const ability = useAbility();
   const work = navigationFor(ability, 'work');
   const administration = navigationFor(ability, 'administration');
@@ -121,7 +132,17 @@ export function TopBar() {
       <chakra.div display={{ base: 'none', lg: 'block' }} width="14.5rem" flexShrink={1}>
         <QuickSearch />
       </chakra.div>
+      <chakra.span display={{ base: 'none', lg: 'inline-flex' }}>
+        <Button variant="plain" aria-keyshortcuts="?" aria-haspopup="dialog" onClick={showKeys}>
+          Keys
+        </Button>
+      </chakra.span>
       <AccountMenu />
+      {keysShown && (
+        <Suspense fallback={null}>
+          <KeyHelp onClose={() => setKeysShown(false)} />
+        </Suspense>
+      )}
     </Bar>
   );
 }
