@@ -79,6 +79,7 @@ export const TableFrame = chakra('div', {
     '& [data-unfold]::before': { content: '"▸"', display: 'inline-block', width: '1.1em' },
     '& [data-unfold][aria-expanded=true]::before': { content: '"▾"' },
     '& [data-unfold]:hover': { textDecoration: 'underline', textUnderlineOffset: '3px' },
+    '& [data-beneath]': { ps: 3, borderInlineStart: '2px solid', borderColor: 'border.field' },
     '& [data-second]': {
       display: 'block',
       color: 'fg.muted',

@@ -146,7 +146,7 @@ describe('Find', () => {
     await userEvent.click(screen.getByRole('checkbox', { name: /^1206\/3216M/ }));
     await waitFor(() => expect(asked.at(-1)?.filters?.sizes).toEqual(['1206']));
     await waitFor(() => expect(addressNow()).toContain('size=1206'));
-    await userEvent.click(screen.getByRole('button', { name: 'Take away: size 1206/3216M' }));
+    await userEvent.click(screen.getByRole('button', { name: 'Take away: Size: 1206/3216M' }));
     await waitFor(() => expect(addressNow()).not.toContain('size='));
     expect(screen.getByRole('checkbox', { name: /^1206\/3216M/ })).not.toBeChecked();
   });
@@ -164,7 +164,7 @@ describe('Find', () => {
     });
     expect(asked[0]?.filters?.tolerances?.[0]).toBeCloseTo(0.01, 12);
     expect(asked[0]?.filters?.tcrs?.[0]).toBeCloseTo(1e-4, 12);
-    expect(screen.getByRole('button', { name: 'Take away: tolerance ±1 %' })).toBeInTheDocument();
+    expect(screen.getByRole('button', { name: 'Take away: Tolerance: ±1 %' })).toBeInTheDocument();
   });
 
   it('unfolds a company number to its judged sources', async () => {

@@ -1,5 +1,6 @@
 import { Suspense, lazy, useCallback, useEffect, useMemo, useRef, useState } from 'react';
 import { Button } from '../../components/button';
+import { useSingleKey } from '../../components/single-key';
 import { type PolicySummary, usePolicies } from '../policies/requests/list-policies';
 import { readDuty } from './duty/read-duty';
 import { FilterPanel } from './filters/filter-panel';
@@ -7,6 +8,7 @@ import { Desk, Panel, Pane } from './find-layout';
 import { writeFind } from './find-address';
 import type { ChangeDuty } from './panel/change-duty';
 import { DutyPanel } from './panel/duty-panel';
+import { entryPlace, goToPlace } from './panel/panel-places';
 import { policyNameOf } from './policy-name';
 import { questionOf } from './question';
 import { useSearch } from './requests/use-search';
@@ -47,6 +49,18 @@ export function Component() {
   );
   const close = useCallback(() => change((before) => ({ ...before, part: undefined })), [change]);
   const openPanel = useCallback(() => setPanelOpen(true), []);
+  const toDuty = useCallback(() => {
+    setPanelOpen(true);
+    requestAnimationFrame(() => goToPlace(entryPlace('lower')));
+    return true;
+  }, []);
+  const toParts = useCallback(() => {
+    setPanelOpen(false);
+    requestAnimationFrame(() => paneRef.current?.querySelector<HTMLElement>('[role=grid]')?.focus());
+    return true;
+  }, []);
+  useSingleKey('d', toDuty);
+  useSingleKey('p', toParts);
   const latest = useRef(state);
   useEffect(() => {
     latest.current = state;
@@ -60,10 +74,16 @@ export function Component() {
     <Desk data-sheet={state.part === undefined ? 'closed' : 'open'}>
       <title>Find · Resistry</title>
       <Panel data-open={panelOpen} id="duty-panel">
-        <Button display={{ md: 'none' }} variant="solid" mb={4} onClick={() => setPanelOpen(false)}>
+        <Button display={{ md: 'none' }} variant="solid" mb={4} onClick={toParts}>
           Show the parts
         </Button>
-        <DutyPanel duty={state.duty} read={shownRead} onChange={changeDuty} policies={policies} />
+        <DutyPanel
+          duty={state.duty}
+          read={shownRead}
+          onChange={changeDuty}
+          policies={policies}
+          onEnter={toParts}
+        />
         <FilterPanel filters={state.filters} flags={state.flags} onChange={change} />
       </Panel>
       <Pane ref={paneRef}>

@@ -64,7 +64,14 @@ const interval = (
   pointer: string,
   single: SingleMeaning,
   placeholder?: string,
-): EntryDefinition => ({ label, quantity, unit, pointer, interval: single, placeholder: example(placeholder) });
+): EntryDefinition => ({
+  label,
+  quantity,
+  unit,
+  pointer,
+  interval: single,
+  placeholder: example(placeholder),
+});
 
 export const entryDefinitions: Record<EntryName, EntryDefinition> = {
   lower: entry('Lowest', 'resistance', 'Ω', '/window/lower', '4k5'),

@@ -4,6 +4,7 @@ import { type FindState, filterNames, flagNames } from '../find-address';
 import { useFacets } from '../requests/get-facets';
 import type { ChangeFind } from '../use-find-state';
 import { filterChoices, filterWords, flagWords } from './filter-choices';
+import { withoutFilters } from './without-filters';
 
 interface Chip {
   words: string;
@@ -32,13 +33,6 @@ const Chips = chakra('ul', {
     },
     '& button[data-chip]:hover': { borderColor: 'accent', color: 'accent' },
   },
-});
-
-const noFilters = (state: FindState): FindState => ({
-  ...state,
-  text: '',
-  filters: { manufacturer: [], family: [], technology: [], size: [], series: [], tolerance: [], tcr: [] },
-  flags: { certificate: false, numbered: false, offered: false },
 });
 
 export interface FilterChipsProps extends Pick<FindState, 'text' | 'filters' | 'flags'> {
@@ -85,7 +79,7 @@ export function FilterChips({ text, filters, flags, onChange }: FilterChipsProps
       ))}
       {chips.length > 1 && (
         <li>
-          <Button variant="plain" onClick={() => onChange(noFilters)}>
+          <Button variant="plain" onClick={() => onChange(withoutFilters)}>
             Take all away
           </Button>
         </li>

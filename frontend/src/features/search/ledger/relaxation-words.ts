@@ -92,6 +92,8 @@ function changeOfNumber(field: string, to: number, duty: DutyText): Change | und
 }
 
 function changeOf({ field, to }: Relaxation, duty: DutyText): Change | undefined {
+  // No load at all is what the duty is not about.
+  if (to === 0 && field.startsWith('/load/')) return undefined;
   if (typeof to === 'number') return changeOfNumber(field, to, duty);
   if (field === '/approvals') {
     const more = added(to, approvals, duty.approvals);

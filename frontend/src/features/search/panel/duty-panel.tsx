@@ -16,7 +16,25 @@ import { panelPlaces } from './panel-places';
 
 export interface DutyPanelProps extends DutyGroupProps {
   policies: readonly PolicySummary[];
+  /** Where Enter in an entry leads; without it, nowhere. */
+  onEnter?: () => void;
 }
+
+/** In sight while it has the keyboard: past the whole panel, as Enter in any entry leads as well. */
+const Onward = chakra('button', {
+  base: {
+    position: 'absolute',
+    opacity: 0,
+    pointerEvents: 'none',
+    bg: 'bg.panel',
+    color: 'accent',
+    px: 3,
+    py: 1.5,
+    borderRadius: 'sm',
+    zIndex: 'sticky',
+    _focusVisible: { opacity: 1 },
+  },
+});
 
 const deviationOptions = deviationRules.map((value) => ({
   value,
@@ -40,7 +58,7 @@ function impliedPower({ read }: DutyGroupProps): string | undefined {
 
 /** What a position demands, grouped as an engineer thinks: a few fields first, the rest folded. */
 export const DutyPanel = memo(function DutyPanel(props: DutyPanelProps) {
-  const { duty, read, onChange, policies } = props;
+  const { duty, read, onChange, policies, onEnter } = props;
   const policyChoices = useMemo(() => policyOptions(policies), [policies]);
   const setPolicy = useCallback(
     (value: string) => onChange((before) => ({ ...before, policy: value === '' ? undefined : value })),
@@ -64,7 +82,14 @@ export const DutyPanel = memo(function DutyPanel(props: DutyPanelProps) {
     />
   );
   return (
-    <chakra.form aria-label="Duty" onSubmit={(event) => event.preventDefault()}>
+    <form
+      aria-label="Duty"
+      onSubmit={(event) => {
+        event.preventDefault();
+        onEnter?.();
+      }}
+    >
+      {onEnter !== undefined && <Onward type="submit">To the parts</Onward>}
       <OpenGroup title="Value over life" note="Ω">
         {field('lower')}
         {field('nominal')}
@@ -140,6 +165,6 @@ export const DutyPanel = memo(function DutyPanel(props: DutyPanelProps) {
       <FeaturesGroup {...props} />
       <SafetyGroup {...props} />
       <StandingGroup {...props} />
-    </chakra.form>
+    </form>
   );
 });

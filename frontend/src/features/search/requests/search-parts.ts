@@ -13,7 +13,7 @@ export interface SearchItem {
   companyPartNumber?: { id: number; number: string };
   sources?: { part: SearchPart; assessment: AnsweredAssessment }[];
   /** It stands beneath its number, as one of its sources. */
-  beneath?: true;
+  beneath?: boolean;
   /** What it has far more of than is asked, in words, the largest first. */
   overSpecification: string[];
 }

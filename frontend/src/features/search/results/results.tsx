@@ -3,6 +3,7 @@ import { ColumnChooser } from '../../../components/data-table/column-chooser';
 import type { Sort } from '../../../components/data-table/data-column';
 import { useTableColumns } from '../../../components/data-table/use-table-columns';
 import { FilterChips } from '../filters/filter-chips';
+import { withoutFilters } from '../filters/without-filters';
 import { type FindState, isNarrowed } from '../find-address';
 import { Ledger } from '../ledger/ledger';
 import type { ChangeDuty } from '../panel/change-duty';
@@ -75,6 +76,7 @@ export const Results = memo(function Results(props: ResultsProps) {
           narrowed={isNarrowed(question.state)}
           onChange={onChangeDuty}
           onShowUnrated={() => onShow('met-and-unrated')}
+          onWithoutFilters={() => onChange(withoutFilters)}
         />
       ) : (
         <ResultTable
