@@ -18,5 +18,5 @@ module.exports = {
       },
     ],
   },
-  testTimeout: 60000,
+  testTimeout: 240000,
 };
