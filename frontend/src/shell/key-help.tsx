@@ -41,7 +41,7 @@ const groups: readonly { title: string; lines: readonly Keys[] }[] = [
 const Lines = chakra('dl', {
   base: {
     display: 'grid',
-    gridTemplateColumns: 'minmax(7rem, auto) minmax(0, 1fr)',
+    gridTemplateColumns: { base: '6rem minmax(0, 1fr)', sm: '9.5rem minmax(0, 1fr)' },
     columnGap: 4,
     rowGap: 1.5,
     mb: 4,

@@ -37,6 +37,7 @@ export const tokens = defineTokens({
   lineHeights: { tight: { value: 1.2 }, row: { value: 1.3 }, text: { value: 1.5 } },
   zIndex: {
     sticky: { value: 10 },
+    steady: { value: 11 },
     bar: { value: 20 },
     sheet: { value: 30 },
     popover: { value: 40 },

@@ -143,7 +143,12 @@ function VirtualTable<Row extends object>(props: DataTableProps<Row> & { rowHeig
     if (next === undefined) return;
     event.preventDefault();
     setActive(next);
-    virtualizer.scrollToIndex(next.row, { align: 'auto' });
+    if (next.row !== row) virtualizer.scrollToIndex(next.row, { align: 'auto' });
+    if (next.column !== column)
+      document.getElementById(cellId(gridId, next.row, next.column))?.scrollIntoView({
+        block: 'nearest',
+        inline: 'nearest',
+      });
   };
 
   const keyAt = (index: number): string | number => {

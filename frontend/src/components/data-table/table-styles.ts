@@ -54,9 +54,12 @@ export const TableFrame = chakra('div', {
       overflow: 'hidden',
       textOverflow: 'ellipsis',
       whiteSpace: 'nowrap',
+      // Clear of the head and of the column that stays when the keyboard leads to a cell.
+      scrollMarginTop: `${headHeight}px`,
+      scrollMarginInlineStart: '9rem',
     },
     '& [data-align=end]': { textAlign: 'end' },
-    '& [data-stays]': { position: 'sticky', insetInlineStart: 0, zIndex: 1, bg: 'bg' },
+    '& [data-stays]': { position: 'sticky', insetInlineStart: 0, zIndex: 1, bg: 'bg', ps: 2 },
     // Each colour by name: a cell that inherits its row's costs the browser ten times as much to style.
     '& tbody tr:hover, & tr:hover [data-stays]': { bg: 'bg.hover' },
     '& tr[data-level="2"], & tr[data-level="2"] [data-stays]': { bg: 'bg.hover' },

@@ -35,7 +35,33 @@ export const Panel = chakra('div', {
   },
 });
 
+const paneInset = { base: 4, md: 6 } as const;
+
 /** The column of the results, which scrolls by itself. */
 export const Pane = chakra('div', {
-  base: { overflow: 'auto', px: { base: 4, md: 6 }, py: 4, position: 'relative', minWidth: 0 },
+  base: {
+    overflow: 'auto',
+    position: 'relative',
+    minWidth: 0,
+    containerType: 'inline-size',
+    // As wide as the table where that is wider than the pane. Insets lie inside of what scrolls: what stays in sight
+    // would stop short of the edge by a padding of the pane itself.
+    '& > div': { width: 'max-content', minWidth: 'full', py: 4 },
+  },
 });
+
+/** What does not go along when a wide table is scrolled sideways. */
+export const Steady = chakra('div', {
+  base: {
+    position: 'sticky',
+    insetInlineStart: 0,
+    width: '100cqi',
+    contain: 'inline-size',
+    px: paneInset,
+    // What opens from here lies over the head of the table.
+    zIndex: 'steady',
+  },
+});
+
+/** What a wide table scrolls. */
+export const Wide = chakra('div', { base: { px: paneInset } });

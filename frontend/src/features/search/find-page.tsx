@@ -4,7 +4,7 @@ import { useSingleKey } from '../../components/single-key';
 import { type PolicySummary, usePolicies } from '../policies/requests/list-policies';
 import { readDuty } from './duty/read-duty';
 import { FilterPanel } from './filters/filter-panel';
-import { Desk, Panel, Pane } from './find-layout';
+import { Desk, Panel, Pane, Steady } from './find-layout';
 import { writeFind } from './find-address';
 import type { ChangeDuty } from './panel/change-duty';
 import { DutyPanel } from './panel/duty-panel';
@@ -22,8 +22,8 @@ import { useIsNarrow } from './use-is-narrow';
 // With its charts and motion it is worth loading only once a row is opened.
 const PartSheet = lazy(() => import('./sheet/part-sheet'));
 
-/** Below this the table's columns no longer fit, and a row becomes one cell; px inside the pane. */
-const narrowBelow = 572;
+/** Below this the table's columns no longer fit, and a row becomes one cell; px of the pane. */
+const narrowBelow = 620;
 /** A refusal is said once the typing has stopped for this long: half a number often contradicts the other entries. */
 const refusalPauseMilliseconds = 600;
 const noPolicies: readonly PolicySummary[] = [];
@@ -88,16 +88,18 @@ export function Component() {
       </Panel>
       <Pane ref={paneRef}>
         <div>
-          <Sentence
-            duty={state.duty}
-            policies={policies}
-            errors={shownRead.errors}
-            onChange={changeDuty}
-            onGoTo={openPanel}
-          />
-          <Button display={{ md: 'none' }} mt={2} aria-controls="duty-panel" onClick={openPanel}>
-            Change the duty
-          </Button>
+          <Steady>
+            <Sentence
+              duty={state.duty}
+              policies={policies}
+              errors={shownRead.errors}
+              onChange={changeDuty}
+              onGoTo={openPanel}
+            />
+            <Button display={{ md: 'none' }} mt={2} aria-controls="duty-panel" onClick={openPanel}>
+              Change the duty
+            </Button>
+          </Steady>
           <ResultsPane
             question={question}
             search={search}

@@ -54,23 +54,21 @@ export function MarginCell({
 const NarrowFrame = chakra('div', {
   base: {
     display: 'grid',
-    gridTemplateColumns: '62px minmax(0, 1fr) auto',
+    gridTemplateColumns: 'auto minmax(0, 1fr) auto',
     columnGap: 3,
     rowGap: 1,
     alignItems: 'center',
-    py: 2,
     whiteSpace: 'normal',
     '& > :nth-of-type(4)': { gridColumn: '1 / -1' },
   },
 });
 
-/** One result on a narrow screen: what decides, in two lines. */
-export function NarrowResult({ part, assessment, overSpecification, beneath }: SearchItem) {
+/** One result on a narrow screen: what decides, in two lines. A number has no body of its own, only its sources have. */
+export function NarrowResult(item: SearchItem) {
+  const { part, assessment, overSpecification, sources, beneath = false } = item;
   return (
     <NarrowFrame>
-      <div>
-        <BodyCell part={part} />
-      </div>
+      <div>{sources === undefined && <BodyCell part={part} />}</div>
       <div>
         {beneath ? part.manufacturerPartNumber : <b>{leadingNumber(part)}</b>}
         <span data-second="">

@@ -85,7 +85,7 @@ export function ResultTable({ answered, rowCount, openPart, onOpen, ...table }: 
         {...table}
       />
       {error !== null && (
-        <chakra.div position="sticky" bottom={-4} bg="bg" borderTop="1px solid" borderColor="border">
+        <chakra.div position="sticky" bottom={0} bg="bg" borderTop="1px solid" borderColor="border">
           <Failed error={error} onRetry={retry} />
         </chakra.div>
       )}

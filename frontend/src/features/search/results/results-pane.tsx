@@ -2,6 +2,7 @@ import { chakra } from '@chakra-ui/react';
 import { useDeferredValue } from 'react';
 import { Loading } from '../../../components/states';
 import type { ReadDuty } from '../duty/read-duty';
+import { Steady } from '../find-layout';
 import type { Question } from '../question';
 import type { Search } from '../requests/use-search';
 import { countWords } from './count-line';
@@ -28,13 +29,17 @@ export function ResultsPane({ question, search, failure, read, onGoTo, ...result
   const nothingYet = failure === null && answered === undefined;
   return (
     <>
-      {shown === undefined && <chakra.h1 srOnly>Find</chakra.h1>}
-      <chakra.div role="status" srOnly>
-        {shown !== undefined && current && countWords(shown.answer.total, results.grouped)}
-      </chakra.div>
-      {failure !== null && <SearchFailed error={failure} onRetry={search.retry} />}
-      {nothingYet && question.request === undefined && <NothingAsked read={read} onGoTo={onGoTo} />}
-      {nothingYet && question.request !== undefined && <Loading label="Searching the catalogue" lines={12} />}
+      <Steady>
+        {shown === undefined && <chakra.h1 srOnly>Find</chakra.h1>}
+        <chakra.div role="status" srOnly>
+          {shown !== undefined && current && countWords(shown.answer.total, results.grouped)}
+        </chakra.div>
+        {failure !== null && <SearchFailed error={failure} onRetry={search.retry} />}
+        {nothingYet && question.request === undefined && <NothingAsked read={read} onGoTo={onGoTo} />}
+        {nothingYet && question.request !== undefined && (
+          <Loading label="Searching the catalogue" lines={12} />
+        )}
+      </Steady>
       {shown !== undefined && (
         <chakra.div
           data-stale={current ? undefined : ''}

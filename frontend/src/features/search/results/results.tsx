@@ -5,6 +5,7 @@ import { useTableColumns } from '../../../components/data-table/use-table-column
 import { FilterChips } from '../filters/filter-chips';
 import { withoutFilters } from '../filters/without-filters';
 import { type FindState, isNarrowed } from '../find-address';
+import { Steady, Wide } from '../find-layout';
 import { Ledger } from '../ledger/ledger';
 import type { ChangeDuty } from '../panel/change-duty';
 import type { Show } from '../requests/search-request';
@@ -13,6 +14,7 @@ import type { ChangeFind } from '../use-find-state';
 import { CopyLink } from './copy-link';
 import { CountLine } from './count-line';
 import { NothingMeets } from './nothing-meets';
+import { OrderChoice } from './order-choice';
 import { groupedColumns, narrowColumns, resultColumns } from './result-columns';
 import { ResultTable } from './result-table';
 import { TableActions } from './table-actions';
@@ -30,7 +32,8 @@ export interface ResultsProps extends Pick<FindState, 'text' | 'filters' | 'flag
   address: () => string;
 }
 
-const rowHeights = { wide: 52, narrow: 112 };
+/** px; a row on a narrow screen has more to say under a number, which has its count of sources beside it. */
+const rowHeights = { wide: 52, narrow: 112, narrowGrouped: 128 };
 
 /** The parts that meet the duty, with how many they are, what keeps the others out and what can be done with the list. */
 export const Results = memo(function Results(props: ResultsProps) {
@@ -54,42 +57,48 @@ export const Results = memo(function Results(props: ResultsProps) {
   const columns = question.state.grouped ? groupedColumns(shown) : shown;
   return (
     <>
-      <CountLine
-        total={answer.total}
-        unrated={answer.unrated}
-        byApproval={answer.byApproval}
-        show={show}
-        grouped={grouped}
-        onShow={onShow}
-        onGrouped={onGrouped}
-      >
-        {!narrow && <ColumnChooser choices={table.choices} />}
-        <TableActions request={question.request} rowCount={rowCount} columns={table.visible} />
-        <CopyLink address={props.address} />
-      </CountLine>
-      <Ledger answer={answer} duty={question.state.duty} onChange={onChangeDuty} />
-      <FilterChips text={text} filters={filters} flags={flags} onChange={onChange} />
-      {rowCount === 0 ? (
-        <NothingMeets
-          answer={answer}
-          duty={question.state.duty}
-          narrowed={isNarrowed(question.state)}
-          onChange={onChangeDuty}
-          onShowUnrated={() => onShow('met-and-unrated')}
-          onWithoutFilters={() => onChange(withoutFilters)}
-        />
-      ) : (
-        <ResultTable
-          answered={question.request}
-          rowCount={rowCount}
-          columns={columns}
-          rowHeight={narrow ? rowHeights.narrow : rowHeights.wide}
-          sort={sort}
-          onSortBy={table.sortBy}
-          openPart={openPart}
-          onOpen={onOpen}
-          scrollRef={scrollRef}
-        />
+      <Steady>
+        <CountLine
+          total={answer.total}
+          unrated={answer.unrated}
+          byApproval={answer.byApproval}
+          show={show}
+          grouped={grouped}
+          onShow={onShow}
+          onGrouped={onGrouped}
+        >
+          {!narrow && <ColumnChooser choices={table.choices} />}
+          <TableActions request={question.request} rowCount={rowCount} columns={table.visible} />
+          <CopyLink address={props.address} />
+        </CountLine>
+        <Ledger answer={answer} duty={question.state.duty} onChange={onChangeDuty} />
+        <FilterChips text={text} filters={filters} flags={flags} onChange={onChange} />
+        {narrow && rowCount > 1 && <OrderChoice columns={resultColumns} sort={sort} onSort={onSort} />}
+        {rowCount === 0 && (
+          <NothingMeets
+            answer={answer}
+            duty={question.state.duty}
+            narrowed={isNarrowed(question.state)}
+            onChange={onChangeDuty}
+            onShowUnrated={() => onShow('met-and-unrated')}
+            onWithoutFilters={() => onChange(withoutFilters)}
+          />
+        )}
+      </Steady>
+      {rowCount > 0 && (
+        <Wide>
+          <ResultTable
+            answered={question.request}
+            rowCount={rowCount}
+            columns={columns}
+            rowHeight={rowHeights[!narrow ? 'wide' : question.state.grouped ? 'narrowGrouped' : 'narrow']}
+            sort={sort}
+            onSortBy={table.sortBy}
+            openPart={openPart}
+            onOpen={onOpen}
+            scrollRef={scrollRef}
+          />
+        </Wide>
       )}
     </>
   );
