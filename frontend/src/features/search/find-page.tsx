@@ -56,7 +56,10 @@ export function Component() {
   }, []);
   const toParts = useCallback(() => {
     setPanelOpen(false);
-    requestAnimationFrame(() => paneRef.current?.querySelector<HTMLElement>('[role=grid]')?.focus());
+    requestAnimationFrame(() =>
+      // The first rows are in sight; the browser would put the whole table there, and the sentence out of it.
+      paneRef.current?.querySelector<HTMLElement>('[role=grid]')?.focus({ preventScroll: true }),
+    );
     return true;
   }, []);
   useSingleKey('d', toDuty);

@@ -52,7 +52,8 @@ export function useFindState(): [FindState, ChangeFind, FindState] {
       const at = Date.now();
       const sameStep = names === before.names && at - before.at < oneStepMilliseconds;
       written.current = { address: next.toString(), names, at };
-      setAddress(next, { replace: sameStep || !changedHere.current });
+      // At once, because a step back that overtakes it would look as if nothing had changed.
+      setAddress(next, { replace: sameStep || !changedHere.current, flushSync: true });
     }, addressPauseMilliseconds);
     return () => clearTimeout(timer);
   }, [state, setAddress]);

@@ -21,7 +21,8 @@ export interface Search {
 export function useSearch(question: Question): Search {
   const [latest, setLatest] = useState<Answered>();
   const { data, error, isError, refetch } = useQuery(searchPage(question.request, 1));
-  if (data !== undefined && question.request !== undefined && latest?.answer !== data)
+  const answered = data !== undefined && question.request !== undefined;
+  if (answered && (latest?.answer !== data || latest.question !== question))
     setLatest({ answer: data, question });
   return {
     latest,
