@@ -1,3 +1,4 @@
+import type { Page } from '@playwright/test';
 import { EVERYTHING, found, results } from '../support/find';
 import { quantile } from '../support/quantile';
 import { reportFigure } from '../support/report-figure';
@@ -7,19 +8,20 @@ const ROWS = 10_000;
 const FRAMES = 600;
 const LONGEST_MILLISECONDS = 25;
 
-test('ten thousand rows scroll smoothly', async ({ signIn }) => {
-  const { page } = await signIn('designer');
-  await page.goto(EVERYTHING);
-  await found(page);
-  expect(Number(await results(page).getAttribute('aria-rowcount'))).toBeGreaterThan(ROWS);
-  const frames = await results(page).evaluate(
-    async (grid, { rows, count }) => {
+/** As fast as the eye can follow: the rows come while they scroll. */
+const READ_ROWS = 1_500;
+const JUDGED = `${EVERYTHING}&lower=1&upper=1M&voltage=0..12&ambient=-20..70&life=10+years`;
+
+/** Scrolls so many rows in so many frames. @returns how long each frame took, ms */
+function scroll(page: Page, rows: number): Promise<number[]> {
+  return results(page).evaluate(
+    async (grid, { rows: passed, count }) => {
       let scroller: Element | null = grid;
       while (scroller !== null && scroller.scrollHeight <= scroller.clientHeight + 1)
         scroller = scroller.parentElement;
       if (scroller === null) throw new Error('Nothing scrolls.');
-      const rowHeight = grid.querySelector('[aria-rowindex]')?.getBoundingClientRect().height ?? 0;
-      const step = (rows * rowHeight) / count;
+      const rowHeight = grid.querySelector('tbody [aria-rowindex]')?.getBoundingClientRect().height ?? 0;
+      const step = (passed * rowHeight) / count;
       const frame = () => new Promise<number>((resolve) => requestAnimationFrame(resolve));
       const durations: number[] = [];
       let before = await frame();
@@ -31,9 +33,21 @@ test('ten thousand rows scroll smoothly', async ({ signIn }) => {
       }
       return durations;
     },
-    { rows: ROWS, count: FRAMES },
+    { rows, count: FRAMES },
   );
-  const p95 = quantile(frames, 0.95);
-  reportFigure('Frame while scrolling, p95 in ms', p95, `under ${LONGEST_MILLISECONDS}`);
-  expect(p95).toBeLessThan(LONGEST_MILLISECONDS);
-});
+}
+
+for (const [how, address, rows] of [
+  ['flying past', EVERYTHING, ROWS],
+  ['reading', JUDGED, READ_ROWS],
+] as const) {
+  test(`${rows} rows scroll smoothly, ${how}`, async ({ signIn }) => {
+    const { page } = await signIn('designer');
+    await page.goto(address);
+    await found(page);
+    expect(Number(await results(page).getAttribute('aria-rowcount'))).toBeGreaterThan(rows);
+    const p95 = quantile(await scroll(page, rows), 0.95);
+    reportFigure(`Frame while scrolling ${rows} rows, p95 in ms`, p95, `under ${LONGEST_MILLISECONDS}`);
+    expect(p95).toBeLessThan(LONGEST_MILLISECONDS);
+  });
+}

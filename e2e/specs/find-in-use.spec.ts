@@ -118,3 +118,41 @@ test('a sheet that covers the list takes the keyboard and gives it back', async 
   await expect(sheet).toBeHidden();
   await expect(results(page)).toBeFocused();
 });
+
+test('who comes back from a part finds the list as they left it', async ({ signIn }) => {
+  const { page } = await signIn('designer');
+  await page.goto(EVERYTHING);
+  await found(page);
+  const scrolled = () =>
+    results(page).evaluate((table) => {
+      let scroller: Element | null = table;
+      while (scroller !== null && getComputedStyle(scroller).overflowY !== 'auto')
+        scroller = scroller.parentElement;
+      return scroller?.scrollTop;
+    });
+  await results(page).focus();
+  for (let each = 0; each < 6; each += 1) await page.keyboard.press('PageDown');
+  await expect(results(page).locator('tr[data-active]')).toContainText(/Ω|link/);
+  await page.keyboard.press('Enter');
+  const sheet = page.getByRole('complementary', { name: 'Assessment' });
+  const before = await scrolled();
+  expect(before).toBeGreaterThan(1000);
+  await sheet.getByRole('link', { name: 'Ratings, offers and history' }).click();
+  await expect(page).toHaveURL(/\/parts\/\d+/);
+  await page.goBack();
+  await expect(sheet).toBeVisible();
+  await expect.poll(scrolled).toBe(before);
+});
+
+test('a link to an open part marks its row', async ({ signIn }) => {
+  const { page } = await signIn('designer');
+  await page.goto(DIVIDER);
+  await found(page);
+  await results(page).focus();
+  await page.keyboard.press('j');
+  await page.keyboard.press('Enter');
+  await expect(page).toHaveURL(/part=\d+/);
+  await page.reload();
+  await found(page);
+  await expect(results(page).getByRole('row', { selected: true })).toHaveAttribute('aria-rowindex', '3');
+});

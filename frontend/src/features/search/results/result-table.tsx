@@ -4,7 +4,7 @@ import type { DataColumn, Sort } from '../../../components/data-table/data-colum
 import { DataTable } from '../../../components/data-table/data-table';
 import type { RowTree } from '../../../components/data-table/row-tree';
 import { Failed } from '../../../components/states';
-import type { SearchItem } from '../requests/search-parts';
+import { type SearchItem, pageSize } from '../requests/search-parts';
 import type { SearchRequest } from '../requests/search-request';
 import { useSearchRows } from '../requests/use-search-rows';
 import { type Unfolded, countOfRows, rowAtPlace, rowOfSource } from './unfolded-rows';
@@ -70,7 +70,15 @@ export function ResultTable({ answered, rowCount, openPart, onOpen, ...table }: 
     toggle,
   };
   const shownCount = useMemo(() => countOfRows(rowCount, unfolded), [rowCount, unfolded]);
-  const selected = openPlace !== undefined && rowAt(openPlace)?.part.id === openPart ? openPlace : undefined;
+  const isOpen = (place: number | undefined): boolean =>
+    place !== undefined && openPart !== undefined && rowAt(place)?.part.id === openPart;
+  // A link says which part is open, but not where it stands; it is marked where it is one of the first.
+  const firstPlaces = Array.from({ length: Math.min(shownCount, pageSize) }, (_, place) => place);
+  const selected = isOpen(openPlace)
+    ? openPlace
+    : openPart === undefined
+      ? undefined
+      : firstPlaces.find(isOpen);
   return (
     <>
       <DataTable

@@ -5,6 +5,7 @@ import type { ReadDuty } from '../duty/read-duty';
 import { Steady } from '../find-layout';
 import type { Question } from '../question';
 import type { Search } from '../requests/use-search';
+import { useKeptPlace } from '../use-kept-place';
 import { countWords } from './count-line';
 import { NothingAsked } from './nothing-asked';
 import { Results, type ResultsProps } from './results';
@@ -26,6 +27,7 @@ export function ResultsPane({ question, search, failure, read, onGoTo, ...result
   const answered = useDeferredValue(search.latest);
   const current = answered?.question === question;
   const shown = failure === null ? answered : undefined;
+  useKeptPlace(results.scrollRef, shown !== undefined);
   const nothingYet = failure === null && answered === undefined;
   return (
     <>
